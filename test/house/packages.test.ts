@@ -1,0 +1,45 @@
+import { describe, expect, test } from 'vitest';
+import { folderOf, importsOf, packageOf, readSource, sourceFiles } from './folders.js';
+
+interface Manifest {
+  readonly scripts: Record<string, string>;
+  readonly dependencies: Record<string, string>;
+  readonly devDependencies: Record<string, string>;
+}
+interface Lock {
+  readonly packages: Record<string, { version: string; hasInstallScript?: boolean }>;
+}
+
+const manifest = JSON.parse(readSource('package.json')) as Manifest;
+const lock = JSON.parse(readSource('package-lock.json')) as Lock;
+
+/** Places in the lockfile where a package is installed, nested copies included. */
+const copiesOf = (name: string) =>
+  Object.keys(lock.packages).filter((path) => path.endsWith(`node_modules/${name}`));
+
+describe('packages', () => {
+  test.each(['lit', 'lit-html', 'lit-element', '@lit/reactive-element', 'three'])(
+    'the lockfile holds one copy of %s',
+    (name) => {
+      expect(copiesOf(name)).toEqual([`node_modules/${name}`]);
+    },
+  );
+
+  test('every version is pinned exactly', () => {
+    const loose = Object.entries({ ...manifest.dependencies, ...manifest.devDependencies }).filter(
+      ([, version]) => !/^\d+\.\d+\.\d+$/.test(version),
+    );
+    expect(loose).toEqual([]);
+  });
+
+  test('whatever the shipped folders import is a dependency', () => {
+    const missing = ['materials', 'physics', 'scenes', 'components']
+      .flatMap(sourceFiles)
+      .filter((file) => folderOf(file) && !file.startsWith('materials/generate/'))
+      .flatMap((file) => importsOf(readSource(file)).map((specifier) => ({ file, specifier })))
+      .filter(({ specifier }) => !/^(\.|node:|stratabeam)/.test(specifier))
+      .filter(({ specifier }) => !(packageOf(specifier) in manifest.dependencies))
+      .map(({ file, specifier }) => `${file}: ${specifier}`);
+    expect(missing).toEqual([]);
+  });
+});

@@ -44,7 +44,8 @@ const viteMiddleware = async (ctx, next) => {
   });
 };
 
-export default {
+/** @type {import('@web/test-runner').TestRunnerConfig} */
+const config = {
   rootDir: root,
   files: ['test/**/*.browser.test.ts'],
   nodeResolve: false,
@@ -60,3 +61,5 @@ export default {
   testsFinishTimeout: 300_000,
   reporters: [summaryReporter({}), resultsReporter('dist/results/components.json')],
 };
+
+export default config;

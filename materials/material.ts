@@ -1,11 +1,5 @@
 /** How sure we are of where a number comes from; shown beside it on the desk and in the dossier. */
-export type Provenance =
-  | 'measured'
-  | 'entered'
-  | 'assumed'
-  | 'published'
-  | 'recalled'
-  | 'computed';
+export type Provenance = 'measured' | 'entered' | 'assumed' | 'published' | 'recalled' | 'computed';
 
 /** Section-drawing family: decides the hatch a layer is drawn with, nothing physical. */
 export type MaterialFamily =

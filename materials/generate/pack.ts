@@ -1,0 +1,93 @@
+import { packDecimals } from '../packed-decimals.js';
+import { shellNames } from '../shells.js';
+import type { ElementRelaxation } from './eadl.js';
+import {
+  momentumTransfers_per_angstrom,
+  type ScatteringFunctions,
+} from './scattering-functions.js';
+import type { ElementCrossSections } from './xcom.js';
+
+export const range_keV = { from: 1, to: 20_000 };
+
+/**
+ * The whole table as one packed text, in the order that materials/element-tables.ts reads:
+ * momentum transfers, then the length of each element's record, then the records.
+ */
+export function packTable(
+  crossSections: readonly ElementCrossSections[],
+  relaxation: (z: number) => ElementRelaxation,
+  scattering: readonly ScatteringFunctions[],
+): string {
+  const records: number[][] = [];
+  for (let z = 1; z <= 92; z++) {
+    records.push(elementRecord(crossSections[z], relaxation(z), scattering[z]));
+  }
+  return packDecimals([
+    ...listed(momentumTransfers_per_angstrom),
+    ...listed(records.map((record) => record.length)),
+    ...records.flat(),
+  ]);
+}
+
+function elementRecord(
+  { rows, edges }: ElementCrossSections,
+  relaxation: ElementRelaxation,
+  { formFactor, incoherent }: ScatteringFunctions,
+): number[] {
+  const kept = rows.filter(
+    (row) => row.energy_keV >= range_keV.from && row.energy_keV <= range_keV.to,
+  );
+  const shells = matchShells(
+    edges.map((edge) => edge.energy_keV),
+    relaxation.bindingEnergies_keV,
+  );
+  return [
+    ...listed(kept.map((row) => row.energy_keV)),
+    ...kept.map((row) => row.coherent),
+    ...kept.map((row) => row.incoherent),
+    ...kept.map((row) => row.photoelectric),
+    ...listed(kept.map((row) => row.pair).filter((pair) => pair > 0)),
+    ...listed(edges.flatMap((edge, i) => [shells[i], edge.energy_keV, edge.below, edge.above])),
+    ...listed(
+      relaxation.bindingEnergies_keV.slice(
+        0,
+        1 + relaxation.bindingEnergies_keV.findLastIndex((e) => e > 0),
+      ),
+    ),
+    ...relaxation.shells.flatMap((shell) => [
+      shell.yield,
+      ...listed(shell.costerKronig),
+      ...listed(shell.radiative.flatMap(({ fromShell, rate }) => [fromShell, rate])),
+    ]),
+    ...relaxation.vacanciesPerAuger,
+    ...formFactor,
+    ...incoherent,
+  ];
+}
+
+/**
+ * Names the edges of the attenuation table: each belongs to the shell whose EADL97 binding energy is
+ * nearest. The two tables differ by up to a few per cent in outer shells, so the order is checked too.
+ */
+export function matchShells(
+  edges_keV: readonly number[],
+  bindingEnergies_keV: readonly number[],
+): number[] {
+  const shells = edges_keV.map((edge) => {
+    const distance = bindingEnergies_keV.map((e) =>
+      e > 0 ? Math.abs(Math.log(e / edge)) : Infinity,
+    );
+    return distance.indexOf(Math.min(...distance));
+  });
+  shells.forEach((shell, i) => {
+    if (i > 0 && shell >= shells[i - 1]) {
+      const list = edges_keV.map((edge, j) => `${shellNames[shells[j]]} ${edge}`).join(', ');
+      throw new Error(`edges do not match the binding energies one to one: ${list}`);
+    }
+  });
+  return shells;
+}
+
+function listed(values: readonly number[]): number[] {
+  return [values.length, ...values];
+}

@@ -12,7 +12,11 @@ export interface Visit {
 
 /** The browser all visits of one test file share. */
 export const openBrowser = (): Promise<Browser> =>
-  chromium.launch({ executablePath: findBrowser(), args: browserFlags(), chromiumSandbox: false });
+  chromium.launch({
+    executablePath: findBrowser(),
+    args: browserFlags(),
+    chromiumSandbox: process.getuid?.() !== 0,
+  });
 
 /** Opens an address in a fresh profile at 1440 × 900 and listens for complaints from the start. */
 export async function visit(

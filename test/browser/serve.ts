@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
-import { build, preview } from 'vite';
+import { preview } from 'vite';
 import type { TestProject } from 'vitest/node';
 
 declare module 'vitest' {
@@ -11,14 +11,6 @@ declare module 'vitest' {
 }
 
 const configFile = fileURLToPath(new URL('../../components/vite.config.ts', import.meta.url));
-const built = (name: string) =>
-  existsSync(fileURLToPath(new URL(`../../dist/${name}/index.html`, import.meta.url)));
-
-/** Builds what is missing (`npm test` has built it already); a stale build is the caller's care. */
-export async function buildMissing(): Promise<void> {
-  if (!built('web')) await build({ configFile, logLevel: 'warn' });
-  if (!built('offline')) await build({ configFile, logLevel: 'warn', mode: 'offline' });
-}
 
 /** Serves the built desk as `npm start` does; returns its address and how to stop. */
 export async function serveDesk(): Promise<{ url: string; close: () => Promise<void> }> {
@@ -28,8 +20,16 @@ export async function serveDesk(): Promise<{ url: string; close: () => Promise<v
   return { url, close: () => server.close() };
 }
 
+/**
+ * Runs once before the browser tests. It does not build: inside vitest NODE_ENV is `test`, which
+ * would give a development build. `npm test` and `npm run test:browser` build beforehand.
+ */
 export default async function setup(project: TestProject): Promise<() => Promise<void>> {
-  await buildMissing();
+  for (const page of ['web', 'offline']) {
+    if (!existsSync(fileURLToPath(new URL(`../../dist/${page}/index.html`, import.meta.url)))) {
+      throw new Error(`dist/${page}: absent: must be built; run npm run build`);
+    }
+  }
   const { url, close } = await serveDesk();
   project.provide('deskUrl', url);
   return close;

@@ -17,7 +17,7 @@ export interface BremsstrahlungTerms {
   readonly depth_g_per_cm2: number;
   readonly shape: number;
   /** What escapes the anode: [1 + m ζ/(κ sinθ)]^(−κ). */
-  readonly escape: number;
+  readonly escapeProbability: number;
   /** Photons per keV, steradian and electron. */
   readonly photons_per_keV_sr_electron: number;
 }
@@ -54,7 +54,7 @@ export function bremsstrahlung(
         yieldFactor: 0,
         depth_g_per_cm2: 0,
         shape: constant,
-        escape: 1,
+        escapeProbability: 1,
         photons_per_keV_sr_electron: 0,
       };
     }
@@ -62,13 +62,13 @@ export function bremsstrahlung(
     const yieldFactor = y0 + u * (y1 + u * (y2 + u * (y3 + u * (y4 + u * y5))));
     const depth = ((range * v) / (d0 + d1 * Math.sqrt(v) + d2 * v)) * Math.exp(l * (e0 + e1 * v));
     const shape = constant - fourthPower * v ** 4;
-    const escape = (1 + (massAttenuation_cm2_per_g * depth) / (shape * sine)) ** -shape;
+    const escapeProbability = (1 + (massAttenuation_cm2_per_g * depth) / (shape * sine)) ** -shape;
     return {
       yieldFactor,
       depth_g_per_cm2: depth,
       shape,
-      escape,
-      photons_per_keV_sr_electron: (yieldScale * yieldFactor * escape * v) / u,
+      escapeProbability,
+      photons_per_keV_sr_electron: (yieldScale * yieldFactor * escapeProbability * v) / u,
     };
   };
 }

@@ -1,15 +1,27 @@
 // The beam from the anode to the patient, in the order a photon meets it.
 
-// What a beam is
-export { airKerma_uGy, airKermaPerPhoton_uGy_mm2, broadBeamAirKerma_uGy } from './air-kerma.js';
-// On the way
+// Channels.
+
+export { type EnergyGrid, energyGrid } from './energy-grid.js';
+export { kEdges_keV } from './k-edges.js';
+export { binCount, type Spectrum, scaleSpectrum, withFluence } from './spectrum.js';
+
+// Sources.
+
+export { rippleVoltages_kV } from './ripple.js';
+export { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
+
+// What stands in the way.
+
 export { airPath } from './air-path.js';
-export { aluminiumEquivalent_mm, aluminiumForHalfValueLayer_mm } from './aluminium-equivalent.js';
 export { attenuate, type MaterialLayer, opticalDepth } from './attenuate.js';
+
+// What a beam is.
+
+export { airKerma_uGy, airKermaPerPhoton_uGy_mm2, broadBeamAirKerma_uGy } from './air-kerma.js';
+export { aluminiumEquivalent_mm, aluminiumForHalfValueLayer_mm } from './aluminium-equivalent.js';
 export { beamQuality } from './beam-quality.js';
 export { effectiveEnergy_keV, energyOfHalfValueLayer_keV } from './effective-energy.js';
-// Channels
-export { type EnergyGrid, energyGrid } from './energy-grid.js';
 export {
   energyFluence_keV_per_mm2,
   energyWeightedMeanEnergy_keV,
@@ -25,9 +37,4 @@ export {
   tenthValueLayer_mm,
 } from './half-value-layer.js';
 export { idealSnrSquaredPerAirKerma_per_mm2_uGy } from './ideal-snr.js';
-export { kEdges_keV } from './k-edges.js';
-// Sources
-export { rippleVoltages_kV } from './ripple.js';
-export { binCount, type Spectrum, scaleSpectrum, withFluence } from './spectrum.js';
-export { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
 export { type ValueLayers, valueLayer_mm, valueLayers } from './value-layer.js';

@@ -1,0 +1,55 @@
+import { isEdge } from './energy-nodes.js';
+import { keep } from './keep.js';
+import type { DetectorScatter, ScatterResponses } from './responses.js';
+
+const made = new WeakMap<ScatterResponses, WeakMap<Float64Array, ScatterResponses>>();
+
+/**
+ * The same responses on the channels of a spectrum: linear in ln E between nodes, never across an
+ * edge; beyond the first and last node their values are held. Kept by identity of both arguments.
+ */
+export function responsesOn(
+  responses: ScatterResponses,
+  energies_keV: Float64Array,
+): ScatterResponses {
+  const byEnergies = keep(made, responses, () => new WeakMap<Float64Array, ScatterResponses>());
+  return keep(byEnergies, energies_keV, () => interpolate(responses, energies_keV));
+}
+
+function interpolate(responses: ScatterResponses, energies_keV: Float64Array): ScatterResponses {
+  const places = Array.from(energies_keV, (energy) => placeOf(responses.energies_keV, energy));
+  const column = (values: Float64Array) =>
+    Float64Array.from(places, ({ low, share }) =>
+      share === 0 ? values[low] : values[low] + share * (values[low + 1] - values[low]),
+    );
+  const scatter = (of: DetectorScatter): DetectorScatter => ({
+    signal: column(of.signal),
+    noise: column(of.noise),
+    counts: column(of.counts),
+    airKerma: column(of.airKerma),
+  });
+  return {
+    energies_keV,
+    withoutGrid: scatter(responses.withoutGrid),
+    behindGrid: responses.behindGrid && scatter(responses.behindGrid),
+    backscatter: responses.backscatter && column(responses.backscatter),
+    layerAbsorbedFraction: responses.layerAbsorbedFraction?.map(column) ?? null,
+    method: responses.method,
+  };
+}
+
+function placeOf(nodes: Float64Array, energy: number): { low: number; share: number } {
+  const last = nodes.length - 1;
+  if (!(energy > nodes[0])) return { low: 0, share: 0 };
+  if (energy >= nodes[last]) return { low: last, share: 0 };
+  let low = 0;
+  let high = last;
+  while (high - low > 1) {
+    const middle = (low + high) >> 1;
+    if (nodes[middle] <= energy) low = middle;
+    else high = middle;
+  }
+  // Inside the hair of a doubled node the lower side holds: no mixing of the two.
+  if (isEdge(nodes, low)) return { low, share: 0 };
+  return { low, share: Math.log(energy / nodes[low]) / Math.log(nodes[low + 1] / nodes[low]) };
+}

@@ -1,0 +1,55 @@
+import { absorptionEdges } from '../../materials/index.js';
+import type { Stack } from '../stack/stack.js';
+import { type EnergyNodes, energyNodes, scatterRange_keV } from './energy-nodes.js';
+import { firstOrder } from './first-order.js';
+import { scatterGeometry } from './geometry.js';
+import type { DetectorScatter, ScatterResponses } from './responses.js';
+import { type ScatterDetector, type ScatterGrid, scoreCount, scoreTable } from './scores.js';
+import { type Slab, slabsOf } from './slabs.js';
+
+/** L edges of lead strips lie at 13–16 keV, where they are opaque on either side: left out. */
+const leastGridEdge_keV = 20;
+
+/** Nodes for a stack: 10–150 keV with every edge of slabs, detector and grid. */
+export function nodesFor(
+  slabs: readonly Slab[],
+  detector: ScatterDetector,
+  grid: ScatterGrid | null,
+): EnergyNodes {
+  const ofSlabs = slabs.flatMap(({ material }) =>
+    absorptionEdges(material, ...scatterRange_keV).map(({ energy_keV }) => energy_keV),
+  );
+  const ofGrid = (grid?.edges_keV ?? []).filter((edge) => edge >= leastGridEdge_keV);
+  return energyNodes([...ofSlabs, ...detector.edges_keV, ...ofGrid]);
+}
+
+/** First-order scatter only: the quick answer shown while the estimate is computed. */
+export function firstOrderResponses(
+  stack: Stack,
+  detector: ScatterDetector,
+  grid: ScatterGrid | null,
+): ScatterResponses {
+  const slabs = slabsOf(stack);
+  const nodes = nodesFor(slabs, detector, grid);
+  const table = scoreTable(detector, grid, nodes);
+  const { compton, rayleigh } = firstOrder(slabs, scatterGeometry(stack), nodes, table);
+  const both = compton.map((values, score) => values.map((value, i) => value + rayleigh[score][i]));
+  return {
+    energies_keV: nodes.energies_keV,
+    withoutGrid: detectorScatter(both, 0),
+    behindGrid: grid && detectorScatter(both, scoreCount),
+    backscatter: null,
+    layerAbsorbedFraction: null,
+    method: 'first-order',
+  };
+}
+
+const detectorScatter = (scores: readonly Float64Array[], from: number): DetectorScatter => ({
+  signal: scores[from],
+  noise: scores[from + 1],
+  counts: scores[from + 2],
+  airKerma: scores[from + 3],
+});
+
+/** The best scatter estimate at hand. */
+export const scatterResponses = firstOrderResponses;

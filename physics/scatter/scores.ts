@@ -1,0 +1,112 @@
+import { massEnergyAbsorption, namedMaterial } from '../../materials/index.js';
+import type { EnergyNodes } from './energy-nodes.js';
+import { keep } from './keep.js';
+
+/** What scatter asks of a detector: per photon of an energy at a cosine to the normal. */
+export interface ScatterDetector {
+  /** Detected photons η. */
+  efficiency(energy_keV: number, cosine: number): number;
+  /** Absorbed energy fraction ε. */
+  energyFraction(energy_keV: number, cosine: number): number;
+  /** Mean square of the absorbed energy fraction ε₂. */
+  energySquareFraction(energy_keV: number, cosine: number): number;
+  /** Absorption edges of the detecting material. */
+  readonly edges_keV: readonly number[];
+}
+
+/** What scatter asks of a grid: its transmission averaged over azimuth, covers included. */
+export interface ScatterGrid {
+  lookup(energy_keV: number, cosine: number): number;
+  readonly edges_keV: readonly number[];
+}
+
+/** The four things scored at the detector, in this order everywhere. */
+export const scoreNames = ['signal', 'noise', 'counts', 'airKerma'] as const;
+export const scoreCount = scoreNames.length;
+export const airKermaScore = scoreNames.indexOf('airKerma');
+
+/**
+ * Scores of one photon without grid: signal E·ε, noise E²·ε₂, counts η, air kerma E·(μen/ρ)air.
+ * Air kerma is of fluence, so it still wants 1/cosβ; the others are per photon through the plane.
+ */
+export function photonScores(
+  detector: ScatterDetector,
+  energy_keV: number,
+  cosine: number,
+): [number, number, number, number] {
+  return [
+    energy_keV * detector.energyFraction(energy_keV, cosine),
+    energy_keV * energy_keV * detector.energySquareFraction(energy_keV, cosine),
+    detector.efficiency(energy_keV, cosine),
+    airKermaPerFluence(energy_keV),
+  ];
+}
+
+/** E·(μen/ρ) of air, keV cm²/g: air kerma per fluence up to a constant. */
+export function airKermaPerFluence(energy_keV: number): number {
+  const air = namedMaterial('air');
+  return air ? energy_keV * (massEnergyAbsorption(air, energy_keV) ?? 0) : 0;
+}
+
+const angleCount = 48;
+const halfPi = Math.PI / 2;
+/** Cosine that stands for grazing incidence, where photons no longer leave the stack. */
+const grazingCosine = 1e-3;
+
+/**
+ * Scores over the fine energies and 48 angles β ∝ j² (dense near the normal, where the grid's
+ * transmission falls): `values[(energy · 48 + angle) · width + score]`. With a grid, scores 4–7
+ * repeat 0–3 times its transmission.
+ */
+export interface ScoreTable {
+  readonly values: Float64Array;
+  readonly width: number;
+}
+
+/** Place of an angle β among the table's angles. */
+export const anglePlace = (beta: number): number => Math.sqrt(beta / halfPi) * (angleCount - 1);
+export const scoreAngles = angleCount;
+
+interface KeptTable {
+  readonly nodes: EnergyNodes;
+  readonly table: ScoreTable;
+}
+
+const made = new WeakMap<ScatterDetector, WeakMap<object, KeptTable>>();
+const noGrid = {};
+
+/** The score table of a detector and a grid; kept for the last nodes asked of each pair. */
+export function scoreTable(
+  detector: ScatterDetector,
+  grid: ScatterGrid | null,
+  nodes: EnergyNodes,
+): ScoreTable {
+  const byGrid = keep(made, detector, () => new WeakMap<object, KeptTable>());
+  const kept = byGrid.get(grid ?? noGrid);
+  if (kept?.nodes === nodes) return kept.table;
+  const table = tabulate(detector, grid, nodes.fine_keV);
+  byGrid.set(grid ?? noGrid, { nodes, table });
+  return table;
+}
+
+function tabulate(
+  detector: ScatterDetector,
+  grid: ScatterGrid | null,
+  energies_keV: Float64Array,
+): ScoreTable {
+  const width = grid ? 2 * scoreCount : scoreCount;
+  const values = new Float64Array(energies_keV.length * angleCount * width);
+  let at = 0;
+  for (const energy of energies_keV) {
+    for (let j = 0; j < angleCount; j++, at += width) {
+      const cosine = Math.max(grazingCosine, Math.cos(halfPi * (j / (angleCount - 1)) ** 2));
+      const scores = photonScores(detector, energy, cosine);
+      const transmission = grid ? grid.lookup(energy, cosine) : 0;
+      for (let score = 0; score < scoreCount; score++) {
+        values[at + score] = scores[score];
+        if (grid) values[at + scoreCount + score] = scores[score] * transmission;
+      }
+    }
+  }
+  return { values, width };
+}

@@ -5,9 +5,9 @@ import {
   photonEnergyWavelength_keV_angstrom,
   scatteringFunctionPerGram,
 } from '../../materials/index.js';
+import { kept } from '../../materials/kept.js';
 import { scatterRange_keV } from './energy-nodes.js';
 import { gaussLegendre } from './gauss-legendre.js';
-import { keep } from './keep.js';
 
 /**
  * Angular shapes of one material on a grid uniform in √q, q = sin(θ/2)/λ: fine where F² falls
@@ -28,7 +28,7 @@ const made = new WeakMap<Material, AngularShapes>();
 
 /** Scattering functions of a material for both angular distributions, made once per material. */
 export function angularShapes(material: Material): AngularShapes {
-  return keep(made, material, () => tabulate(material));
+  return kept(made, material, () => tabulate(material));
 }
 
 function tabulate(material: Material): AngularShapes {

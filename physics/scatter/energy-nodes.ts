@@ -1,4 +1,4 @@
-import { keep } from './keep.js';
+import { kept } from '../../materials/kept.js';
 
 /** Incident energies the scatter responses are defined for; outside, the end value is held. */
 export const scatterRange_keV: readonly [number, number] = [10, 150];
@@ -38,7 +38,7 @@ export function energyNodes(edges_keV: readonly number[]): EnergyNodes {
     .sort((a, b) => a - b)
     .filter((edge, i, all) => i === 0 || edge > all[i - 1] * (1 + 3 * hair));
   const key = edges.join(' ');
-  return keep(made, key, () => makeNodes(edges));
+  return kept(made, key, () => makeNodes(edges));
 }
 
 /** True where nodes i and i + 1 enclose an edge, across which nothing is interpolated. */

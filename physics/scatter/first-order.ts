@@ -1,4 +1,5 @@
 import { electronRestEnergy_keV } from '../../materials/index.js';
+import { kept } from '../../materials/kept.js';
 import {
   type AngularShapes,
   angularNorms,
@@ -11,7 +12,6 @@ import {
 import type { EnergyNodes } from './energy-nodes.js';
 import { sublayerPoints, valuesPerPoint } from './first-order-points.js';
 import type { ScatterGeometry } from './geometry.js';
-import { keep } from './keep.js';
 import { locate, locatorOf } from './locate.js';
 import { airKermaScore, type ScoreTable, scoreAngles, scoreCount } from './scores.js';
 import {
@@ -120,7 +120,7 @@ function addSlab(
     mostSublayers,
     Math.max(1, Math.ceil((mu * slab.thickness_cm) / sublayer_mfp)),
   );
-  const points = keep(part.points, sublayers, () =>
+  const points = kept(part.points, sublayers, () =>
     sublayerPoints(geometry, slab.thickness_cm, part.height_cm, sublayers),
   );
   const norms = angularNorms(slab.material, energy);

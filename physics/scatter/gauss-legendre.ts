@@ -1,4 +1,4 @@
-import { keep } from './keep.js';
+import { kept } from '../../materials/kept.js';
 
 /** Nodes and weights on (0, 1); the weights sum to 1. */
 export interface Quadrature {
@@ -13,7 +13,7 @@ const made = new Map<number, Quadrature>();
  * method from Chebyshev-like starts (Abramowitz & Stegun 25.4.29–30), exact for degree 2n − 1.
  */
 export function gaussLegendre(n: number): Quadrature {
-  return keep(made, n, () => solve(n));
+  return kept(made, n, () => solve(n));
 }
 
 function solve(n: number): Quadrature {

@@ -1,5 +1,5 @@
+import { kept } from '../../materials/kept.js';
 import { isEdge } from './energy-nodes.js';
-import { keep } from './keep.js';
 import type { DetectorScatter, ScatterResponses } from './responses.js';
 
 const made = new WeakMap<ScatterResponses, WeakMap<Float64Array, ScatterResponses>>();
@@ -12,8 +12,8 @@ export function responsesOn(
   responses: ScatterResponses,
   energies_keV: Float64Array,
 ): ScatterResponses {
-  const byEnergies = keep(made, responses, () => new WeakMap<Float64Array, ScatterResponses>());
-  return keep(byEnergies, energies_keV, () => interpolate(responses, energies_keV));
+  const byEnergies = kept(made, responses, () => new WeakMap<Float64Array, ScatterResponses>());
+  return kept(byEnergies, energies_keV, () => interpolate(responses, energies_keV));
 }
 
 function interpolate(responses: ScatterResponses, energies_keV: Float64Array): ScatterResponses {

@@ -1,6 +1,6 @@
 import { massEnergyAbsorption, namedMaterial } from '../../materials/index.js';
+import { kept } from '../../materials/kept.js';
 import type { EnergyNodes } from './energy-nodes.js';
-import { keep } from './keep.js';
 
 /** What scatter asks of a detector: per photon of an energy at a cosine to the normal. */
 export interface ScatterDetector {
@@ -81,9 +81,9 @@ export function scoreTable(
   grid: ScatterGrid | null,
   nodes: EnergyNodes,
 ): ScoreTable {
-  const byGrid = keep(made, detector, () => new WeakMap<object, KeptTable>());
-  const kept = byGrid.get(grid ?? noGrid);
-  if (kept?.nodes === nodes) return kept.table;
+  const byGrid = kept(made, detector, () => new WeakMap<object, KeptTable>());
+  const last = byGrid.get(grid ?? noGrid);
+  if (last?.nodes === nodes) return last.table;
   const table = tabulate(detector, grid, nodes.fine_keV);
   byGrid.set(grid ?? noGrid, { nodes, table });
   return table;

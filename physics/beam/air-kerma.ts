@@ -1,9 +1,9 @@
-import { massEnergyAbsorptionOn } from '../../materials/index.js';
+import { joulePerKeV, massEnergyAbsorptionOn } from '../../materials/index.js';
 import { referenceMaterial } from './reference-materials.js';
 import type { Spectrum } from './spectrum.js';
 
-/** 1 keV/g in gray: e × 10³ J over 10⁻³ kg (SI 2019). */
-const gray_per_keV_per_g = 1.602176634e-13;
+/** 1 keV/g in gray. */
+const gray_per_keV_per_g = joulePerKeV.value / 1e-3;
 const mm2_per_cm2 = 100;
 const microgray_per_gray = 1e6;
 const kermaScale = gray_per_keV_per_g * mm2_per_cm2 * microgray_per_gray;

@@ -1,4 +1,4 @@
-import { massAttenuationOn } from '../../materials/index.js';
+import { elementaryCharge_C, massAttenuationOn } from '../../materials/index.js';
 import { boundedMemo } from './bounded-memo.js';
 import { bremsstrahlung } from './bremsstrahlung.js';
 import { characteristicLine } from './characteristic-lines.js';
@@ -28,8 +28,8 @@ export interface TubeSetting {
   readonly grid?: EnergyGrid;
 }
 
-/** Electrons in one mAs: 10⁻³ C over the elementary charge (SI 2019). */
-const electrons_per_mAs = 1e-3 / 1.602176634e-19;
+/** Electrons in one mAs: 10⁻³ C over the elementary charge. */
+const electrons_per_mAs = 1e-3 / elementaryCharge_C.value;
 /** One steradian at 1 m covers 10⁶ mm². */
 const steradian_per_mm2 = 1e-6;
 const photonScale = electrons_per_mAs * steradian_per_mm2;

@@ -1,0 +1,28 @@
+import { readColumns } from './read-columns.js';
+
+const positive = { min: 1e-6, max: 1e6 };
+
+const columns = {
+  thickness_mm: {
+    kind: 'number',
+    names: ['thickness', 'patient thickness'],
+    unit: 'mm',
+    ...positive,
+  },
+  potential_kV: {
+    kind: 'number',
+    names: ['potential', 'tube potential', 'tube voltage', 'kv', 'kvp'],
+    unit: 'kV',
+    min: 20,
+    max: 150,
+  },
+  tubeCurrent_mA: { kind: 'number', names: ['tube current', 'current'], unit: 'mA', ...positive },
+  exposureTime_ms: { kind: 'number', names: ['exposure time', 'time'], unit: 'ms', ...positive },
+  filter: { kind: 'text', names: ['added filter'] },
+} as const;
+
+/** What a room's exposure control does by patient thickness, as rows of `control.curve`. */
+export const parseControlCurveCsv = (
+  text: string,
+  mapping?: Partial<Record<keyof typeof columns, string>>,
+) => readColumns(text, columns, mapping);

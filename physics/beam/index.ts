@@ -8,7 +8,18 @@ export { binCount, type Spectrum, scaleSpectrum, withFluence } from './spectrum.
 
 // Sources.
 
+export { lineSpectrum, monoenergetic } from './line-spectrum.js';
+export {
+  rescaleToAirKerma,
+  type SourceBeam,
+  type SpectrumRows,
+  spectrumFromCsv,
+  spectrumFromRows,
+} from './measured-spectrum.js';
+export { type ReferenceBeamName, referenceBeam } from './reference-beam.js';
+export { referenceQualities, referenceQualitySource } from './reference-beam-table.js';
 export { rippleVoltages_kV } from './ripple.js';
+export { sourceBeam } from './source-beam.js';
 export { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
 
 // What stands in the way.

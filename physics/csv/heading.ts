@@ -35,15 +35,19 @@ export function matchHeading(
     }
   }
   if (!isName(plainName(heading))) return null;
+  // A unit in brackets that measures something else is not to be passed over.
+  if (unit !== null && bracketed.test(heading)) return null;
   if (unit === null || unit === 'number') return { factor: 1, unitNamed: true };
   // A heading may be nothing but its unit: `kVp`.
   const own = unitFactor(heading, unit);
   return { factor: own ?? 1, unitNamed: own !== null };
 }
 
+const bracketed = /^(.*?)\s*[([](.*)[)\]]\s*$/;
+
 function nameAndUnit(heading: string): [name: string, unit: string][] {
-  const bracketed = /^(.*?)\s*[([](.*)[)\]]\s*$/.exec(heading);
-  if (bracketed) return [[bracketed[1], bracketed[2]]];
+  const parts = bracketed.exec(heading);
+  if (parts) return [[parts[1], parts[2]]];
   return [...heading.matchAll(/[\s_]+/g)].map(({ index, 0: gap }) => [
     heading.slice(0, index),
     heading.slice(index + gap.length),

@@ -161,7 +161,8 @@ function readRecord(
     } else {
       const value = parseDecimal(cell, separator);
       if (value === null) return `${key}: ${cell}: is not a number`;
-      const converted = value * place.factor;
+      // Fifteen digits: 0.295 cm is 2.95 mm, not 2.9499999999999997 mm.
+      const converted = Number((value * place.factor).toPrecision(15));
       const { min = Number.NEGATIVE_INFINITY, max = Number.POSITIVE_INFINITY } = column;
       if (!(converted >= min && converted <= max)) {
         return `${key}: ${cell}: must be ${min} to ${max} ${column.unit}`;

@@ -71,7 +71,7 @@ export const airKermaPerRoentgen_mGy = derived(
   'mGy/R',
   'roentgen × mean energy per ion pair / elementary charge',
 );
-/** 4π² r_e² in words of use: Thomson cross section of one electron, cm². */
+/** Thomson cross section of one electron, cm². */
 export const thomsonCrossSection_cm2 = derived(
   'Thomson cross section',
   (8 * Math.PI * classicalElectronRadius_cm.value ** 2) / 3,

@@ -68,14 +68,15 @@ function curvesOf(z: number): ElementCurves {
 
 function buildCurves(z: number): ElementCurves {
   const table = elementTableOf(z);
-  const logE = table.energies_keV.map(Math.log);
-  // Splines run through an edge, where their values do not change: each energy counts once.
-  const once = (values: Float64Array) => values.filter((_, i) => logE[i] !== logE[i - 1]);
-  const pairEnergies = table.energies_keV.slice(-table.pair.length);
+  const logE = table.scatteringEnergies_keV.map(Math.log);
+  const pairEnergies = table.scatteringEnergies_keV.slice(-table.pair.length);
   return {
-    coherent: naturalSpline(once(logE), once(table.coherent.map(Math.log))),
-    incoherent: naturalSpline(once(logE), once(table.incoherent.map(Math.log))),
-    photoelectric: monotoneCubic(logE, table.photoelectric.map(Math.log)),
+    coherent: naturalSpline(logE, table.coherent.map(Math.log)),
+    incoherent: naturalSpline(logE, table.incoherent.map(Math.log)),
+    photoelectric: monotoneCubic(
+      table.energies_keV.map(Math.log),
+      table.photoelectric.map(Math.log),
+    ),
     reducedPair: naturalSpline(
       pairEnergies.map(Math.log),
       table.pair.map((pair, i) => Math.log(pair / thresholdFactor(pairEnergies[i]))),

@@ -19,11 +19,14 @@ export interface VacancyData {
 
 /** Everything the packed table holds of one element: published values, energies in keV, cm²/g. */
 export interface ElementTable {
+  /** Nodes of the photoelectric coefficient, each edge twice. */
   readonly energies_keV: Float64Array;
+  readonly photoelectric: Float64Array;
+  /** Nodes of coherent and incoherent scattering, which have no edges. */
+  readonly scatteringEnergies_keV: Float64Array;
   readonly coherent: Float64Array;
   readonly incoherent: Float64Array;
-  readonly photoelectric: Float64Array;
-  /** For the last nodes only: those above the pair threshold. */
+  /** For the last scattering nodes only: those above the pair threshold. */
   readonly pair: Float64Array;
   readonly edges: readonly EdgeData[];
   readonly bindingEnergies_keV: Float64Array;
@@ -67,11 +70,14 @@ function decodeElement(recordStart: number): ElementTable {
   const read = reader(recordStart);
   const nodes = momentumTransferNodes().length;
   const energies_keV = read.list();
+  const photoelectric = read.values(energies_keV.length);
+  const scatteringEnergies_keV = read.list();
   return {
     energies_keV,
-    coherent: read.values(energies_keV.length),
-    incoherent: read.values(energies_keV.length),
-    photoelectric: read.values(energies_keV.length),
+    photoelectric,
+    scatteringEnergies_keV,
+    coherent: read.values(scatteringEnergies_keV.length),
+    incoherent: read.values(scatteringEnergies_keV.length),
     pair: read.list(),
     edges: groups(read.list(), 4).map(([shell, energy_keV, below, above]) => ({
       shell,

@@ -29,7 +29,7 @@ export function elementEnergyAbsorption(z: number, energy_keV: number): number {
 /**
  * f_S(E,Z): mean share of the photon's energy that bound Compton scattering hands to the electron,
  * ∫KN·S(q,Z)(1 − E′/E)dΩ / ∫KN·S(q,Z)dΩ, from a spline over ln E through computed nodes
- * (interpolation error below 1e-4).
+ * (quadrature and interpolation together within 3e-4).
  */
 export function comptonEnergyFraction(z: number, energy_keV: number): number {
   const curve = kept(fractionCurves, z, () => buildFractionCurve(z));

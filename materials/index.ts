@@ -34,6 +34,7 @@ export {
   monotoneCubic,
   naturalSpline,
 } from './interpolation.js';
+export { kept } from './kept.js';
 export { comptonEnergyRatio, kleinNishinaShape } from './klein-nishina.js';
 export * from './material.js';
 export {

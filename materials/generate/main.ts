@@ -7,13 +7,12 @@ import { readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { gzipSync } from 'node:zlib';
 import { eadlFiles, readEadl } from './eadl.js';
-import { ledger } from './ledger.js';
-import { packTable } from './pack.js';
+import { ledger, scatteringInput, xcomFile } from './ledger.js';
+import { packTable, range_keV } from './pack.js';
 import { readScatteringFunctions, sampleScatteringFunctions } from './scattering-functions.js';
 import { readXcom } from './xcom.js';
 
 const folder = process.env.FISX_DATA ?? '/usr/share/fisx';
-const xcomFile = 'XCOM_CrossSections.dat';
 
 const scatteringText = sampleScatteringFunctions();
 const packed = packTable(
@@ -27,7 +26,7 @@ const inputs = [
     name,
     sha256: sha256(readFileSync(join(folder, name))),
   })),
-  { name: 'scattering functions as sampled', sha256: sha256(scatteringText) },
+  { name: scatteringInput, sha256: sha256(scatteringText) },
 ];
 const output = {
   sha256: sha256(packed),
@@ -41,7 +40,7 @@ writeTable('elements.ts', [
   '/** Elements 1 to 92 as packed decimals; element-tables.ts reads it. */',
   `export const elementTable = '${packed}';`,
 ]);
-writeTable('LEDGER.md', ledger(inputs, output));
+writeTable('LEDGER.md', ledger(inputs, output, range_keV));
 
 function sha256(data: string | Uint8Array): string {
   return createHash('sha256').update(data).digest('hex');

@@ -18,9 +18,10 @@ export function packTable(
   relaxation: (z: number) => ElementRelaxation,
   scattering: readonly ScatteringFunctions[],
 ): string {
+  const common = commonEnergies(crossSections);
   const records: number[][] = [];
   for (let z = 1; z <= 92; z++) {
-    records.push(elementRecord(crossSections[z], relaxation(z), scattering[z]));
+    records.push(elementRecord(crossSections[z], common, relaxation(z), scattering[z]));
   }
   return packDecimals([
     ...listed(momentumTransfers_per_angstrom),
@@ -29,13 +30,32 @@ export function packTable(
   ]);
 }
 
+/**
+ * Energies that most elements have. Rows put in around an edge repeat what was interpolated there for
+ * coherent and incoherent scattering, which have no edge; some are off by several per cent (Fr at
+ * 2.9999 keV, Pa at 5.1807 keV), so both processes keep the common rows only.
+ */
+function commonEnergies(crossSections: readonly ElementCrossSections[]): ReadonlySet<number> {
+  const elements = new Map<number, number>();
+  for (const { rows } of crossSections) {
+    for (const energy of new Set(rows.map((row) => row.energy_keV))) {
+      elements.set(energy, (elements.get(energy) ?? 0) + 1);
+    }
+  }
+  return new Set([...elements].filter(([, n]) => 2 * n > crossSections.length).map(([e]) => e));
+}
+
 function elementRecord(
   { rows, edges }: ElementCrossSections,
+  common: ReadonlySet<number>,
   relaxation: ElementRelaxation,
   { formFactor, incoherent }: ScatteringFunctions,
 ): number[] {
   const kept = rows.filter(
     (row) => row.energy_keV >= range_keV.from && row.energy_keV <= range_keV.to,
+  );
+  const smooth = kept.filter(
+    (row, i) => common.has(row.energy_keV) && row.energy_keV !== kept[i - 1]?.energy_keV,
   );
   const shells = matchShells(
     edges.map((edge) => edge.energy_keV),
@@ -43,9 +63,10 @@ function elementRecord(
   );
   return [
     ...listed(kept.map((row) => row.energy_keV)),
-    ...kept.map((row) => row.coherent),
-    ...kept.map((row) => row.incoherent),
     ...kept.map((row) => row.photoelectric),
+    ...listed(smooth.map((row) => row.energy_keV)),
+    ...smooth.map((row) => row.coherent),
+    ...smooth.map((row) => row.incoherent),
     ...listed(kept.map((row) => row.pair).filter((pair) => pair > 0)),
     ...listed(edges.flatMap((edge, i) => [shells[i], edge.energy_keV, edge.below, edge.above])),
     ...listed(

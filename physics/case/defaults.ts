@@ -1,8 +1,12 @@
 /**
  * Every value Stratabeam assumes when a case file is silent, in one visible place. A path that took
- * its value from here is listed in `assumed` with every result and in the dossier.
+ * its value from here is listed in `assumed` with every result and in the dossier. `null`, an empty
+ * list or an empty text stands for "none given".
  */
 export const defaults = {
+  title: '',
+  question: '',
+  materials: [],
   room: {
     name: 'Room',
     tube: {
@@ -16,8 +20,21 @@ export const defaults = {
       current_mA: { min: 10, max: 1000 },
       exposureTime_ms: { min: 1, max: 200 },
       focalSpot_mm: 0.6,
+      rating: [],
+      heatPerRun_kJ: null,
+    },
+    source: null,
+    readings: [],
+    reading: {
+      filter: 'none',
+      halfValueLayer_mmAl: null,
+      airKerma_uGy_per_mAs: null,
+      distance_mm: 1000,
+      relativeUncertainty_percent: 3,
     },
     filters: [{ name: 'none', layers: [] }],
+    support: [],
+    supportSlab: { side: 'entrance' },
     geometry: {
       beam: 'point',
       sourceToDetector_mm: 1100,
@@ -28,10 +45,13 @@ export const defaults = {
       referencePoint_mm: 600,
       air: true,
     },
-    grid: {
+    /** A room without a grid unless one is described. */
+    grid: null,
+    gridParts: {
       strip: { material: 'lead', thickness_um: 36 },
       interspace: { material: 'aluminium' },
       cover: [],
+      measured: null,
     },
     detector: {
       material: 'caesium iodide',
@@ -46,18 +66,54 @@ export const defaults = {
       pixel_mm: 0.2,
       airKerma_uGy: { min: 0.01, max: 50 },
     },
+    rules: [],
+    kermaRate: { appliesTo: ['fluoroscopy'] },
+  },
+  patient: {
+    layer: { growthShare: null, agent: null },
+    lateral_mm: null,
+    sizes: [],
+    size: { weight: 1 },
   },
   task: {
+    detail: {
+      /** The middle of the layer. */
+      depthInLayer_mm: null,
+      length_mm: 10,
+      width_mm: null,
+      walls: 1,
+      reference: 'layer',
+      fillingFraction: 1,
+      material: null,
+      agent: null,
+    },
+    /** The agent's own carrier. */
+    agent: { carrier: null },
     roseThreshold: 5,
     backgroundNoise_fraction: 0,
     subtractionResidual_fraction: 0.1,
     motion_mm_per_s: 0,
-    detail: { depthInLayer_fraction: 0.5, length_mm: 10, walls: 1, fillingFraction: 1, reference: 'layer' },
   },
   technique: {
     filter: 'none',
+    /** In a room without a grid the default is `out`. */
     grid: 'in',
-    acquisition: { mode: 'radiography', frames: 1, frameRate_per_s: 1, maskFrames: 0, fixed: 'shortest' },
+    acquisition: {
+      mode: 'radiography',
+      frames: 1,
+      frameRate_per_s: 1,
+      maskFrames: 0,
+      fixed: 'shortest',
+    },
   },
   compare: { leading: 'sdnr', primaryDose: 'incidentAirKerma', sdnrMargin_percent: 5 },
+  agentsCompared: [],
+  agentCompared: { toxicityFactor: null, deliverable_mg_per_mL: null, source: '' },
+  priors: [],
+  prior: { sharing: 'shared', source: '' },
+  measuredChecks: [],
+  measuredCheck: { size: null, unit: '', date: '', method: '' },
+  monitoring: null,
+  monitoringPlan: { stopRule: '' },
+  dossier: { text: {} },
 } as const;

@@ -69,7 +69,7 @@ function relaxation(constants: readonly number[], rates: SpecSection, z: number)
 // Labels read KL3 or L1M2: the vacancy first, the shell that fills it last.
 function outerShell(label: string): number {
   const name = label.match(/[A-Z]\d+$/)?.[0];
-  return shellNames.findIndex((shell) => shell === name);
+  return shellNames.indexOf(name ?? '');
 }
 
 // Labels read K-L1M2: the two shells that are left vacant.

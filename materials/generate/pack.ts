@@ -31,8 +31,8 @@ export function packTable(
 }
 
 /**
- * Energies that most elements have. Rows put in around an edge repeat what was interpolated there for
- * coherent and incoherent scattering, which have no edge; some are off by several per cent (Fr at
+ * Energies that most elements have. Coherent and incoherent scattering have no edges, and their values
+ * in the rows around one are interpolated; a few would bend a spline by several per cent (Fr at
  * 2.9999 keV, Pa at 5.1807 keV), so both processes keep the common rows only.
  */
 function commonEnergies(crossSections: readonly ElementCrossSections[]): ReadonlySet<number> {

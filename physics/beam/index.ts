@@ -8,19 +8,25 @@ export { binCount, type Spectrum, scaleSpectrum, withFluence } from './spectrum.
 
 // Sources.
 
-export { lineSpectrum, monoenergetic } from './line-spectrum.js';
+export { lineSpectrum, monoenergetic } from './line-sources.js';
+export { type ReferenceBeamName, referenceBeam } from './reference-beam.js';
+export { referenceQualities, referenceQualitySource } from './reference-beam-table.js';
+export { rippleVoltages_kV } from './ripple.js';
+export { sourceBeam } from './source-beam.js';
+export { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
 export {
   rescaleToAirKerma,
   type SourceBeam,
   type SpectrumRows,
   spectrumFromCsv,
   spectrumFromRows,
-} from './measured-spectrum.js';
-export { type ReferenceBeamName, referenceBeam } from './reference-beam.js';
-export { referenceQualities, referenceQualitySource } from './reference-beam-table.js';
-export { rippleVoltages_kV } from './ripple.js';
-export { sourceBeam } from './source-beam.js';
-export { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
+  userSpectrum,
+} from './user-spectrum.js';
+
+// The room's own tube.
+
+export { type CalibrationOptions, calibrate, readingFaults } from './calibrate.js';
+export { beamFaults } from './filtration-faults.js';
 
 // What stands in the way.
 

@@ -1,6 +1,6 @@
 import type { Source } from '../case/schema.js';
-import { lineSpectrum, monoenergetic } from './line-spectrum.js';
-import { type SourceBeam, spectrumFromRows } from './measured-spectrum.js';
+import { lineSpectrum, monoenergetic } from './line-sources.js';
+import { type SourceBeam, spectrumFromRows } from './user-spectrum.js';
 
 /** Air kerma is known up to here (μen/ρ without bremsstrahlung losses). */
 const highestKermaEnergy_keV = 3000;

@@ -35,12 +35,11 @@ export function spectrumFromRows(request: SpectrumRows): SourceBeam {
     .filter(([energy, fluence]) => Number.isFinite(energy) && Number.isFinite(fluence))
     .toSorted(([a], [b]) => a - b)
     .filter(([energy], i, all) => i === 0 || energy > all[i - 1][0]);
+  const dropped = droppedFinding(path, request.rows.length - rows.length);
   if (rows.length < 2) {
     const message = `${path}: a spectrum needs at least two energies; ${rows.length} can be read.`;
-    return {
-      spectrum: null,
-      findings: [{ code: 'spectrumUnreadable', severity: 'limit', message, path }],
-    };
+    const finding: Finding = { code: 'spectrumUnreadable', severity: 'limit', message, path };
+    return { spectrum: null, findings: [finding, ...dropped] };
   }
   const { histogram, clipped } = histogramOf(rows, request.fluenceIs);
   const grid = energyGrid(request.potential_kV, request.extraEdges_keV);
@@ -55,6 +54,7 @@ export function spectrumFromRows(request: SpectrumRows): SourceBeam {
       fluence_per_mm2: fluence,
     },
     findings: [
+      ...dropped,
       ...lossFinding('spectrumClipped', path, clipped, all, 'were negative and were set to zero'),
       ...lossFinding(
         'spectrumAbovePotential',
@@ -66,6 +66,23 @@ export function spectrumFromRows(request: SpectrumRows): SourceBeam {
       ...lossFinding('spectrumBelowGrid', path, below, all, 'lie below 5 keV and were dropped'),
     ],
   };
+}
+
+/** The spectrum alone; without photons when the rows cannot be read. */
+export function userSpectrum(
+  rows: SpectrumRows['rows'],
+  potential_kV: number,
+  extraEdges_keV: readonly number[] = [],
+): Spectrum {
+  const { spectrum } = spectrumFromRows({
+    rows,
+    fluenceIs: 'per keV',
+    potential_kV,
+    extraEdges_keV,
+  });
+  if (spectrum) return spectrum;
+  const { edges_keV, energies_keV } = energyGrid(potential_kV, extraEdges_keV);
+  return { edges_keV, energies_keV, fluence_per_mm2: new Float64Array(energies_keV.length) };
 }
 
 /** The same from a table; bad rows are returned beside it. */
@@ -102,6 +119,14 @@ function histogramOf(
     return Math.max(0, photons);
   });
   return { histogram: { edges, counts }, clipped };
+}
+
+function droppedFinding(path: string, count: number): Finding[] {
+  if (count === 0) return [];
+  const message = `${path}: ${count} rows repeat an energy or hold no number and were left out.`;
+  return [
+    { code: 'spectrumRowsLeftOut', severity: 'caution', message, path, value: count, bound: 0 },
+  ];
 }
 
 function lossFinding(

@@ -1,0 +1,36 @@
+import { type Material, massAttenuationOn } from '../../materials/index.js';
+import type { DetailPath } from '../stack/detail-paths.js';
+import type { PlacedDetail } from '../stack/place-detail.js';
+
+/** What one path through the detail does to the plain stack's primary beam, channel by channel. */
+export interface PathColumns {
+  /** exp(−(μ_reference − μ_layer)·displaced): the comparison image over the plain stack. */
+  readonly reference: Float64Array;
+  /** Reference minus detail, over the plain stack; from expm1, so thin details lose no digits. */
+  readonly difference: Float64Array;
+}
+
+const perMm = (material: Material, energies_keV: Float64Array): Float64Array => {
+  const scale = material.density_g_per_cm3 / 10;
+  return massAttenuationOn(material, energies_keV).map((coefficient) => coefficient * scale);
+};
+
+/** The central path and every path of a detail on an energy grid. */
+export const detailColumns = (
+  detail: PlacedDetail,
+  energies_keV: Float64Array,
+): { readonly central: PathColumns; readonly paths: readonly PathColumns[] } => {
+  const layer = perMm(detail.layer, energies_keV);
+  const reference = perMm(detail.reference, energies_keV);
+  const matter = perMm(detail.matter, energies_keV);
+  const along = ({ displaced_mm, detail_mm }: Omit<DetailPath, 'area_mm2'>): PathColumns => {
+    const referenceColumn = reference.map((mu, i) => Math.exp((layer[i] - mu) * displaced_mm));
+    return {
+      reference: referenceColumn,
+      difference: referenceColumn.map(
+        (share, i) => -share * Math.expm1((reference[i] - matter[i]) * detail_mm),
+      ),
+    };
+  };
+  return { central: along(detail.central), paths: detail.paths.map(along) };
+};

@@ -1,0 +1,145 @@
+import { css } from 'lit';
+
+/** Setting of the beam path: three columns, rows placed by script at the height where they act. */
+export const beamPathSheet = css`
+  :host {
+    display: block;
+    position: relative;
+  }
+  .columns {
+    display: grid;
+    grid-template-columns: minmax(11rem, 1fr) minmax(24rem, 29rem) minmax(14rem, 1fr);
+    column-gap: 0.75rem;
+    position: relative;
+    height: var(--path-height, 45rem);
+  }
+  .side {
+    position: relative;
+  }
+  .side.left {
+    text-align: end;
+    color: var(--graphite);
+    --field-ink: var(--graphite);
+  }
+  .side.right {
+    color: var(--madder);
+    --field-ink: var(--madder);
+  }
+  .row {
+    position: absolute;
+    inset-inline: 0;
+    padding-block: 0.2rem;
+    line-height: 1.25;
+  }
+  .row:not(.placed) {
+    visibility: hidden;
+  }
+  .name {
+    display: block;
+    color: var(--soft);
+    font-size: var(--small);
+    line-height: 1.35;
+  }
+  .pair {
+    display: inline-flex;
+    align-items: baseline;
+    gap: 0.35em;
+    flex-wrap: wrap;
+  }
+  .side.left .pair {
+    justify-content: flex-end;
+  }
+  .dot {
+    color: var(--soft);
+  }
+  .also,
+  .sentence {
+    display: block;
+    font-size: var(--small);
+    line-height: 1.55;
+    color: var(--soft);
+  }
+  .sentence choice-field,
+  .sentence number-field {
+    color: var(--field-ink);
+  }
+  .technique {
+    margin: 0;
+    font-size: var(--heading);
+    font-weight: 700;
+    --field-size: var(--heading);
+  }
+  .switch {
+    font-size: var(--small);
+    color: var(--soft);
+  }
+  .leaders {
+    position: absolute;
+    inset: 0;
+    width: 100%;
+    height: 100%;
+    pointer-events: none;
+  }
+  .leaders path {
+    fill: none;
+    stroke: var(--entry-rule);
+    stroke-width: 1;
+    opacity: 0.7;
+  }
+  .spine {
+    position: relative;
+  }
+  stack-view {
+    position: absolute;
+    inset: 0;
+  }
+  .label {
+    position: absolute;
+    font-size: var(--small);
+    line-height: 1.25;
+    white-space: nowrap;
+  }
+  .label.soft {
+    color: var(--soft);
+  }
+  .caption {
+    margin: 0;
+    padding: 0.4rem 0 0.9rem;
+    text-align: center;
+    color: var(--soft);
+    font-size: var(--small);
+  }
+  .unplaced {
+    margin: 2rem 1rem;
+    color: var(--limit);
+  }
+  @media (max-width: 719px) {
+    .columns {
+      grid-template-columns: minmax(0, 1fr) minmax(0, 1fr);
+      height: auto;
+      column-gap: 1.25rem;
+    }
+    .spine {
+      grid-column: 1 / -1;
+      grid-row: 1;
+      height: 34rem;
+    }
+    .row {
+      position: static;
+      border-block-start: 1px solid var(--rule);
+      padding-block: 0.45rem;
+    }
+    .row:not(.placed) {
+      visibility: visible;
+    }
+    .side.left {
+      text-align: start;
+    }
+    .side.left .pair {
+      justify-content: flex-start;
+    }
+    .leaders {
+      display: none;
+    }
+  }
+`;

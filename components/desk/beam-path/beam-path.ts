@@ -1,0 +1,117 @@
+import { LitElement, html, nothing } from 'lit';
+import { customElement, property, state } from 'lit/decorators.js';
+import { placeAlong } from '../../charts/place-along.js';
+import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
+import type { PlacedDetail } from '../../../physics/stack/place-detail.js';
+import type { Stack } from '../../../physics/stack/stack.js';
+import { placed, sizeShown, type DeskModel } from '../model/desk-model.js';
+import { beamPathSheet } from './beam-path-sheet.js';
+import { leaderPath } from './leader-path.js';
+import { spineLabels } from './spine-labels.js';
+import { stations } from './stations.js';
+import '../figure-value/figure-value.js';
+import '../fields/choice-field.js';
+import '../fields/number-field.js';
+import '../fields/text-field.js';
+import '../stack-view/stack-view.js';
+
+/**
+ * The beam from focal spot to detector, with what is set and read on the left (Current) and right
+ * (Proposed) at the height where it acts, and the shared things on the spine.
+ *
+ * Properties: `model`. Events: `case-edit`, `explain`, `show-technique` from what it holds.
+ * Keyboard: every field in reading order, left side, spine, right side.
+ * Parts: none; narrower than 720 px the rows stack beside one another under the spine.
+ */
+@customElement('beam-path')
+export class BeamPath extends LitElement {
+  @property({ attribute: false }) model!: DeskModel;
+  @state() private spine = { width: 440, height: 700 };
+
+  static override styles = beamPathSheet;
+
+  private readonly watcher = new ResizeObserver(() => this.arrange());
+
+  override connectedCallback() {
+    super.connectedCallback();
+    this.watcher.observe(this);
+  }
+
+  override disconnectedCallback() {
+    super.disconnectedCallback();
+    this.watcher.disconnect();
+  }
+
+  protected override updated() {
+    for (const row of this.renderRoot.querySelectorAll('.row')) this.watcher.observe(row);
+    this.arrange();
+  }
+
+  private layout(stack: Stack | null, detail: PlacedDetail | null): SpineLayout {
+    const layers_mm = stack
+      ? stack.layers.map((layer) => layer.thickness_mm)
+      : this.model.draft.case.patient.layers.map((layer) => layer.thickness_mm);
+    return spineLayout({ ...this.spine, layers_mm, detailDepth_mm: detail?.centreDepth_mm ?? null });
+  }
+
+  /** Puts the rows of both sides at the same heights, near where they act, and draws the leaders. */
+  private arrange() {
+    const root = this.renderRoot;
+    const spine = root.querySelector<HTMLElement>('.spine');
+    if (!spine) return;
+    const { offsetWidth: width, offsetHeight: height } = spine;
+    if (width !== this.spine.width || height !== this.spine.height) this.spine = { width, height };
+    const { stack, detail } = placed(this.model);
+    const layout = this.layout(stack, detail);
+    const rowsOf = (id: string) => [...root.querySelectorAll<HTMLElement>(`.row[data-station="${id}"]`)];
+    const used = stations.filter(({ id }) => rowsOf(id).some((row) => row.offsetHeight > 8));
+    const heights = used.map(({ id }) => Math.max(...rowsOf(id).map((row) => row.offsetHeight)));
+    const tops = placeAlong(
+      used.map((station, i) => ({ anchor: station.anchor(layout), height: heights[i] })),
+      0,
+      layout.height,
+    );
+    const paths: string[] = [];
+    used.forEach((station, i) => {
+      for (const row of rowsOf(station.id)) {
+        row.style.top = `${tops[i]}px`;
+        row.classList.add('placed');
+        if (station.leader) paths.push(leaderPath(row, spine, layout, station.anchor(layout)));
+      }
+    });
+    root.querySelector('.leaders path')?.setAttribute('d', paths.join(''));
+    const needed = heights.reduce((sum, rowHeight) => sum + rowHeight, 0);
+    this.style.setProperty('--path-least', `${needed}px`);
+  }
+
+  private side(technique: number | null, side: 'left' | 'right') {
+    if (technique === null) return html`<div class="side ${side}"></div>`;
+    const name = this.model.draft.case.techniques[technique].name;
+    return html`<section class="side ${side}" aria-label=${name}>
+      ${stations.map(({ id, content }) => html`<div class="row" data-station=${id}>${content(this.model, technique)}</div>`)}
+    </section>`;
+  }
+
+  override render() {
+    const { model } = this;
+    const { stack, detail } = placed(model);
+    const layout = this.layout(stack, detail);
+    return html`<div class="columns">
+        <svg class="leaders" aria-hidden="true"><path /></svg>
+        ${this.side(model.left, 'left')}
+        <section class="spine" aria-label="Beam path">
+          <stack-view .model=${model} .layout=${layout}></stack-view>
+          ${stack ? nothing : html`<p class="unplaced">The patient has no place in this room at size ${sizeShown(model).name}: see the findings.</p>`}
+          ${spineLabels(model, layout, stack)}
+        </section>
+        ${this.side(model.right, 'right')}
+      </div>
+      <p class="caption">depths to scale, air shortened · ink: primary photons per mm² and frame, logarithmic · ratios as set, size ${sizeShown(model).name}</p>`;
+  }
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'beam-path': BeamPath;
+  }
+}

@@ -1,0 +1,49 @@
+import { html, nothing, type TemplateResult } from 'lit';
+import { formatNumber } from '../../charts/format.js';
+import { placeAlong } from '../../charts/place-along.js';
+import type { SpineLayout } from '../../charts/spine-layout.js';
+import type { Stack } from '../../../physics/stack/stack.js';
+import type { DeskModel } from '../model/desk-model.js';
+import '../layer-label/layer-label.js';
+import '../detail-label/detail-label.js';
+
+const labelHeight = 21;
+
+const at = (x: number, y: number): string => `left:${x.toFixed(0)}px; top:${y.toFixed(0)}px`;
+
+/** Tube, air, support, grid and detector, named where they stand. */
+function fixtures(model: DeskModel, layout: SpineLayout, stack: Stack | null): TemplateResult {
+  const { room } = model.draft.case;
+  const { tube, support, grid, detector, geometry } = room;
+  const target = room.source ? `${room.source.kind} source` : `tungsten, ${formatNumber(tube.anodeAngle_deg)}°`;
+  const slabs = support.map((slab) => `${slab.material} ${formatNumber(slab.thickness_mm)} mm`).join(', ');
+  const behind = stack ? `, ${formatNumber(stack.exitToDetector_mm)} mm behind the patient` : '';
+  const gridWords = grid ? `grid ${formatNumber(grid.ratio)}:1, ${formatNumber(grid.strips_per_cm)} per cm` : 'no grid';
+  return html`
+    <span class="label soft" style=${at(layout.axis + 12, layout.tube - 8)}>${target}</span>
+    ${stack
+      ? html`<span class="label soft" style=${at(layout.axis + 70, layout.airBreak - 9)}>${formatNumber(stack.sourceToSkin_mm)} mm to the skin</span>`
+      : nothing}
+    ${slabs ? html`<span class="label soft" style=${at(layout.left, layout.support.top - 19)}>${slabs}</span>` : nothing}
+    <span class="label soft wash" style=${at(layout.left, layout.grid - 19)}>${gridWords}</span>
+    <span class="label soft" style=${at(layout.left, layout.detector.bottom + 4)}
+      >${detector.material}, ${formatNumber(geometry.sourceToDetector_mm)} mm from the focal spot${behind}</span>`;
+}
+
+/** Words on the spine: fixtures, every layer with its material and thickness, and the detail. */
+export function spineLabels(model: DeskModel, layout: SpineLayout, stack: Stack | null): TemplateResult {
+  const { layers } = model.draft.case.patient;
+  const tops = placeAlong(
+    layout.layers.map((band) => ({ anchor: Math.min((band.top + band.bottom) / 2, band.top + labelHeight), height: labelHeight })),
+    layout.patient.top,
+    layout.patient.bottom,
+  );
+  return html`${fixtures(model, layout, stack)}
+    ${layers.map(
+      (layer, i) => html`<layer-label class="label" style=${at(layout.left + 5, tops[i])} .model=${model} .index=${i}
+        .thickness_mm=${stack?.layers[i]?.thickness_mm ?? layer.thickness_mm}></layer-label>`,
+    )}
+    ${layout.detail === null
+      ? nothing
+      : html`<detail-label class="label" style=${at(layout.axis + 26, layout.detail - labelHeight)} .model=${model}></detail-label>`}`;
+}

@@ -1,0 +1,63 @@
+import { LitElement, css, html, nothing } from 'lit';
+import { customElement, property } from 'lit/decorators.js';
+import type { ComparisonRow, HoldConstant } from '../../../physics/results.js';
+import { formatRatio } from '../../charts/format.js';
+import { ratioNames } from '../../charts/quantities.js';
+import { comparisonOf, type DeskModel } from '../model/desk-model.js';
+import { chartSheet } from '../sheets/chart-sheet.js';
+
+const columns: readonly (readonly [HoldConstant, string])[] = [
+  ['asSet', 'as set'],
+  ['sdnr', 'equal SdNR'],
+  ['detectorAirKerma', 'equal detector air kerma'],
+  ['incidentAirKerma', 'equal incident air kerma'],
+];
+
+/**
+ * Proposed over Current under every equality, one column each.
+ *
+ * Shows: a ratio or a dash where it cannot be reached; quantities no column has are left out.
+ * Properties: `model`. Events: none. Keyboard: none. Parts: none.
+ */
+@customElement('comparison-table')
+export class ComparisonTable extends LitElement {
+  @property({ attribute: false }) model!: DeskModel;
+
+  static override styles = [
+    chartSheet,
+    css`
+      table {
+        margin-block-start: 0.5rem;
+      }
+      tbody th {
+        color: var(--soft);
+      }
+      th:not(:first-child) {
+        max-width: 5.2rem;
+      }
+    `,
+  ];
+
+  override render() {
+    const comparison = comparisonOf(this.model);
+    if (!comparison) return nothing;
+    const rowOf = (hold: HoldConstant): ComparisonRow | undefined =>
+      comparison.rows.find((row) => row.holdConstant === hold);
+    const known = ratioNames.filter(([key]) => comparison.rows.some((row) => row.ratio[key] !== null));
+    return html`<table class=${this.model.stale ? 'stale' : ''}>
+      <caption class="unseen">Ratios of ${comparison.to} to ${comparison.from}, size ${comparison.size}</caption>
+      <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${columns.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>
+      <tbody>${known.map(
+        ([key, name]) => html`<tr><th scope="row">${name}</th>${columns.map(
+          ([hold]) => html`<td>${formatRatio(rowOf(hold)?.ratio[key]).replace('×', '')}</td>`,
+        )}</tr>`,
+      )}</tbody>
+    </table>`;
+  }
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'comparison-table': ComparisonTable;
+  }
+}

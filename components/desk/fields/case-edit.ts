@@ -1,0 +1,16 @@
+import type { Json } from '../../store/path.js';
+
+/** What an element asks of the desk: a value at a path, or a change of the whole document. */
+export type CaseEdit =
+  | { readonly path: string; readonly value: Json | undefined }
+  | { readonly key: string; readonly change: (document: Json) => Json };
+
+/** Sends an edit up to the desk, through shadow roots. */
+export const requestEdit = (from: EventTarget, detail: CaseEdit): boolean =>
+  from.dispatchEvent(new CustomEvent<CaseEdit>('case-edit', { detail, bubbles: true, composed: true }));
+
+declare global {
+  interface HTMLElementEventMap {
+    'case-edit': CustomEvent<CaseEdit>;
+  }
+}

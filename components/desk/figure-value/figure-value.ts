@@ -1,0 +1,100 @@
+import { LitElement, css, html, nothing } from 'lit';
+import { customElement, property } from 'lit/decorators.js';
+import { formatNumber } from '../../charts/format.js';
+import { quantity } from '../../charts/quantities.js';
+import { ratioBar } from '../../charts/ratio-bar.js';
+import { ratioSheet } from '../sheets/ratio-sheet.js';
+
+/** Asks the desk to explain a number beside where it stands. */
+export interface ExplainRequest {
+  readonly quantity: string;
+  readonly value: number | null;
+  readonly technique: string;
+}
+
+/**
+ * One computed number: value, unit and, where there is something to compare with, its ratio.
+ *
+ * Shows: `value` in the unit of `quantity`, greyed while `stale`.
+ * Properties: `quantity` (id), `value`, `ratio`, `technique`, `stale`, `unit` (replaces the
+ * quantity's own), `small`.
+ * Events: `explain` with an ExplainRequest, on click or Enter. Parts: `figure`.
+ */
+@customElement('figure-value')
+export class FigureValue extends LitElement {
+  @property() quantity = '';
+  @property({ attribute: false }) value: number | null = null;
+  @property({ attribute: false }) ratio: number | null | undefined = undefined;
+  @property() technique = '';
+  @property() unit: string | null = null;
+  @property({ type: Boolean, reflect: true }) stale = false;
+  @property({ type: Boolean, reflect: true }) small = false;
+
+  static override styles = [
+    ratioSheet,
+    css`
+      :host {
+        display: inline-flex;
+        align-items: baseline;
+        gap: 0.3em;
+        white-space: nowrap;
+      }
+      button {
+        font: inherit;
+        font-size: var(--value);
+        font-variant-numeric: inherit;
+        line-height: 1.25;
+        color: var(--field-ink, inherit);
+        background: none;
+        border: 0;
+        padding: 0;
+        cursor: help;
+      }
+      :host([small]) button {
+        font-size: inherit;
+      }
+      button:hover {
+        text-decoration: underline dotted 1px;
+        text-underline-offset: 3px;
+      }
+      :focus-visible {
+        outline: 2px solid var(--field-ink, var(--ink));
+        outline-offset: 2px;
+        border-radius: 1px;
+      }
+      .unit {
+        color: var(--soft);
+        font-size: var(--text);
+      }
+      :host([small]) .unit {
+        font-size: inherit;
+      }
+      :host([stale]) button,
+      :host([stale]) .ratio {
+        opacity: 0.45;
+      }
+    `,
+  ];
+
+  private explain() {
+    const detail: ExplainRequest = { quantity: this.quantity, value: this.value, technique: this.technique };
+    this.dispatchEvent(new CustomEvent('explain', { detail, bubbles: true, composed: true }));
+  }
+
+  override render() {
+    const { name, unit } = quantity(this.quantity);
+    const shown = formatNumber(this.value);
+    const shownUnit = this.unit ?? unit;
+    return html`<button part="figure" type="button" aria-label="${name}, ${this.technique}: ${shown} ${shownUnit}" @click=${this.explain}>${shown}</button
+      >${shownUnit ? html`<span class="unit">${shownUnit}</span>` : nothing}${this.ratio === undefined ? nothing : ratioBar(this.ratio)}`;
+  }
+}
+
+declare global {
+  interface HTMLElementTagNameMap {
+    'figure-value': FigureValue;
+  }
+  interface HTMLElementEventMap {
+    explain: CustomEvent<ExplainRequest>;
+  }
+}

@@ -1,0 +1,157 @@
+import { Command } from 'commander';
+import {
+  airPath,
+  aluminiumEquivalent_mm,
+  attenuate,
+  beamQuality,
+  kEdges_keV,
+  type MaterialLayer,
+  type Spectrum,
+  scaleSpectrum,
+  tungstenSpectrum,
+} from '../../physics/beam/index.js';
+import { defaults } from '../../physics/case/index.js';
+import type { BeamQuality } from '../../physics/results.js';
+import { csvText } from './csv-text.js';
+import type { Io } from './io.js';
+import { shown } from './numbers.js';
+import { optionNumber } from './option-number.js';
+import { plainTableText } from './plain-table.js';
+import { type Format, print } from './print.js';
+import { refuse } from './refusal.js';
+import { type SpectrumRow, spectrumRows } from './spectrum-rows.js';
+import { throughLayer } from './through.js';
+
+interface BeamOptions extends Format {
+  readonly potential: number;
+  readonly anodeAngle: number;
+  readonly through: readonly string[];
+  readonly ripple: number;
+  readonly distance: number;
+  readonly air: boolean;
+  readonly outputFactor: number;
+}
+
+const tube = defaults.room.tube;
+/** Below this the tungsten L lines, which are not modelled, would reach the point. */
+const leastFiltration_mmAl = 1;
+
+/** `beam`: spectrum and quality of one tube beam at a point on its axis. */
+export const beamCommand = (io: Io): Command =>
+  new Command('beam')
+    .summary('spectrum and quality of one beam')
+    .description(
+      'Spectrum and quality of one tungsten-anode beam at a point on its axis. In vacuum unless\n' +
+        '--air; everything between anode and point must be listed in --through.',
+    )
+    .requiredOption(
+      '--potential <kV>',
+      'tube potential, 20 to 150 kV',
+      optionNumber('--potential', { min: 20, max: 150, remedy: 'enter the tube potential in kV' }),
+    )
+    .option(
+      '--anode-angle <deg>',
+      'anode angle, 6 to 22 degrees',
+      optionNumber('--anode-angle', { min: 6, max: 22, remedy: 'enter the nameplate angle' }),
+      tube.anodeAngle_deg,
+    )
+    .option('--through <layer...>', 'a layer such as "aluminium 2.5 mm"; may be repeated')
+    .option(
+      '--ripple <percent>',
+      '(Vmax − Vmin)/Vmax of the potential',
+      optionNumber('--ripple', { min: 0, max: 100, remedy: 'enter the ripple in percent' }),
+      tube.ripple_percent,
+    )
+    .option(
+      '--distance <mm>',
+      'distance from the focal spot',
+      optionNumber('--distance', { min: 1, max: 100000, remedy: 'enter the distance in mm' }),
+      1000,
+    )
+    .option('--air', 'air instead of vacuum up to the point', false)
+    .option(
+      '--output-factor <g>',
+      'output scale of the tube; 0.87 stands for any tube within ±30 %',
+      optionNumber('--output-factor', {
+        min: 1e-3,
+        max: 10,
+        remedy: 'enter the calibrated output',
+      }),
+      tube.outputFactor,
+    )
+    .action((_: unknown, command: Command) => runBeam(io, command.optsWithGlobals<BeamOptions>()));
+
+const runBeam = (io: Io, options: BeamOptions): void => {
+  const layers = (options.through ?? []).map(throughLayer);
+  const beam = beamAtPoint(options, layers);
+  const quality = beamQuality(beam, options.potential);
+  const spectrum = spectrumRows(beam);
+  print(io, options, {
+    json: () => ({ ...quality, spectrum }),
+    csv: () => spectrumCsv(spectrum),
+    table: () => beamTable(options, quality),
+  });
+};
+
+const beamAtPoint = (options: BeamOptions, layers: readonly MaterialLayer[]): Spectrum => {
+  const slabs_mm = layers.reduce((sum, layer) => sum + layer.thickness_mm, 0);
+  const air_mm = options.air ? Math.max(0, options.distance - slabs_mm) : 0;
+  const inTheWay = [...layers, airPath(air_mm)];
+  const unfiltered = tungstenSpectrum({
+    potential_kV: options.potential,
+    anodeAngle_deg: options.anodeAngle,
+    ripple_percent: options.ripple,
+    outputFactor: options.outputFactor,
+    extraEdges_keV: kEdges_keV(layers.map(({ material }) => material)),
+  });
+  checkFiltration(unfiltered, inTheWay, options.through ?? []);
+  return scaleSpectrum(attenuate(unfiltered, inTheWay), (1000 / options.distance) ** 2);
+};
+
+const checkFiltration = (
+  unfiltered: Spectrum,
+  layers: readonly MaterialLayer[],
+  through: readonly string[],
+): void => {
+  const equivalent_mm = aluminiumEquivalent_mm(unfiltered, layers);
+  if (equivalent_mm === null || equivalent_mm >= leastFiltration_mmAl - 1e-9) return;
+  refuse(
+    '--through',
+    through.length === 0 ? 'nothing' : through.map((layer) => JSON.stringify(layer)).join(' '),
+    `must amount to at least ${leastFiltration_mmAl} mm aluminium equivalent, not ${shown(equivalent_mm, 3)}`,
+    'list all that lies between anode and point, as in --through "aluminium 2.5 mm"',
+  );
+};
+
+const spectrumCsv = (rows: readonly SpectrumRow[]): string =>
+  csvText(
+    ['energy_keV', 'fluence_per_mm2_per_keV_per_mAs'],
+    rows.map((row) => [row.energy_keV, row.fluence_per_mm2_per_keV_per_mAs]),
+  );
+
+const beamTable = (options: BeamOptions, quality: BeamQuality): string => {
+  const way = [...(options.through ?? []), options.air ? 'air' : 'vacuum'].join(', ');
+  const title = `${options.potential} kV, anode ${options.anodeAngle}°, through ${way}, at ${options.distance} mm`;
+  return [
+    plainTableText({
+      title,
+      headings: ['quantity', 'value', 'unit'],
+      rows: [
+        ['air kerma', shown(quality.airKerma_uGy_per_mAs), 'µGy/mAs'],
+        ['fluence', shown(quality.fluence_per_mm2_per_mAs), '1/(mm² mAs)'],
+        ['mean energy', shown(quality.meanEnergy_keV), 'keV'],
+        ['effective energy', shown(quality.effectiveEnergy_keV), 'keV'],
+        ['homogeneity coefficient', shown(quality.homogeneityCoefficient), ''],
+      ],
+    }),
+    plainTableText({
+      headings: ['value layers in mm', 'first half', 'second half', 'tenth'],
+      rows: quality.halfValueLayers.map((layer) => [
+        layer.material,
+        shown(layer.first_mm),
+        shown(layer.second_mm),
+        shown(layer.tenth_mm),
+      ]),
+    }),
+  ].join('\n');
+};

@@ -6,6 +6,8 @@ import type { PlacedDetail } from '../stack/place-detail.js';
 export interface PathColumns {
   /** exp(−(μ_reference − μ_layer)·displaced): the comparison image over the plain stack. */
   readonly reference: Float64Array;
+  /** The image with the detail over the plain stack. */
+  readonly detail: Float64Array;
   /** Reference minus detail, over the plain stack; from expm1, so thin details lose no digits. */
   readonly difference: Float64Array;
 }
@@ -24,12 +26,12 @@ export const detailColumns = (
   const reference = perMm(detail.reference, energies_keV);
   const matter = perMm(detail.matter, energies_keV);
   const along = ({ displaced_mm, detail_mm }: Omit<DetailPath, 'area_mm2'>): PathColumns => {
-    const referenceColumn = reference.map((mu, i) => Math.exp((layer[i] - mu) * displaced_mm));
+    const inPlace = reference.map((mu, i) => Math.exp((layer[i] - mu) * displaced_mm));
+    const depth = matter.map((mu, i) => (mu - reference[i]) * detail_mm);
     return {
-      reference: referenceColumn,
-      difference: referenceColumn.map(
-        (share, i) => -share * Math.expm1((reference[i] - matter[i]) * detail_mm),
-      ),
+      reference: inPlace,
+      detail: inPlace.map((share, i) => share * Math.exp(-depth[i])),
+      difference: inPlace.map((share, i) => -share * Math.expm1(-depth[i])),
     };
   };
   return { central: along(detail.central), paths: detail.paths.map(along) };

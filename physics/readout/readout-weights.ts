@@ -44,6 +44,8 @@ export enum Row {
   /** Energy fluence in front of the grid and its loss in the detail's central path. */
   energyFluence,
   energyFluenceLoss,
+  /** Signal behind the grid through the detail's central path. */
+  detail,
   /** Background minus detail, behind the grid: the central path, then the paths one by one. */
   difference,
   firstPath,
@@ -57,6 +59,8 @@ export interface ReadoutWeights {
   readonly rows: Float64Array;
   /** Areas of the path rows in mm² at the detail; empty when the central path is all there is. */
   readonly pathAreas_mm2: Float64Array;
+  /** Where a reading puts the sums of the rows; overwritten by the next. */
+  readonly sums: Float64Array;
 }
 
 const known = new WeakMap<ReadoutChain, WeakMap<Float64Array, ReadoutWeights>>();
@@ -104,13 +108,20 @@ const makeWeights = (chain: ReadoutChain, energies_keV: Float64Array): ReadoutWe
     set(Row.arriving, passed * (detector.response === 'counting' ? 1 : energy));
     set(Row.energyFluence, background * energy);
     set(Row.energyFluenceLoss, central.difference[i] * energy);
+    set(Row.detail, transmission[i] * central.detail[i] * signal);
     set(Row.difference, transmission[i] * central.difference[i] * signal);
     for (let k = 0; k < pathRows.length; k++) {
       set(Row.firstPath + k, transmission[i] * pathRows[k].difference[i] * signal);
     }
   }
   const areas = pathRows.length > 0 ? detail.paths.map(({ area_mm2 }) => area_mm2) : [];
-  return { chain, channels, rows, pathAreas_mm2: Float64Array.from(areas) };
+  return {
+    chain,
+    channels,
+    rows,
+    pathAreas_mm2: Float64Array.from(areas),
+    sums: new Float64Array(rows.length / channels),
+  };
 };
 
 interface GridAndScatter {

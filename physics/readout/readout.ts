@@ -1,6 +1,7 @@
 import type { GridPerformance } from '../results.js';
 import { gridPerformance } from './grid-performance.js';
 import { type ReadoutWeights, Row } from './readout-weights.js';
+import { sumRows } from './sum-rows.js';
 
 /**
  * One displayed frame as it depends on tube load m (mAs). Signals are in detector signal per mm²:
@@ -57,26 +58,6 @@ export interface SdnrCoefficients {
 
 const over = (value: number, divisor: number): number => (divisor > 0 ? value / divisor : 0);
 
-/** Row · fluence with four running sums, which the processor can keep in flight together. */
-const dot = (rows: Float64Array, row: number, fluence: Float64Array): number => {
-  const channels = fluence.length;
-  const from = row * channels;
-  const whole = channels - (channels % 4);
-  let s0 = 0;
-  let s1 = 0;
-  let s2 = 0;
-  let s3 = 0;
-  for (let i = 0; i < whole; i += 4) {
-    const at = from + i;
-    s0 += rows[at] * fluence[i];
-    s1 += rows[at + 1] * fluence[i + 1];
-    s2 += rows[at + 2] * fluence[i + 2];
-    s3 += rows[at + 3] * fluence[i + 3];
-  }
-  for (let i = whole; i < channels; i++) s0 += rows[from + i] * fluence[i];
-  return s0 + s1 + (s2 + s3);
-};
-
 /**
  * Reads a beam: contrast, scatter, kerma, noise and SdNR per mAs, by dot products only.
  *
@@ -88,18 +69,19 @@ const dot = (rows: Float64Array, row: number, fluence: Float64Array): number => 
  * @returns finite numbers; where no photon arrives, ratios are 0.
  */
 export const readBeam = (weights: ReadoutWeights, fluence_per_mm2: Float64Array): LinearReadout => {
-  const { rows, pathAreas_mm2, chain } = weights;
+  const { pathAreas_mm2, chain } = weights;
   const { detail, noise, grid } = chain;
-  const openPrimary = dot(rows, Row.openPrimary, fluence_per_mm2);
-  const openScatter = dot(rows, Row.openScatter, fluence_per_mm2);
-  const primary = dot(rows, Row.primary, fluence_per_mm2);
-  const scatter = dot(rows, Row.scatter, fluence_per_mm2);
-  const difference = dot(rows, Row.difference, fluence_per_mm2);
+  const sums = sumRows(weights.rows, fluence_per_mm2, weights.sums);
+  const openPrimary = sums[Row.openPrimary];
+  const openScatter = sums[Row.openScatter];
+  const primary = sums[Row.primary];
+  const scatter = sums[Row.scatter];
+  const difference = sums[Row.difference];
   const total = primary + scatter;
   const spr = over(openScatter, openPrimary);
   const sprBehindGrid = over(scatter, primary);
 
-  const squareIntegral = squareIntegralOf(weights, fluence_per_mm2, difference);
+  const integral = squareIntegralOf(weights);
   const magnified = detail.magnification ** 2;
   const kept = 1 - noise.glare_fraction;
   const residualSquare = noise.residual_fraction ** 2;
@@ -112,8 +94,8 @@ export const readBeam = (weights: ReadoutWeights, fluence_per_mm2: Float64Array)
     signalPrimary_per_mm2_per_mAs: primary,
     signalTotal_per_mm2_per_mAs: total,
     signalDifference_per_mm2_per_mAs: difference,
-    detectorAirKermaPrimary_uGy_per_mAs: dot(rows, Row.primaryKerma, fluence_per_mm2),
-    detectorAirKerma_uGy_per_mAs: dot(rows, Row.totalKerma, fluence_per_mm2),
+    detectorAirKermaPrimary_uGy_per_mAs: sums[Row.primaryKerma],
+    detectorAirKerma_uGy_per_mAs: sums[Row.totalKerma],
     spr,
     sprBehindGrid,
     grid:
@@ -125,23 +107,20 @@ export const readBeam = (weights: ReadoutWeights, fluence_per_mm2: Float64Array)
       ),
     contrast: {
       subject,
-      logarithmic: primary > difference ? -Math.log1p(-subject) : 0,
-      energyFluenceSubject: over(
-        dot(rows, Row.energyFluenceLoss, fluence_per_mm2),
-        dot(rows, Row.energyFluence, fluence_per_mm2),
-      ),
+      logarithmic: logarithmicContrast(primary, sums[Row.detail]),
+      energyFluenceSubject: over(sums[Row.energyFluenceLoss], sums[Row.energyFluence]),
       degradationFactor,
       detected: subject * degradationFactor * kept,
     },
-    absorbedFraction: over(primary, dot(rows, Row.arriving, fluence_per_mm2)),
+    absorbedFraction: over(primary, sums[Row.arriving]),
     effectiveArea_mm2:
       magnified *
       (difference === 0
         ? thinSignalArea_mm2(weights, pathAreas_mm2)
-        : squareIntegral / (difference * difference)),
+        : integral / (difference * difference)),
     coefficients: {
-      c: magnified * kept * kept * squareIntegral,
-      a: noise.maskFactor * dot(rows, Row.variance, fluence_per_mm2),
+      c: magnified * kept * kept * integral,
+      a: noise.maskFactor * sums[Row.variance],
       e: noise.maskFactor * noise.electronicVariance_per_mm2,
       s: structureVariance + backgroundVariance,
     },
@@ -150,19 +129,18 @@ export const readBeam = (weights: ReadoutWeights, fluence_per_mm2: Float64Array)
   };
 };
 
-/** ∬ΔS² dx dy at the detail, per mAs². */
-const squareIntegralOf = (
-  { rows, pathAreas_mm2, chain }: ReadoutWeights,
-  fluence_per_mm2: Float64Array,
-  central: number,
-): number => {
-  if (pathAreas_mm2.length === 0) return chain.detail.paths[0].area_mm2 * central * central;
-  let sum = 0;
+/** ln(background/detail); behind an opaque detail, of the smallest signal that can be written. */
+const logarithmicContrast = (background: number, detail: number): number =>
+  background > 0 ? Math.log(background) - Math.log(Math.max(detail, Number.MIN_VALUE)) : 0;
+
+/** ∬ΔS² dx dy at the detail, per mAs², from the sums just made. */
+const squareIntegralOf = ({ sums, pathAreas_mm2, chain }: ReadoutWeights): number => {
+  if (pathAreas_mm2.length === 0) return chain.detail.paths[0].area_mm2 * sums[Row.difference] ** 2;
+  let integral = 0;
   for (let k = 0; k < pathAreas_mm2.length; k++) {
-    const difference = dot(rows, Row.firstPath + k, fluence_per_mm2);
-    sum += pathAreas_mm2[k] * difference * difference;
+    integral += pathAreas_mm2[k] * sums[Row.firstPath + k] ** 2;
   }
-  return sum;
+  return integral;
 };
 
 /** The effective area a detail of vanishing contrast would have: signal in proportion to path. */

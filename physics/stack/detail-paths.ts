@@ -27,8 +27,8 @@ const vesselPoints = 8;
  * agent and the rest reference.
  *
  * With x = (d/2) sin φ the chord is d cos φ and dx = (d/2) cos φ dφ: the square root at the rim is
- * gone, and 8 Gauss–Legendre points in φ over one half give L∫ΔS² dx to 1e-8 for a thin signal and
- * to 1e-6 up to twelve mean free paths of difference (tested).
+ * gone, and 8 Gauss–Legendre points in φ over one half give L∫ΔS² dx of one energy to 1e-9 for a
+ * thin signal, 1e-6 at five and 1e-4 at twelve mean free paths of difference (tested).
  */
 const vesselPaths = (detail: Detail): DetailPaths => {
   const { size_mm, length_mm, fillingFraction } = detail;

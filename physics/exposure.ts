@@ -27,10 +27,7 @@ export const currentAvailable_mA = (
   potential_kV: number,
   exposureTime_ms: number,
 ): number =>
-  Math.min(
-    tube.current_mA.max,
-    (powerAvailable_kW(tube, exposureTime_ms) / potential_kV) * 1000,
-  );
+  Math.min(tube.current_mA.max, (powerAvailable_kW(tube, exposureTime_ms) / potential_kV) * 1000);
 
 /**
  * The shortest exposure time that delivers a tube load within power and current, but no shorter

@@ -144,7 +144,11 @@ export interface Evaluation {
   readonly size: string;
   readonly thickness_mm: number;
   /** The setting in force: as written, or where the control curve leads at this size. */
-  readonly setting: { readonly potential_kV: number; readonly filter: string; readonly grid: 'in' | 'out' };
+  readonly setting: {
+    readonly potential_kV: number;
+    readonly filter: string;
+    readonly grid: 'in' | 'out';
+  };
   readonly beam: BeamQuality;
   readonly transmission: Transmission;
   readonly scatter: Scatter;
@@ -153,7 +157,11 @@ export interface Evaluation {
   readonly noise: Noise;
   readonly sdnr: number;
   readonly dose: DoseQuantities;
-  readonly detector: { readonly airKerma_uGy: number; readonly absorbedFraction: number; readonly signal_keV_per_mm2: number };
+  readonly detector: {
+    readonly airKerma_uGy: number;
+    readonly absorbedFraction: number;
+    readonly signal_keV_per_mm2: number;
+  };
   readonly exposure: Exposure;
   readonly figureOfMerit: FigureOfMerit;
   readonly findings: readonly Finding[];

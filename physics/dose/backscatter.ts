@@ -1,4 +1,5 @@
-import { type Material, massEnergyAbsorptionOn } from '../../materials/index.js';
+import { massEnergyAbsorptionOn } from '../../materials/index.js';
+import { referenceMaterial } from '../beam/reference-materials.js';
 import type { Spectrum } from '../beam/spectrum.js';
 
 /**
@@ -7,12 +8,8 @@ import type { Spectrum } from '../beam/spectrum.js';
  *
  * @param backscatter backscattered over incident air kerma (B − 1) on the channels of `skin`.
  */
-export const backscatterFactor = (
-  skin: Spectrum,
-  backscatter: Float64Array,
-  air: Material,
-): number => {
-  const inAir = massEnergyAbsorptionOn(air, skin.energies_keV);
+export const backscatterFactor = (skin: Spectrum, backscatter: Float64Array): number => {
+  const inAir = massEnergyAbsorptionOn(referenceMaterial('air'), skin.energies_keV);
   let back = 0;
   let incident = 0;
   for (let i = 0; i < inAir.length; i++) {

@@ -1,6 +1,5 @@
-import type { Material } from '../../materials/material.js';
-import { attenuate } from '../beam/index.js';
-import { scaleSpectrum, type Spectrum } from '../beam/spectrum.js';
+import { airPath, attenuate } from '../beam/index.js';
+import { type Spectrum, scaleSpectrum } from '../beam/spectrum.js';
 import type { Stack } from '../stack/stack.js';
 
 /** Tube output is quoted at this distance from the focal spot. */
@@ -24,24 +23,16 @@ const airToSkin_mm = (stack: Stack): number => {
  *
  * @param output beam behind the added filter at 1 m in vacuum, per mAs.
  */
-export const beamAtSkin = (output: Spectrum, stack: Stack, air: Material): Spectrum =>
+export const beamAtSkin = (output: Spectrum, stack: Stack): Spectrum =>
   scaleSpectrum(
-    attenuate(output, [
-      { material: air, thickness_mm: airToSkin_mm(stack) },
-      ...stack.supportEntrance,
-    ]),
+    attenuate(output, [airPath(airToSkin_mm(stack)), ...stack.supportEntrance]),
     distanceFactor(stack.beam, stack.sourceToSkin_mm),
   );
 
 /** The beam at a distance in free air, before any support: what a reference-point display states. */
-export const beamInFreeAir = (
-  output: Spectrum,
-  stack: Stack,
-  air: Material,
-  distance_mm: number,
-): Spectrum =>
+export const beamInFreeAir = (output: Spectrum, stack: Stack, distance_mm: number): Spectrum =>
   scaleSpectrum(
-    attenuate(output, [{ material: air, thickness_mm: stack.air ? distance_mm : 0 }]),
+    attenuate(output, [airPath(stack.air ? distance_mm : 0)]),
     distanceFactor(stack.beam, distance_mm),
   );
 
@@ -49,15 +40,11 @@ export const beamInFreeAir = (
  * Everything between the skin and the front of the grid on the axis, with inverse square from the
  * skin: the primary beam at the detector plane, before grid and detector cover.
  */
-export const primaryAtDetector = (skin: Spectrum, stack: Stack, air: Material): Spectrum => {
+export const primaryAtDetector = (skin: Spectrum, stack: Stack): Spectrum => {
   const exitSupport_mm = stack.supportExit.reduce((sum, slab) => sum + slab.thickness_mm, 0);
   const gap_mm = stack.air ? Math.max(0, stack.exitToDetector_mm - exitSupport_mm) : 0;
   return scaleSpectrum(
-    attenuate(skin, [
-      ...stack.layers,
-      ...stack.supportExit,
-      { material: air, thickness_mm: gap_mm },
-    ]),
+    attenuate(skin, [...stack.layers, ...stack.supportExit, airPath(gap_mm)]),
     stack.beam === 'parallel' ? 1 : (stack.sourceToSkin_mm / stack.sourceToDetector_mm) ** 2,
   );
 };

@@ -1,4 +1,5 @@
 import { type Material, massEnergyAbsorptionOn } from '../../materials/index.js';
+import { referenceMaterial } from '../beam/reference-materials.js';
 import type { Spectrum } from '../beam/spectrum.js';
 
 /**
@@ -7,9 +8,9 @@ import type { Spectrum } from '../beam/spectrum.js';
  * The backscattered photons are given the incident beam's ratio (they are softer; the ratio of
  * skin to air varies by under 2 % between 30 and 100 keV).
  */
-export const skinToAirRatio = (skin: Spectrum, skinTissue: Material, air: Material): number => {
+export const skinToAirRatio = (skin: Spectrum, skinTissue: Material): number => {
   const inSkin = massEnergyAbsorptionOn(skinTissue, skin.energies_keV);
-  const inAir = massEnergyAbsorptionOn(air, skin.energies_keV);
+  const inAir = massEnergyAbsorptionOn(referenceMaterial('air'), skin.energies_keV);
   let above = 0;
   let below = 0;
   for (let i = 0; i < inAir.length; i++) {

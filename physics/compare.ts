@@ -1,0 +1,150 @@
+import { type Weighed, weighedAt } from './at-load.js';
+import type { Case } from './case/schema.js';
+import { numberText } from './number-text.js';
+import type { OperatingPoint } from './operating-point.js';
+import { sdnrAt, solveTubeLoad } from './readout/index.js';
+import type { Comparison, ComparisonRow, Finding, HoldConstant, Ratios } from './results.js';
+
+/** The equalities every comparison shows, in this order. */
+export const holdConstants: readonly HoldConstant[] = [
+  'asSet',
+  'sdnr',
+  'detectorAirKerma',
+  'detectorSignal',
+  'incidentAirKerma',
+  'tubeLoad',
+];
+
+/** How an equality is named in a sentence. */
+export const holdConstantWords: Readonly<Record<HoldConstant, string>> = {
+  asSet: 'as set',
+  sdnr: 'equal SdNR',
+  detectorAirKerma: 'equal detector air kerma',
+  detectorSignal: 'equal detector signal',
+  incidentAirKerma: 'equal incident air kerma',
+  tubeLoad: 'equal tube load',
+};
+
+/**
+ * Two operating points at one size under every equality. The first keeps its load as set; the
+ * second's is solved so that the held quantity equals the first's.
+ */
+export const compare = (c: Case, from: OperatingPoint, to: OperatingPoint): Comparison => {
+  const base = weighedAt(c, from.made, from.technique.acquisition, from.tubeLoad_mAs);
+  const rows = holdConstants.map((hold) => compareRow(c, from, to, base, hold));
+  return {
+    size: from.size.name,
+    from: from.technique.name,
+    to: to.technique.name,
+    rows: withDisagreement(rows, to.technique.name, c.compare.sdnrMargin_percent),
+  };
+};
+
+/** The load of `to` at which the held quantity equals that of `from` as set. */
+export const heldLoad = (from: OperatingPoint, to: OperatingPoint, hold: HoldConstant) => {
+  if (hold === 'asSet') return { tubeLoad_mAs: to.tubeLoad_mAs, reason: null };
+  const { readout, dose } = to.made;
+  return solveTubeLoad(readout, dose.incidentAirKerma_mGy, hold, heldTarget(from, hold));
+};
+
+const heldTarget = (
+  { made, tubeLoad_mAs }: OperatingPoint,
+  hold: Exclude<HoldConstant, 'asSet'>,
+): number => {
+  switch (hold) {
+    case 'sdnr':
+      return sdnrAt(made.readout, tubeLoad_mAs);
+    case 'detectorAirKerma':
+      return made.readout.detectorAirKerma_uGy_per_mAs * tubeLoad_mAs;
+    case 'detectorSignal':
+      return made.readout.signalTotal_per_mm2_per_mAs * tubeLoad_mAs;
+    case 'incidentAirKerma':
+      return made.dose.incidentAirKerma_mGy * tubeLoad_mAs;
+    case 'tubeLoad':
+      return tubeLoad_mAs;
+  }
+};
+
+const ratioKeys: readonly (keyof Ratios)[] = [
+  'incidentAirKerma',
+  'entranceSurfaceAirKerma',
+  'kermaAreaProduct',
+  'energyImparted',
+  'meanAbsorbedDose',
+  'tubeLoad',
+  'power',
+  'sdnr',
+  'subjectContrast',
+  'detectedContrast',
+];
+
+const ratiosOf = (value: Weighed | null, base: Weighed): Ratios =>
+  Object.fromEntries(
+    ratioKeys.map((key) => {
+      const above = value?.[key] ?? null;
+      const below = base[key];
+      return [key, above === null || below === null || below === 0 ? null : above / below];
+    }),
+  ) as Record<keyof Ratios, number | null>;
+
+const compareRow = (
+  c: Case,
+  from: OperatingPoint,
+  to: OperatingPoint,
+  base: Weighed,
+  holdConstant: HoldConstant,
+): ComparisonRow => {
+  const load = heldLoad(from, to, holdConstant);
+  if (load.tubeLoad_mAs === null) {
+    const unreachable: Finding = {
+      code: 'equalityUnreachable',
+      severity: 'caution',
+      message: `${to.technique.name} cannot reach ${holdConstantWords[holdConstant]}: ${load.reason}`,
+      value: null,
+    };
+    return { holdConstant, ratio: ratiosOf(null, base), findings: [unreachable] };
+  }
+  const value = weighedAt(c, to.made, to.technique.acquisition, load.tubeLoad_mAs);
+  return { holdConstant, ratio: ratiosOf(value, base), findings: [] };
+};
+
+/**
+ * A dose that falls as set while SdNR falls too has not been shown to be a saving: the equalities
+ * disagree on who wins, and the row says so.
+ */
+const withDisagreement = (
+  rows: readonly ComparisonRow[],
+  name: string,
+  sdnrMargin_percent: number,
+): ComparisonRow[] => {
+  const atEqualSdnr =
+    rows.find((row) => row.holdConstant === 'sdnr')?.ratio.incidentAirKerma ?? null;
+  return rows.map((row) => {
+    const { incidentAirKerma, sdnr } = row.ratio;
+    if (row.holdConstant === 'sdnr' || incidentAirKerma === null || sdnr === null) return row;
+    const findings: Finding[] = [];
+    if (incidentAirKerma < 1 && atEqualSdnr !== null && atEqualSdnr > 1) {
+      findings.push({
+        code: 'equalitiesDisagree',
+        severity: 'caution',
+        message: `${name} has less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(row.holdConstant)}, but more (×${numberText(atEqualSdnr)}) at equal SdNR.`,
+        value: incidentAirKerma,
+        bound: atEqualSdnr,
+      });
+    } else if (incidentAirKerma < 1 && sdnr < 1 - sdnrMargin_percent / 100) {
+      findings.push({
+        code: 'sdnrLost',
+        severity: 'caution',
+        message: `${holdConstantPhrase(row.holdConstant, true)} the saving looks larger because SdNR falls by ${numberText(100 * (1 - sdnr), 2)} %.`,
+        value: sdnr,
+        bound: 1 - sdnrMargin_percent / 100,
+      });
+    }
+    return findings.length > 0 ? { ...row, findings: [...row.findings, ...findings] } : row;
+  });
+};
+
+const holdConstantPhrase = (hold: HoldConstant, isStart = false): string => {
+  const phrase = hold === 'asSet' ? 'as set' : `at ${holdConstantWords[hold]}`;
+  return isStart ? phrase[0].toUpperCase() + phrase.slice(1) : phrase;
+};

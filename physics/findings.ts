@@ -1,0 +1,65 @@
+import type { Case, Technique } from './case/schema.js';
+import { isCurve } from './control.js';
+import type { Finding } from './results.js';
+
+/** Said once with every result of a case, whatever its numbers. */
+export const caseFindings = (c: Case): Finding[] => {
+  const findings: Finding[] = [];
+  if (c.room.source) {
+    findings.push({
+      code: 'sourceWithoutTube',
+      severity: 'note',
+      message:
+        'The source has no tube: loads are in units of its own intensity, not mAs; power and tube limits do not apply.',
+      path: 'room.source',
+    });
+  } else if (c.room.readings.length === 0) {
+    findings.push({
+      code: 'uncalibrated',
+      severity: 'caution',
+      message:
+        'No readings are entered: tube output is the model’s, ±30 % from tube to tube; ratios between techniques suffer far less than absolute kerma.',
+      path: 'room.readings',
+    });
+  }
+  const [width_mm, height_mm] = c.room.geometry.field_mm;
+  if (Math.max(width_mm, height_mm) > 1.001 * Math.min(width_mm, height_mm)) {
+    findings.push({
+      code: 'equivalentSquare',
+      severity: 'note',
+      message: `Scatter treats the ${width_mm} × ${height_mm} mm field as its equivalent square (4 area/perimeter); its scatter is approximate.`,
+      path: 'room.geometry.field_mm',
+    });
+  }
+  if (c.patient.lateral_mm === null) {
+    findings.push({
+      code: 'lateralInfinite',
+      severity: 'note',
+      message:
+        'Layers are laterally infinite, bone too: scatter from bone at the field’s edge and dose beside the spine are those of a full slab.',
+      path: 'patient.lateral_mm',
+    });
+  }
+  return findings;
+};
+
+/** Said with every result of a technique. */
+export const techniqueFindings = (technique: Technique, path: string): Finding[] =>
+  isCurve(technique.control)
+    ? []
+    : [
+        {
+          code: 'controlNotModelled',
+          severity: 'caution',
+          message: `${technique.name}: the room's exposure control is not modelled; every size is taken at the same setting. Enter a control curve to see where a filter is withdrawn.`,
+          path: `${path}.control`,
+        },
+      ];
+
+/** Values this version does not compute yet stand as null with this finding. */
+export const notYetComputed = (quantities: string): Finding => ({
+  code: 'notYetComputed',
+  severity: 'note',
+  message: `Not yet computed: ${quantities}.`,
+  value: null,
+});

@@ -1,0 +1,95 @@
+import type { Case, Size, Technique } from './case/schema.js';
+import { curvePointAt, isCurve } from './control.js';
+import { outputBeam } from './output-beam.js';
+import { placementOf } from './placement.js';
+import { prepare } from './prepare.js';
+import { solveTubeLoad } from './readout/index.js';
+import type { Finding } from './results.js';
+import { type Setting, settingOf } from './setting.js';
+import { type Yield, yieldOf } from './yield.js';
+
+/** Where a technique stands at a size: its setting in force, its yield, and the load of one frame. */
+export interface OperatingPoint {
+  readonly technique: Technique;
+  readonly size: Size;
+  readonly made: Yield;
+  readonly tubeLoad_mAs: number;
+  readonly findings: readonly Finding[];
+}
+
+/** A technique that cannot be computed at a size, and why. */
+export interface NoPoint {
+  readonly findings: readonly Finding[];
+}
+
+/**
+ * What the room's own exposure control will deliver for a technique at a size: as set. A control
+ * curve decides potential, filter and load by thickness; any other control fixes one quantity of a
+ * frame and the load follows.
+ */
+export const operatingPoint = (
+  c: Case,
+  technique: Technique,
+  size: Size,
+): OperatingPoint | NoPoint => {
+  const placement = placementOf(c, size);
+  if (!('stack' in placement)) return placement;
+  const written = settingOf(technique);
+  const { control } = technique;
+  const curve = isCurve(control) ? curvePointAt(control, size.thickness_mm) : null;
+  const setting: Setting = curve ? { ...written, ...curve.setting } : written;
+  const { spectrum, findings } = outputBeam(prepare(c), setting.potential_kV, setting.filter);
+  if (!spectrum) return { findings };
+  const made = yieldOf(c, placement, setting, technique.acquisition, spectrum);
+  if (isCurve(control)) {
+    if (!curve) {
+      return {
+        findings: [
+          blocked('controlCurveEmpty', `${technique.name}: the control curve has no rows.`),
+        ],
+      };
+    }
+    const tubeLoad_mAs = (curve.tubeCurrent_mA * curve.exposureTime_ms) / 1000;
+    return {
+      technique,
+      size,
+      made,
+      tubeLoad_mAs,
+      findings: [...findings, ...withdrawn(technique, setting, size)],
+    };
+  }
+  const [hold, target] = heldBy(control);
+  const load = solveTubeLoad(made.readout, made.dose.incidentAirKerma_mGy, hold, target);
+  return load.tubeLoad_mAs === null
+    ? {
+        findings: [...findings, blocked('controlUnreachable', `${technique.name}: ${load.reason}`)],
+      }
+    : { technique, size, made, tubeLoad_mAs: load.tubeLoad_mAs, findings };
+};
+
+type Fixed = Exclude<Technique['control'], { curve: string }>;
+
+const heldBy = (
+  control: Fixed,
+): ['detectorAirKerma' | 'detectorSignal' | 'incidentAirKerma' | 'tubeLoad', number] => {
+  if ('detectorAirKerma_uGy' in control) return ['detectorAirKerma', control.detectorAirKerma_uGy];
+  if ('detectorSignal' in control) return ['detectorSignal', control.detectorSignal];
+  if ('incidentAirKerma_mGy' in control) return ['incidentAirKerma', control.incidentAirKerma_mGy];
+  return ['tubeLoad', control.tubeLoad_mAs];
+};
+
+const blocked = (code: string, message: string): Finding => ({ code, severity: 'limit', message });
+
+/** The control curve left the technique as written. */
+const withdrawn = (technique: Technique, setting: Setting, size: Size): Finding[] =>
+  setting.filter === technique.filter
+    ? []
+    : [
+        {
+          code: 'filterWithdrawn',
+          severity: 'caution',
+          message: `${technique.name}: at ${size.thickness_mm} mm (${size.name}) the control curve uses filter ${setting.filter} instead of ${technique.filter}.`,
+          value: setting.filter,
+          bound: technique.filter,
+        },
+      ];

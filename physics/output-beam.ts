@@ -1,0 +1,55 @@
+import {
+  attenuate,
+  type Spectrum,
+  scaleSpectrum,
+  sourceBeam,
+  tungstenSpectrum,
+} from './beam/index.js';
+import type { Prepared } from './prepare.js';
+import type { Finding } from './results.js';
+
+/** The potential at which the output law ln g = ln outputFactor + b ln(kV/80) is anchored. */
+const outputAnchor_kV = 80;
+
+/** Output scale g of the room's tube at a potential: calibrated, or as entered. */
+export const outputFactorAt = (
+  { room, calibration }: Pick<Prepared, 'room' | 'calibration'>,
+  potential_kV: number,
+): number =>
+  calibration
+    ? calibration.outputFactor * (potential_kV / outputAnchor_kV) ** calibration.outputExponent
+    : room.tube.outputFactor;
+
+/** The room's beam, or what had to be said about it. */
+export interface OutputBeam {
+  readonly spectrum: Spectrum | null;
+  readonly findings: readonly Finding[];
+}
+
+/**
+ * The room's beam at 1 m in vacuum behind inherent and added filter, photons per mm² and mAs.
+ * A source that replaces the tube has no inherent filter; without a tube "mAs" is one unit of load.
+ */
+export const outputBeam = (
+  prepared: Prepared,
+  potential_kV: number,
+  filter: string,
+): OutputBeam => {
+  const { source, tube } = prepared.room;
+  const added = prepared.filters.get(filter) ?? [];
+  if (source) {
+    const { spectrum, findings } = sourceBeam(source, potential_kV, prepared.edges_keV);
+    return { spectrum: spectrum && attenuate(spectrum, added), findings };
+  }
+  const bare = tungstenSpectrum({
+    potential_kV,
+    anodeAngle_deg: tube.anodeAngle_deg,
+    ripple_percent: tube.ripple_percent,
+    extraEdges_keV: prepared.edges_keV,
+  });
+  const spectrum = scaleSpectrum(
+    attenuate(bare, [...prepared.inherentFilter, ...added]),
+    outputFactorAt(prepared, potential_kV),
+  );
+  return { spectrum, findings: [] };
+};

@@ -1,0 +1,46 @@
+import { caseHash } from './case/hash.js';
+import type { ParsedCase } from './case/parse.js';
+import { compare } from './compare.js';
+import { evaluate } from './evaluate.js';
+import { caseFindings, techniqueFindings } from './findings.js';
+import { type OperatingPoint, operatingPoint } from './operating-point.js';
+import { prepare } from './prepare.js';
+import type { Comparison, Evaluation, Finding, Weighing } from './results.js';
+import { sizesOf } from './stack/sizes.js';
+import { version } from './version.js';
+
+/**
+ * Weighs a case: every technique at every size, and every Proposed against Current.
+ *
+ * @returns a frozen answer that clones to a worker. A technique that cannot be computed at a size
+ *   is left out of `evaluations` and named in `findings`.
+ */
+export const weigh = ({ case: c, assumed }: ParsedCase): Weighing => {
+  const evaluations: Evaluation[] = [];
+  const comparisons: Comparison[] = [];
+  const findings: Finding[] = [
+    ...caseFindings(c),
+    ...(prepare(c).calibration?.findings ?? []),
+    ...c.techniques.flatMap((technique, i) => techniqueFindings(technique, `techniques[${i}]`)),
+  ];
+  for (const size of sizesOf(c.patient)) {
+    const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
+    points.forEach((point, index) => {
+      if ('made' in point) evaluations.push(evaluate(c, point, index));
+      else findings.push(...point.findings.filter((finding) => !findings.includes(finding)));
+    });
+    const [current, ...proposed] = points;
+    if (!('made' in current)) continue;
+    const standing = proposed.filter((point): point is OperatingPoint => 'made' in point);
+    comparisons.push(...standing.map((point) => compare(c, current, point)));
+  }
+  return Object.freeze({
+    case: { hash: caseHash(c), title: c.title },
+    version,
+    assumed,
+    calibration: prepare(c).calibration,
+    evaluations,
+    comparisons,
+    findings,
+  });
+};

@@ -47,7 +47,8 @@ export const heldLoad = (from: OperatingPoint, to: OperatingPoint, hold: HoldCon
   return solveTubeLoad(readout, dose.incidentAirKerma_mGy, hold, heldTarget(from, hold));
 };
 
-const heldTarget = (
+/** The value of the held quantity that the first operating point has as set. */
+export const heldTarget = (
   { made, tubeLoad_mAs }: OperatingPoint,
   hold: Exclude<HoldConstant, 'asSet'>,
 ): number => {

@@ -1,3 +1,4 @@
+import { kept } from '../materials/kept.js';
 import {
   attenuate,
   type Spectrum,
@@ -29,6 +30,7 @@ export interface OutputBeam {
 /**
  * The room's beam at 1 m in vacuum behind inherent and added filter, photons per mm² and mAs.
  * A source that replaces the tube has no inherent filter; without a tube "mAs" is one unit of load.
+ * The same object for the same potential and filter of a room, so that its quality is found once.
  */
 export const outputBeam = (
   prepared: Prepared,

@@ -23,7 +23,7 @@ const leastLineShare = 1e-3;
 /**
  * K-shell data of element z: edge and jump from the attenuation table, yield, line energies
  * (differences of binding energies) and shares (radiative rates) from EADL97 (Cullen et al. 1991).
- * Undefined where there is no K edge above 0.1 keV or no K fluorescence (Z < 6).
+ * Undefined where the K edge lies below the table's first energy, 1 keV (Z ≤ 10).
  */
 export function kShell(z: number): KShell | undefined {
   return kept(kShells, z, () => buildKShell(z) ?? null) ?? undefined;
@@ -34,14 +34,13 @@ const kShells = new Map<number, KShell | null>();
 function buildKShell(z: number): KShell | undefined {
   const table = elementTableOf(z);
   const edge = table.edges.find(({ shell }) => shell === 0);
-  const fluorescenceYield = table.vacancies[0].yield;
-  if (!edge || fluorescenceYield === 0) return undefined;
+  if (!edge) return undefined;
   const strong = linesOf(z, 0).filter(({ share }) => share >= leastLineShare);
   const total = strong.reduce((sum, { share }) => sum + share, 0);
   return Object.freeze({
     edge_keV: edge.energy_keV,
     jumpRatio: edge.above_cm2_per_g / edge.below_cm2_per_g,
-    yield: fluorescenceYield,
+    yield: table.vacancies[0].yield,
     lines: strong.map((line) => Object.freeze({ ...line, share: line.share / total })),
   });
 }
@@ -61,7 +60,8 @@ export function linesOf(z: number, vacancy: number): FluorescenceLine[] {
 /**
  * Mean energy X̄ that leaves an atom of element z as K and L fluorescence per photoelectric event at
  * `energy_keV`. Shell shares 1 − 1/J are taken in turn from K, L1, L2, L3 with the jumps J of the
- * attenuation table; K includes the L photons that follow it. M and outer shells are neglected.
+ * attenuation table, which has edges from 1 keV up (K of Z ≤ 10 and L of Z ≤ 28 lie below and yield next
+ * to nothing); K includes the L photons that follow it. M and outer shells are neglected.
  */
 export function meanFluorescenceEnergy_keV(z: number, energy_keV: number): number {
   const perVacancy = energyPerVacancy(z);

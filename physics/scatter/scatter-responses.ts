@@ -3,6 +3,7 @@ import type { Stack } from '../stack/stack.js';
 import { type EnergyNodes, energyNodes, scatterRange_keV } from './energy-nodes.js';
 import { firstOrder } from './first-order.js';
 import { scatterGeometry } from './geometry.js';
+import { infiniteField } from './infinite-field.js';
 import type { DetectorScatter, ScatterResponses } from './responses.js';
 import { type ScatterDetector, type ScatterGrid, scoreCount, scoreTable } from './scores.js';
 import { type Slab, slabsOf } from './slabs.js';
@@ -51,5 +52,20 @@ const detectorScatter = (scores: readonly Float64Array[], from: number): Detecto
   airKerma: scores[from + 3],
 });
 
-/** The best scatter estimate at hand. */
-export const scatterResponses = firstOrderResponses;
+/** First-order scatter at the detector; backscatter and deposition in full. */
+export function scatterResponses(
+  stack: Stack,
+  detector: ScatterDetector,
+  grid: ScatterGrid | null,
+): ScatterResponses {
+  const slabs = slabsOf(stack);
+  const nodes = nodesFor(slabs, detector, grid);
+  const { backscatter, layerAbsorbedFraction } = infiniteField(
+    slabs,
+    stack.layers.length,
+    nodes,
+    detector,
+    grid,
+  );
+  return { ...firstOrderResponses(stack, detector, grid), backscatter, layerAbsorbedFraction };
+}

@@ -1,4 +1,4 @@
-import { massEnergyAbsorption, namedMaterial } from '../../materials/index.js';
+import { massEnergyAbsorptionOn, namedMaterial } from '../../materials/index.js';
 import { kept } from '../../materials/kept.js';
 import type { EnergyNodes } from './energy-nodes.js';
 
@@ -26,26 +26,26 @@ export const scoreCount = scoreNames.length;
 export const airKermaScore = scoreNames.indexOf('airKerma');
 
 /**
- * Scores of one photon without grid: signal E·ε, noise E²·ε₂, counts η, air kerma E·(μen/ρ)air.
- * Air kerma is of fluence, so it still wants 1/cosβ; the others are per photon through the plane.
+ * Scores of one photon without grid: signal E·ε, noise E²·ε₂, counts η. The fourth score, air kerma,
+ * is E·(μen/ρ)air per fluence: it wants 1/cosβ where photons are counted through a plane.
  */
 export function photonScores(
   detector: ScatterDetector,
   energy_keV: number,
   cosine: number,
-): [number, number, number, number] {
+): readonly [number, number, number] {
   return [
     energy_keV * detector.energyFraction(energy_keV, cosine),
     energy_keV * energy_keV * detector.energySquareFraction(energy_keV, cosine),
     detector.efficiency(energy_keV, cosine),
-    airKermaPerFluence(energy_keV),
   ];
 }
 
-/** E·(μen/ρ) of air, keV cm²/g: air kerma per fluence up to a constant. */
-export function airKermaPerFluence(energy_keV: number): number {
+/** E·(μen/ρ) of air on a grid of energies, keV cm²/g: air kerma per fluence up to a constant. */
+export function airKermaPerFluence(energies_keV: Float64Array): Float64Array {
   const air = namedMaterial('air');
-  return air ? energy_keV * (massEnergyAbsorption(air, energy_keV) ?? 0) : 0;
+  if (!air) return new Float64Array(energies_keV.length);
+  return massEnergyAbsorptionOn(air, energies_keV).map((value, i) => value * energies_keV[i]);
 }
 
 const angleCount = 48;
@@ -96,17 +96,19 @@ function tabulate(
 ): ScoreTable {
   const width = grid ? 2 * scoreCount : scoreCount;
   const values = new Float64Array(energies_keV.length * angleCount * width);
+  const airKerma = airKermaPerFluence(energies_keV);
   let at = 0;
-  for (const energy of energies_keV) {
+  energies_keV.forEach((energy, i) => {
     for (let j = 0; j < angleCount; j++, at += width) {
       const cosine = Math.max(grazingCosine, Math.cos(halfPi * (j / (angleCount - 1)) ** 2));
-      const scores = photonScores(detector, energy, cosine);
-      const transmission = grid ? grid.lookup(energy, cosine) : 0;
+      values.set(photonScores(detector, energy, cosine), at);
+      values[at + airKermaScore] = airKerma[i];
+      if (!grid) continue;
+      const transmission = grid.lookup(energy, cosine);
       for (let score = 0; score < scoreCount; score++) {
-        values[at + score] = scores[score];
-        if (grid) values[at + scoreCount + score] = scores[score] * transmission;
+        values[at + scoreCount + score] = values[at + score] * transmission;
       }
     }
-  }
+  });
   return { values, width };
 }

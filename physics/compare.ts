@@ -132,7 +132,8 @@ const withDisagreement = (
         value: incidentAirKerma,
         bound: atEqualSdnr,
       });
-    } else if (incidentAirKerma < 1 && sdnr < 1 - sdnrMargin_percent / 100) {
+    }
+    if (incidentAirKerma < 1 && sdnr < 1 - sdnrMargin_percent / 100) {
       findings.push({
         code: 'sdnrLost',
         severity: 'caution',

@@ -17,13 +17,11 @@ export const program = (io: Io): Command => {
     root.addCommand(withAnswerForms(command));
   }
   return forAll(root, (command) =>
-    command
-      .exitOverride()
-      .configureOutput({
-        writeOut: io.out,
-        writeErr: () => undefined,
-        outputError: () => undefined,
-      }),
+    command.exitOverride().configureOutput({
+      writeOut: io.out,
+      writeErr: () => undefined,
+      outputError: () => undefined,
+    }),
   );
 };
 

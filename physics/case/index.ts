@@ -5,6 +5,7 @@ export { type Fault, faultAt, faultLine } from './fault.js';
 export { type CaseFiles, referencedFiles } from './files.js';
 export { caseHash } from './hash.js';
 export { caseJsonSchema } from './json-schema.js';
+export { nearestKey } from './nearest-key.js';
 export {
   type CaseFaults,
   longestCase,

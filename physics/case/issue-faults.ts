@@ -36,11 +36,11 @@ const faultsOf = (schema: Schema, input: unknown, issue: Issue): Found[] => {
   if (issue.code === 'unrecognized_keys') {
     return issue.keys.map((key) => unknownKey(schema, input, path, key));
   }
+  if (value === undefined)
+    return [{ fault: faultAt(path, value, 'must be given', remedyFor(path)) }];
   if (issue.code === 'invalid_union' && issue.errors.length > 0) {
     return unionFaults(schema, input, issue);
   }
-  if (value === undefined)
-    return [{ fault: faultAt(path, value, 'must be given', remedyFor(path)) }];
   return [{ fault: faultAt(path, value, ruleOf(schema, value, issue), adviceOf(issue, value)) }];
 };
 

@@ -8,11 +8,14 @@ const prototypeKeys = new Set(['__proto__', 'constructor', 'prototype']);
 
 /**
  * What keeps a value from being plain JSON data: numbers that are not finite, keys that reach into
- * an object's prototype, functions and class instances, nesting deeper than 32. No faults means the
+ * an object's prototype, half characters, functions and class instances, nesting deeper than 32. No faults means the
  * value can be walked, copied and hashed safely.
  */
 export const plainJsonFaults = (value: unknown, path: Path = []): Fault[] => {
-  if (value === null || typeof value === 'boolean' || typeof value === 'string') return [];
+  if (value === null || typeof value === 'boolean') return [];
+  if (typeof value === 'string') {
+    return isWellFormed(value) ? [] : [faultAt(path, value, ...wellFormed)];
+  }
   if (typeof value === 'number') {
     return Number.isFinite(value) ? [] : [faultAt(path, value, ...finite)];
   }
@@ -26,11 +29,17 @@ export const plainJsonFaults = (value: unknown, path: Path = []): Fault[] => {
     );
   }
   return Object.entries(value).flatMap(([key, item]) => {
-    if (prototypeKeys.has(key)) return [faultAt([...path, key], item, ...ordinary)];
+    if (prototypeKeys.has(key) || !isWellFormed(key)) {
+      return [faultAt([...path, key], item, ...ordinary)];
+    }
     return item === undefined ? [] : plainJsonFaults(item, [...path, key]);
   });
 };
 
+// Half a surrogate pair has no UTF-8, so it could neither be saved nor hashed.
+const isWellFormed = (text: string): boolean => !/\p{Cs}/u.test(text);
+
+const wellFormed = ['must be whole characters', 'enter the text again'] as const;
 const finite = ['must be a finite number', 'enter a number a measurement could give'] as const;
 const data = [
   'must be JSON data: text, number, true, false, null, list or object',

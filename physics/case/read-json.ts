@@ -53,7 +53,7 @@ class Reader {
     const found = this.text.slice(at, at + 20).split('\n')[0];
     return {
       path: `line ${before.length}, column ${before[before.length - 1].length + 1}`,
-      value: found === '' ? 'end of line' : shortText(found),
+      value: found === '' ? 'nothing more' : shortText(found),
       rule,
       remedy,
     };
@@ -62,6 +62,7 @@ class Reader {
   private value(depth: number): unknown {
     this.skip(space);
     const next = this.text[this.at];
+    if (next === undefined) throw this.cutShort();
     if (depth > deepestNesting) {
       throw this.misread(
         `must not nest deeper than ${deepestNesting} levels`,
@@ -119,10 +120,11 @@ class Reader {
       if (this.text[this.at] === close) {
         throw this.misread('must be another entry', 'remove the comma before it');
       }
+      if (this.at >= this.text.length) throw this.cutShort();
       member();
       this.skip(space);
       const mark = this.text[this.at];
-      if (mark === undefined) throw this.misread(`must be "${close}"`, 'close every bracket');
+      if (mark === undefined) throw this.cutShort();
       if (mark !== ',' && mark !== close) {
         throw this.misread(`must be "," or "${close}"`, 'put a comma between entries');
       }
@@ -167,6 +169,10 @@ class Reader {
 
   private skip(pattern: RegExp): void {
     this.take(pattern);
+  }
+
+  private cutShort(): Misread {
+    return this.misread('must not end here', 'close every bracket, or save the file again');
   }
 
   private misread(rule: string, remedy: string, at = this.at): Misread {

@@ -33,6 +33,7 @@ const packagesAllowed: Partial<Record<Folder, readonly string[]>> = {
     'ml-matrix',
     'ml-levenberg-marquardt',
     '@noble/hashes',
+    'canonicalize',
     'd3-array',
     'd3-contour',
   ],

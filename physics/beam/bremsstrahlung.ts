@@ -61,7 +61,7 @@ export function bremsstrahlung(
     const v = 1 - u;
     const yieldFactor = y0 + u * (y1 + u * (y2 + u * (y3 + u * (y4 + u * y5))));
     const depth = ((range * v) / (d0 + d1 * Math.sqrt(v) + d2 * v)) * Math.exp(l * (e0 + e1 * v));
-    const shape = constant - fourthPower * v ** 4;
+    const shape = constant - fourthPower * v * v * v * v;
     const escapeProbability = (1 + (massAttenuation_cm2_per_g * depth) / (shape * sine)) ** -shape;
     return {
       yieldFactor,

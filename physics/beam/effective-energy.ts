@@ -1,4 +1,4 @@
-import { massAttenuation } from '../../materials/index.js';
+import { massAttenuation, massAttenuationOn } from '../../materials/index.js';
 import { findRoot } from './find-root.js';
 import { soleEnergy_keV } from './fluence.js';
 import { halfValueLayer_mm } from './half-value-layer.js';
@@ -8,6 +8,11 @@ import type { Spectrum } from './spectrum.js';
 // Aluminium attenuates less and less from its K edge (1.6 keV) to 20 MeV, so the answer is unique.
 const lowest_keV = 2;
 const highest_keV = 20_000;
+const nodes = 200;
+const nodeEnergies_keV = Float64Array.from(
+  { length: nodes + 1 },
+  (_, i) => lowest_keV * (highest_keV / lowest_keV) ** (i / nodes),
+);
 
 /**
  * The one photon energy whose half-value layer in aluminium is `halfValueLayer_mmAl`; null outside
@@ -16,8 +21,11 @@ const highest_keV = 20_000;
 export function energyOfHalfValueLayer_keV(halfValueLayer_mmAl: number): number | null {
   const aluminium = referenceMaterial('aluminium');
   const wanted = (10 * Math.LN2) / (halfValueLayer_mmAl * aluminium.density_g_per_cm3);
+  const above = massAttenuationOn(aluminium, nodeEnergies_keV).findIndex((m) => m <= wanted);
+  if (above < 1) return null;
   const excess = (lnE: number) => Math.log(massAttenuation(aluminium, Math.exp(lnE)) / wanted);
-  const lnE = findRoot(excess, Math.log(lowest_keV), Math.log(highest_keV));
+  const [from, to] = [nodeEnergies_keV[above - 1], nodeEnergies_keV[above]];
+  const lnE = findRoot(excess, Math.log(from), Math.log(to), 1e-12);
   return lnE === null ? null : Math.exp(lnE);
 }
 

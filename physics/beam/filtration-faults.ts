@@ -2,8 +2,10 @@ import { elementByZ } from '../../materials/index.js';
 import type { Fault } from '../case/fault.js';
 import { numberText } from '../number-text.js';
 import { aluminiumEquivalent_mm } from './aluminium-equivalent.js';
-import type { MaterialLayer } from './attenuate.js';
+import { attenuate, type MaterialLayer } from './attenuate.js';
+import { halfValueLayer_mm } from './half-value-layer.js';
 import { kEdges_keV } from './k-edges.js';
+import { referenceMaterial } from './reference-materials.js';
 import { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
 
 /** Less filtration than this lets tungsten L lines through, which the model does not have. */
@@ -48,9 +50,13 @@ function filtrationFaults(
   path: string,
 ): Fault[] {
   if (layers.some(isKEdgeFilter)) return [];
-  const equivalent = aluminiumEquivalent_mm(tungstenSpectrum(setting), layers) ?? 0;
-  // The search ends a hair beside 1 mm for 1 mm of aluminium itself.
-  if (equivalent >= leastFiltration_mmAl * (1 - 1e-6)) return [];
+  const aluminium = referenceMaterial('aluminium');
+  const bare = tungstenSpectrum(setting);
+  const least = { material: aluminium, thickness_mm: leastFiltration_mmAl };
+  const reached_mmAl = halfValueLayer_mm(attenuate(bare, layers), aluminium) ?? 0;
+  const needed_mmAl = halfValueLayer_mm(attenuate(bare, [least]), aluminium) ?? 0;
+  if (reached_mmAl >= needed_mmAl) return [];
+  const equivalent = aluminiumEquivalent_mm(bare, layers) ?? 0;
   return [
     {
       path: `${path}.inherentFilter`,

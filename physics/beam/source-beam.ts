@@ -1,9 +1,7 @@
+import { energyAbsorptionLimit_keV } from '../../materials/index.js';
 import type { Source } from '../case/schema.js';
 import { lineSpectrum, monoenergetic } from './line-sources.js';
 import { type SourceBeam, spectrumFromRows } from './user-spectrum.js';
-
-/** Air kerma is known up to here (μen/ρ without bremsstrahlung losses). */
-const highestKermaEnergy_keV = 3000;
 
 /**
  * The beam of a source that stands in for the tube, photons per mm² and mAs at 1 m. Sources without
@@ -31,7 +29,7 @@ export function sourceBeam(
   const spectrum =
     source.kind === 'monoenergetic' ? monoenergetic(source.energy_keV) : lineSpectrum(source.lines);
   const highest_keV = Math.max(...spectrum.energies_keV);
-  if (highest_keV <= highestKermaEnergy_keV) return { spectrum, findings: [] };
+  if (highest_keV <= energyAbsorptionLimit_keV) return { spectrum, findings: [] };
   const path = source.kind === 'monoenergetic' ? 'room.source.energy_keV' : 'room.source.lines';
   return {
     spectrum: null,
@@ -39,10 +37,10 @@ export function sourceBeam(
       {
         code: 'airKermaUnknown',
         severity: 'limit',
-        message: `${path}: ${highest_keV} keV: air kerma is known up to 3000 keV; leave out photons above it.`,
+        message: `${path}: ${highest_keV} keV: air kerma is known up to ${energyAbsorptionLimit_keV} keV; leave out photons above it.`,
         path,
         value: highest_keV,
-        bound: highestKermaEnergy_keV,
+        bound: energyAbsorptionLimit_keV,
       },
     ],
   };

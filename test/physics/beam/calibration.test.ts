@@ -1,0 +1,341 @@
+import { describe, expect, test } from 'vitest';
+import type { MaterialLayer } from '../../../physics/beam/index.js';
+import {
+  airKerma_uGy,
+  airPath,
+  attenuate,
+  calibrate,
+  halfValueLayer_mm,
+  readingFaults,
+  scaleSpectrum,
+  tungstenSpectrum,
+} from '../../../physics/beam/index.js';
+import type { Reading } from '../../../physics/case/schema.js';
+import type { Calibration } from '../../../physics/results.js';
+import { aluminium, copper, expectWithin } from './helpers.js';
+
+const tube = {
+  anodeAngle_deg: 12,
+  ripple_percent: 0,
+  outputFactor: 0.87,
+  inherentFilter: [{ material: 'aluminium', thickness_mm: 2.5 }],
+};
+const filters: ReadonlyMap<string, readonly MaterialLayer[]> = new Map([
+  ['none', []],
+  ['0.2 Cu', [{ material: copper, thickness_mm: 0.2 }]],
+]);
+const vacuum = { air: false };
+
+/** A tube the model does not quite describe: steeper anode, rippling and 1.5 % high in potential. */
+interface Truth {
+  readonly anodeAngle_deg: number;
+  readonly inherent_mmAl: number;
+  readonly potentialError: number;
+  readonly ripple_percent: number;
+  readonly output: number;
+}
+const steep: Truth = {
+  anodeAngle_deg: 16,
+  inherent_mmAl: 3,
+  potentialError: 0.015,
+  ripple_percent: 5,
+  output: 0.8,
+};
+const exact: Truth = { ...steep, anodeAngle_deg: 12, potentialError: 0, ripple_percent: 0 };
+
+function readingOf(
+  truth: Truth,
+  potential_kV: number,
+  filter = 'none',
+  distance_mm = 1000,
+  air = false,
+): Reading {
+  const bare = tungstenSpectrum({
+    potential_kV: potential_kV * (1 + truth.potentialError),
+    anodeAngle_deg: truth.anodeAngle_deg,
+    ripple_percent: truth.ripple_percent,
+  });
+  const behind = attenuate(bare, [
+    { material: aluminium, thickness_mm: truth.inherent_mmAl },
+    ...(filters.get(filter) ?? []),
+    ...(air ? [airPath(distance_mm)] : []),
+  ]);
+  const beam = scaleSpectrum(behind, truth.output * (1000 / distance_mm) ** 2);
+  return {
+    potential_kV,
+    filter,
+    halfValueLayer_mmAl: halfValueLayer_mm(beam, aluminium),
+    airKerma_uGy_per_mAs: airKerma_uGy(beam),
+    distance_mm,
+    relativeUncertainty_percent: 3,
+  };
+}
+
+/** Model over measurement minus one in percent, of a reading the calibration has not seen. */
+function heldOut(calibration: Calibration, reading: Reading) {
+  const again = calibrate(
+    {
+      ...tube,
+      outputFactor: calibration.outputFactor,
+      inherentFilter: [{ material: 'aluminium', thickness_mm: calibration.inherentFilter_mmAl }],
+    },
+    [],
+    filters,
+  );
+  expect(again.inherentFilter_mmAl).toBe(calibration.inherentFilter_mmAl);
+  const bare = tungstenSpectrum({
+    potential_kV: reading.potential_kV,
+    anodeAngle_deg: tube.anodeAngle_deg,
+  });
+  const beam = attenuate(bare, [
+    { material: aluminium, thickness_mm: calibration.inherentFilter_mmAl },
+    ...(filters.get(reading.filter) ?? []),
+  ]);
+  const scale =
+    calibration.outputFactor * (reading.potential_kV / 80) ** calibration.outputExponent;
+  return {
+    layer_percent:
+      100 * ((halfValueLayer_mm(beam, aluminium) ?? 0) / (reading.halfValueLayer_mmAl ?? 0) - 1),
+    output_percent: 100 * ((airKerma_uGy(beam) * scale) / (reading.airKerma_uGy_per_mAs ?? 0) - 1),
+  };
+}
+
+describe('a synthetic room (16°, 3.0 mm Al, kV +1.5 %, 5 % ripple, output ×0.8) read as 12° constant potential', () => {
+  const potentials = [60, 70, 80, 90, 100, 110, 120];
+
+  test('at 80 kV only: half-value layer −1.1 to +1.8 %, output −3.7 to +3.0 % over 60 to 120 kV', () => {
+    const calibration = calibrate(tube, [readingOf(steep, 80)], filters, vacuum);
+    const off = potentials.map((kV) => heldOut(calibration, readingOf(steep, kV)));
+    const layers = off.map(({ layer_percent }) => Number(layer_percent.toFixed(1)));
+    const outputs = off.map(({ output_percent }) => Number(output_percent.toFixed(1)));
+    expect([Math.min(...layers), Math.max(...layers)]).toEqual([-1.1, 1.8]);
+    expect([Math.min(...outputs), Math.max(...outputs)]).toEqual([-3.7, 3.0]);
+    expect(calibration.outputExponent).toBe(0);
+  });
+
+  test('at 60, 80, 100 and 120 kV: half-value layers within 1.5 %, outputs within 0.1 %', () => {
+    const readings = [60, 80, 100, 120].map((kV) => readingOf(steep, kV));
+    const { residuals, findings } = calibrate(tube, readings, filters, vacuum);
+    expect(residuals).toHaveLength(8);
+    for (const { path, quantity, relative_percent } of residuals) {
+      const bound = quantity === 'halfValueLayer_mmAl' ? 1.5 : 0.1;
+      expect(Math.abs(relative_percent), path).toBeLessThanOrEqual(bound);
+    }
+    expect(findings).toEqual([]);
+  });
+
+  test.each([
+    { fitted: [60, 80, 100], held: 120, filter: 'none' },
+    { fitted: [80, 100, 120], held: 60, filter: 'none' },
+    { fitted: [60, 80, 120], held: 100, filter: '0.2 Cu' },
+    { fitted: [80], held: 100, filter: 'none' },
+    { fitted: [80], held: 70, filter: '0.2 Cu' },
+  ])(
+    'a reading at $held kV through $filter is met within 4 % from readings at $fitted kV',
+    ({ fitted, held, filter }) => {
+      const readings = fitted.map((kV) => readingOf(steep, kV));
+      const off = heldOut(
+        calibrate(tube, readings, filters, vacuum),
+        readingOf(steep, held, filter),
+      );
+      expect(Math.abs(off.layer_percent)).toBeLessThanOrEqual(4);
+      expect(Math.abs(off.output_percent)).toBeLessThanOrEqual(4);
+    },
+  );
+});
+
+describe('a room the model describes exactly', () => {
+  test.each([
+    ['one reading', [80]],
+    ['readings at two potentials', [70, 90]],
+    ['readings at four potentials', [60, 80, 100, 120]],
+  ])('is found again from %s', (_, potentials) => {
+    const readings = potentials.map((kV) => readingOf(exact, kV));
+    const { outputFactor, outputExponent, inherentFilter_mmAl, residuals } = calibrate(
+      tube,
+      readings,
+      filters,
+      vacuum,
+    );
+    expectWithin(inherentFilter_mmAl, 3, 1e-4, 't');
+    expectWithin(outputFactor, 0.8, 1e-4, 'g');
+    expect(Math.abs(outputExponent)).toBeLessThan(1e-6);
+    expect(residuals.every(({ relative_percent }) => Math.abs(relative_percent) < 1e-3)).toBe(true);
+  });
+
+  test('is found again through a filter, at another distance and in air', () => {
+    const readings = [readingOf(exact, 90, '0.2 Cu', 650, true)];
+    const { outputFactor, inherentFilter_mmAl, residuals } = calibrate(tube, readings, filters);
+    expectWithin(inherentFilter_mmAl, 3, 1e-4, 't');
+    expectWithin(outputFactor, 0.8, 1e-4, 'g');
+    expect(residuals.map(({ path }) => path)).toEqual([
+      'room.readings[0].halfValueLayer_mmAl',
+      'room.readings[0].airKerma_uGy_per_mAs',
+    ]);
+  });
+
+  test('keeps the entered output when only half-value layers are read', () => {
+    const readings = [{ ...readingOf(exact, 80), airKerma_uGy_per_mAs: null }];
+    const { outputFactor, inherentFilter_mmAl } = calibrate(tube, readings, filters, vacuum);
+    expect(outputFactor).toBe(0.87);
+    expectWithin(inherentFilter_mmAl, 3, 1e-4, 't');
+  });
+
+  test('keeps the entered filtration, as aluminium, when only outputs are read', () => {
+    const readings = [60, 80, 100].map((kV) => ({
+      ...readingOf(exact, kV),
+      halfValueLayer_mmAl: null,
+    }));
+    const entered = { ...tube, inherentFilter: [{ material: 'copper', thickness_mm: 0.1 }] };
+    const { inherentFilter_mmAl, outputExponent } = calibrate(entered, readings, filters, vacuum);
+    expect(inherentFilter_mmAl).toBeGreaterThan(2.5);
+    expect(inherentFilter_mmAl).toBeLessThan(4.5);
+    expect(Number.isFinite(outputExponent)).toBe(true);
+  });
+
+  test('without readings is the tube as entered', () => {
+    expect(calibrate(tube, [], filters)).toEqual({
+      outputFactor: 0.87,
+      outputExponent: 0,
+      inherentFilter_mmAl: 2.5,
+      residuals: [],
+      findings: [],
+    });
+  });
+
+  test('trusts the more certain reading more', () => {
+    const readings = [60, 80, 100, 120].map((kV) => readingOf(exact, kV));
+    const wrong = {
+      ...readings[3],
+      airKerma_uGy_per_mAs: (readings[3].airKerma_uGy_per_mAs ?? 0) * 1.1,
+    };
+    const residualWith = (relativeUncertainty_percent: number) =>
+      calibrate(
+        tube,
+        [...readings.slice(0, 3), { ...wrong, relativeUncertainty_percent }],
+        filters,
+        vacuum,
+      ).residuals.at(-1)?.relative_percent ?? Number.NaN;
+    expect(Math.abs(residualWith(1))).toBeLessThan(Math.abs(residualWith(20)));
+  });
+});
+
+describe('cautions', () => {
+  const codes = (truth: Truth, potentials = [80]) =>
+    calibrate(
+      tube,
+      potentials.map((kV) => readingOf(truth, kV)),
+      filters,
+      vacuum,
+    ).findings.map(({ code }) => code);
+
+  test('inherent filter outside 1.5 to 6 mm Al', () => {
+    expect(codes({ ...exact, inherent_mmAl: 1.2 })).toEqual(['inherentFilterUnusual']);
+    expect(codes({ ...exact, inherent_mmAl: 7 })).toEqual(['inherentFilterUnusual']);
+    expect(codes({ ...exact, inherent_mmAl: 5 })).toEqual([]);
+  });
+
+  test('output outside 0.5 to 1.3 of the model', () => {
+    expect(codes({ ...exact, output: 0.4 })).toEqual(['outputUnusual']);
+    expect(codes({ ...exact, output: 1.5 })).toEqual(['outputUnusual']);
+  });
+
+  test('an output that departs from the model with potential by more than the power 0.3', () => {
+    const readings = [60, 80, 120].map((kV) => {
+      const reading = readingOf(exact, kV);
+      return {
+        ...reading,
+        airKerma_uGy_per_mAs: (reading.airKerma_uGy_per_mAs ?? 0) * (kV / 80) ** 0.5,
+      };
+    });
+    const { findings, outputExponent } = calibrate(tube, readings, filters, vacuum);
+    expectWithin(outputExponent, 0.5, 0.1, 'b');
+    expect(findings.map(({ code }) => code)).toEqual(['outputSlopeUnusual']);
+    expect(findings[0].message).toMatch(/-0.3 to 0.3/);
+  });
+
+  test('a reading that the calibrated model does not meet', () => {
+    const readings = [readingOf(exact, 80), readingOf(exact, 100)];
+    const off = {
+      ...readings[1],
+      halfValueLayer_mmAl: (readings[1].halfValueLayer_mmAl ?? 0) * 1.15,
+    };
+    const { findings } = calibrate(tube, [readings[0], off], filters, vacuum);
+    expect(findings.map(({ code, path }) => [code, path])).toEqual([
+      ['readingNotMet', 'room.readings[1].halfValueLayer_mmAl'],
+    ]);
+  });
+});
+
+describe('readings in the wrong unit are refused with the reason', () => {
+  const good = readingOf(exact, 80);
+  const kerma = good.airKerma_uGy_per_mAs ?? 0;
+  const layer = good.halfValueLayer_mmAl ?? 0;
+
+  test.each([60, 80, 100, 120, 150])('a half-value layer in cm at %f kV', (kV) => {
+    const reading = readingOf(exact, kV);
+    const inCm = { ...reading, halfValueLayer_mmAl: (reading.halfValueLayer_mmAl ?? 0) / 10 };
+    const [fault, ...others] = readingFaults(tube, [inCm], filters, vacuum);
+    expect(others).toEqual([]);
+    expect(fault.path).toBe('room.readings[0].halfValueLayer_mmAl');
+    expect(fault.remedy).toMatch(/read in cm/);
+    expect(fault.remedy).toContain(
+      String(Number((reading.halfValueLayer_mmAl ?? 0).toPrecision(3))),
+    );
+  });
+
+  test.each([
+    ['in mGy/mAs', { airKerma_uGy_per_mAs: kerma / 1000 }, /mGy\/mAs/],
+    ['in mR/mAs', { airKerma_uGy_per_mAs: kerma / 8.76 }, /mR\/mAs/],
+    ['with its distance in cm', { distance_mm: 100 }, /distance in cm/],
+    ['in nGy/mAs', { airKerma_uGy_per_mAs: kerma * 1000 }, /nGy\/mAs/],
+  ])('an output %s', (_, entry, remedy) => {
+    const faults = readingFaults(tube, [{ ...good, ...entry }], filters, vacuum);
+    expect(faults.map(({ path }) => path)).toEqual(['room.readings[0].airKerma_uGy_per_mAs']);
+    expect(faults[0].remedy).toMatch(remedy);
+  });
+
+  test('a filter that the room does not have', () => {
+    const faults = readingFaults(tube, [{ ...good, filter: '0.3 Cu' }], filters, vacuum);
+    expect(faults).toEqual([
+      {
+        path: 'room.readings[0].filter',
+        value: '0.3 Cu',
+        rule: 'must be a filter of the room: none, 0.2 Cu',
+        remedy: 'name one of them, or enter the filter under room.filters',
+      },
+    ]);
+  });
+
+  test('and left out of the calibration, which says so', () => {
+    const wrong = {
+      ...readingOf(exact, 100),
+      halfValueLayer_mmAl: layer / 10,
+      airKerma_uGy_per_mAs: kerma / 1000,
+    };
+    const { outputFactor, inherentFilter_mmAl, residuals, findings } = calibrate(
+      tube,
+      [good, wrong],
+      filters,
+      vacuum,
+    );
+    expectWithin(outputFactor, 0.8, 1e-4, 'g');
+    expectWithin(inherentFilter_mmAl, 3, 1e-4, 't');
+    expect(residuals.every(({ path }) => path.startsWith('room.readings[0].'))).toBe(true);
+    expect(findings.map(({ code, severity, path }) => [code, severity, path])).toEqual([
+      ['readingRefused', 'limit', 'room.readings[1].halfValueLayer_mmAl'],
+      ['readingRefused', 'limit', 'room.readings[1].airKerma_uGy_per_mAs'],
+    ]);
+  });
+
+  test('good readings of any tube from 1 to 8 mm Al have no faults', () => {
+    for (const inherent_mmAl of [1, 2.5, 8]) {
+      for (const filter of filters.keys()) {
+        const readings = [40, 80, 120, 145].map((kV) =>
+          readingOf({ ...steep, inherent_mmAl }, kV, filter),
+        );
+        expect(readingFaults(tube, readings, filters, vacuum)).toEqual([]);
+      }
+    }
+  });
+});

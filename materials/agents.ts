@@ -1,10 +1,15 @@
-import { addMass, makeMaterial } from './composition.js';
 import { type Element, elementBySymbol } from './elements.js';
 import { molarMass_g_per_mol, parseFormula } from './formula.js';
-import type { Material, Provenance } from './material.js';
+import type { Provenance } from './material.js';
 
 /** Units in which an amount of agent may be given, always as it is in the lumen. */
 export type AmountUnit = 'mg element/mL' | 'mg compound/mL' | 'mmol/mL' | '% w/v';
+
+/** An amount of agent as it is in the lumen. */
+export interface Amount {
+  readonly value: number;
+  readonly unit: AmountUnit;
+}
 
 /** How an agent shares the volume with its carrier. */
 export type AgentKind = 'dissolved molecule' | 'suspension' | 'element in carrier' | 'gas';
@@ -64,59 +69,13 @@ export function agent(name: string): Agent | undefined {
   return agents.find((candidate) => candidate.name === name.trim().toLowerCase());
 }
 
-/** An agent in its carrier. `elementConcentration_mg_per_mL` is of the attenuating element z. */
-export interface AgentMixture {
-  readonly agent: Agent;
-  readonly material: Material;
-  readonly z: number;
-  readonly elementConcentration_mg_per_mL: number;
-  /** Share of the volume that the solute takes. */
-  readonly soluteVolumeFraction: number;
-}
-
-/** What `agentMixture` is given. */
-export interface AgentRequest {
-  readonly agent: string;
-  readonly amount: { readonly value: number; readonly unit: AmountUnit };
-  readonly carrier: Material;
-}
-
-/**
- * The material of an agent at an amount in a carrier; volumes add. A gas takes the whole volume and
- * its amount is not used. Throws an Error (value, rule, remedy) on an unknown agent, a negative
- * amount, or one whose solute alone would fill more than the volume.
- */
-export function agentMixture({ agent: name, amount, carrier }: AgentRequest): AgentMixture {
-  const chosen = agent(name);
-  if (!chosen)
-    throw new Error(`agent: "${name}": is not known; choose one of ${agentNames.join(', ')}`);
-  const solute_mg_per_mL =
-    chosen.kind === 'gas' ? 1e3 / chosen.specificVolume_mL_per_g : soluteOf(chosen, amount);
-  const soluteVolumeFraction = (solute_mg_per_mL / 1e3) * chosen.specificVolume_mL_per_g;
-  if (soluteVolumeFraction > 1 + 1e-12) {
-    const most = amount.value / soluteVolumeFraction;
-    throw new Error(
-      `${chosen.name}: ${amount.value} ${amount.unit}: the solute alone would fill ${Math.round(100 * soluteVolumeFraction)} % of the volume, must be at most 100 %; enter at most ${most.toPrecision(3)} ${amount.unit}`,
-    );
-  }
-  return Object.freeze({
-    agent: chosen,
-    material: dissolve(chosen, solute_mg_per_mL, soluteVolumeFraction, carrier),
-    z: chosen.z,
-    elementConcentration_mg_per_mL: solute_mg_per_mL * chosen.elementMassFraction,
-    soluteVolumeFraction,
-  });
-}
-
 /** An amount of an agent in mg of its attenuating element per mL. */
-export function elementConcentration_mg_per_mL(
-  chosen: Agent,
-  amount: { readonly value: number; readonly unit: AmountUnit },
-): number {
-  return soluteOf(chosen, amount) * chosen.elementMassFraction;
+export function elementConcentration_mg_per_mL(chosen: Agent, amount: Amount): number {
+  return compoundConcentration_mg_per_mL(chosen, amount) * chosen.elementMassFraction;
 }
 
-function soluteOf(chosen: Agent, { value, unit }: AgentRequest['amount']): number {
+/** An amount of an agent in mg of the compound per mL; throws on a negative amount or unknown unit. */
+export function compoundConcentration_mg_per_mL(chosen: Agent, { value, unit }: Amount): number {
   if (!(value >= 0 && value < Infinity)) {
     throw new Error(
       `${chosen.name}: ${value} ${unit}: must be 0 or positive; enter the amount as it is in the lumen`,
@@ -136,33 +95,6 @@ function soluteOf(chosen: Agent, { value, unit }: AgentRequest['amount']): numbe
         `${chosen.name}: unit "${String(unit)}": is not known; use mg element/mL, mg compound/mL, mmol/mL or % w/v`,
       );
   }
-}
-
-function dissolve(
-  chosen: Agent,
-  solute_mg_per_mL: number,
-  soluteVolumeFraction: number,
-  carrier: Material,
-): Material {
-  const carrierMass = (1 - soluteVolumeFraction) * carrier.density_g_per_cm3;
-  const soluteMass = solute_mg_per_mL / 1e3;
-  const massByZ = new Map<number, number>();
-  if (carrierMass > 1e-15) addMass(massByZ, carrier, carrierMass);
-  for (const [element, n] of parseFormula(chosen.formula)) {
-    const mass = (soluteMass * n * element.atomicWeight_g_per_mol) / chosen.molarMass_g_per_mol;
-    massByZ.set(element.z, (massByZ.get(element.z) ?? 0) + mass);
-  }
-  return makeMaterial({
-    name: chosen.kind === 'gas' ? chosen.name : `${chosen.name} in ${carrier.name}`,
-    density_g_per_cm3: carrierMass + soluteMass,
-    massByZ,
-    family: chosen.kind === 'gas' ? 'gas' : 'agent',
-    source:
-      chosen.kind === 'gas'
-        ? chosen.source
-        : `${chosen.source}; carrier ${carrier.name}: ${carrier.source}`,
-    provenance: 'computed',
-  });
 }
 
 function makeAgent(

@@ -38,7 +38,7 @@ export function comptonEnergyFraction(z: number, energy_keV: number): number {
 
 const fractionCurves = new Map<number, HermiteCurve>();
 const fractionNodes = 49;
-const angleSteps = 96;
+const angleSteps = 128;
 
 function buildFractionCurve(z: number): HermiteCurve {
   const from = Math.log(tabulatedEnergies_keV.min);

@@ -1,4 +1,4 @@
-import { elementTableOf, type VacancyData } from './element-tables.js';
+import { type EdgeData, elementTableOf, type VacancyData } from './element-tables.js';
 import { kept } from './kept.js';
 import { shellNames } from './shells.js';
 
@@ -113,8 +113,12 @@ function totalRate(vacancy: VacancyData): number {
 }
 
 // K, L1, L2, L3 edges, innermost first.
-function innerEdges(z: number) {
-  return elementTableOf(z)
-    .edges.filter(({ shell }) => shell < 4)
-    .sort((a, b) => a.shell - b.shell);
+function innerEdges(z: number): readonly EdgeData[] {
+  return kept(innerEdgesOf, z, () =>
+    elementTableOf(z)
+      .edges.filter(({ shell }) => shell < 4)
+      .sort((a, b) => a.shell - b.shell),
+  );
 }
+
+const innerEdgesOf = new Map<number, readonly EdgeData[]>();

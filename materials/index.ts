@@ -1,14 +1,15 @@
-/** What matter does to photons: elements, materials, agents, coefficients. In order of use. */
+/** What matter does to photons, from the constants to the coefficients of a mixture. */
 
+export { type AgentMixture, type AgentRequest, agentMixture } from './agent-mixture.js';
+// Agents in their carriers
 export {
   type Agent,
   type AgentKind,
-  type AgentMixture,
-  type AgentRequest,
+  type Amount,
   type AmountUnit,
   agent,
-  agentMixture,
   agentNames,
+  compoundConcentration_mg_per_mL,
   elementConcentration_mg_per_mL,
 } from './agents.js';
 export {
@@ -21,9 +22,12 @@ export {
   partialCoefficients,
   partialCoefficientsOn,
 } from './attenuation.js';
+// Constants and the arithmetic everything shares
 export * from './constants.js';
+// Attenuation and energy absorption
 export { type AbsorptionEdge, absorptionEdges } from './edges.js';
 export { type PartialCoefficients, tabulatedEnergies_keV } from './element-coefficients.js';
+// Elements and formulas
 export { type Element, elementBySymbol, elementByZ, elements } from './elements.js';
 export { comptonEnergyFraction, energyAbsorptionLimit_keV } from './energy-absorption.js';
 export { type FluorescenceLine, type KShell, kShell } from './fluorescence.js';
@@ -35,7 +39,9 @@ export {
   naturalSpline,
 } from './interpolation.js';
 export { kept } from './kept.js';
+// Scattering and fluorescence
 export { comptonEnergyRatio, kleinNishinaShape } from './klein-nishina.js';
+// Materials
 export * from './material.js';
 export {
   compound,
@@ -45,6 +51,7 @@ export {
   mixture,
 } from './mixture.js';
 export { materialNames, namedMaterial } from './named-materials.js';
+
 export {
   atoms_per_g,
   electronDensity_per_cm3,

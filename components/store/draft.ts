@@ -1,5 +1,5 @@
-import type { Case } from '../../physics/case/schema.js';
-import type { Fault } from '../../physics/case/fault.js';
+import type { Case, Fault } from '../../physics/case/index.js';
+
 import { type Json, valueAtPath } from './path.js';
 
 /**

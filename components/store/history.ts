@@ -3,7 +3,7 @@ export interface History<T> {
   readonly past: readonly T[];
   readonly present: T;
   readonly future: readonly T[];
-  /** What the last step changed, and when; equal keys in quick succession make one step. */
+  /** What the last step edited, and when; edits of one thing in quick succession make one step. */
   readonly lastKey: string | null;
   readonly lastTime_ms: number;
 }
@@ -19,10 +19,13 @@ export const historyOf = <T>(present: T): History<T> => ({
   lastTime_ms: Number.NEGATIVE_INFINITY,
 });
 
-/** `present` replaced by `next`; what was undone before is given up. */
-export function record<T>(history: History<T>, next: T, key: string, now_ms: number): History<T> {
-  const joins =
-    history.lastKey === key && now_ms - history.lastTime_ms < together_ms && history.past.length > 0;
+/**
+ * `present` replaced by `next`; what was undone before is given up. A step without a key (null)
+ * stands by itself.
+ */
+export function record<T>(history: History<T>, next: T, key: string | null, now_ms: number): History<T> {
+  const soon = now_ms - history.lastTime_ms < together_ms && history.past.length > 0;
+  const joins = key !== null && history.lastKey === key && soon;
   return {
     past: joins ? history.past : [...history.past, history.present],
     present: next,

@@ -1,9 +1,10 @@
 import { agent } from '../../../materials/index.js';
 import type { Case } from '../../../physics/case/schema.js';
 import type { DoseCurveData } from '../../charts/dose-curve.js';
+import { limitName } from '../../charts/limit-names.js';
 import { type Quantity, quantity } from '../../charts/quantities.js';
 import { evaluationOf, sizeShown, type DeskModel } from '../model/desk-model.js';
-import type { ScanPoint } from './scan-point.js';
+import type { ScanPoint } from '../../workers/scan-slice.js';
 
 const valueIds: Record<Case['compare']['leading'], string> = {
   sdnr: 'sdnr',
@@ -39,7 +40,7 @@ export function curveData(model: DeskModel, scan: readonly ScanPoint[], holdCons
         const shows = value.of(point.evaluation);
         return cost === null || shows === null
           ? []
-          : [{ potential_kV: point.potential_kV, dose: cost, value: shows, forbidden: point.forbidden }];
+          : [{ potential_kV: point.potential_kV, dose: cost, value: shows, forbidden: point.forbidden && limitName(point.forbidden) }];
       }),
   }));
   const marks = shown.flatMap((index) => {

@@ -6,7 +6,7 @@ import { formatNumber } from '../../charts/format.js';
 import { sizeShown, type DeskModel } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { curveAxes, curveData } from './curve-data.js';
-import type { ScanPoint } from './scan-point.js';
+import type { ScanPoint } from '../../workers/scan-slice.js';
 import '../fields/choice-field.js';
 
 const values = [
@@ -34,7 +34,7 @@ export const holds = [
  *
  * Shows: one line per filter, both techniques, the Rose line, limits; a reading of every line at
  * one potential; the same figures as a table.
- * Properties: `model`, `scan` (null until the first answer), `hold`, `width`, `height`.
+ * Properties: `model`, `scan` (null until the first answer), `stale`, `hold`, `width`, `height`.
  * Events: `case-edit` (axes), `choose-hold` with the new condition.
  * Keyboard: the slider below the plot steps potential; the pointer over the plot does the same.
  * Parts: none.
@@ -44,6 +44,7 @@ export class CurvePanel extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
   @property({ attribute: false }) scan: readonly ScanPoint[] | null = null;
   @property() hold = 'detectorAirKerma';
+  @property({ type: Boolean }) stale = false;
   @property({ type: Number }) width = 360;
   @property({ type: Number }) height = 250;
   @state() private cursor_kV: number | null = null;
@@ -127,7 +128,7 @@ export class CurvePanel extends LitElement {
         )}</select></label>, size ${sizeShown(model).name}</p>
       ${scan === null
         ? html`<p class="waiting" style="height:${this.height}px">computing …</p>`
-        : html`<div class=${model.stale ? 'stale' : ''}>${doseCurve(data, { width: this.width, height: this.height }, this.cursor_kV)}</div>
+        : html`<div class=${this.stale ? 'stale' : ''}>${doseCurve(data, { width: this.width, height: this.height }, this.cursor_kV)}</div>
             <label class="reader"><span>read at</span>
               <input type="range" min=${from} max=${to} step="1" .value=${String(this.cursor_kV ?? model.draft.case.techniques[model.left].potential_kV)}
                 aria-valuetext="${this.cursor_kV ?? ''} kV" @input=${(event: Event) => {

@@ -6,8 +6,8 @@ import type { CaseEdit } from '../fields/case-edit.js';
 export const layerEdits = {
   thickness:
     (index: number) =>
-    (value: Json): CaseEdit => ({ key: `layer ${index} thickness`, change: setLayerThickness(index, value) }),
-  move: (index: number, by: -1 | 1): CaseEdit => ({ key: `move layer ${index} ${by}`, change: moveLayer(index, by) }),
-  remove: (index: number): CaseEdit => ({ key: `remove layer ${index}`, change: removeLayer(index) }),
-  add: (below: number): CaseEdit => ({ key: `add layer ${below}`, change: addLayer(below) }),
+    (value: Json): CaseEdit => ({ joins: `layer ${index} thickness`, change: setLayerThickness(index, value) }),
+  move: (index: number, by: -1 | 1): CaseEdit => ({ change: moveLayer(index, by) }),
+  remove: (index: number): CaseEdit => ({ change: removeLayer(index) }),
+  add: (below: number): CaseEdit => ({ change: addLayer(below) }),
 };

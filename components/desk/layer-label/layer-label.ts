@@ -45,9 +45,9 @@ export class LayerLabel extends LitElement {
     const layer = draft.case.patient.layers[this.index];
     const path = `patient.layers[${this.index}]`;
     const grown = Math.abs(this.thickness_mm - layer.thickness_mm) > 0.05;
-    return html`<choice-field inline .draft=${draft} path="${path}.material" label="Material of layer ${layer.name}"
+    return html`<choice-field data-field inline .draft=${draft} path="${path}.material" label="Material of layer ${layer.name}"
         .choices=${materialChoices(draft)}></choice-field>
-      <number-field inline .draft=${draft} path="${path}.thickness_mm" label="Thickness of layer ${layer.name}" unit="mm"
+      <number-field data-field inline .draft=${draft} path="${path}.thickness_mm" label="Thickness of layer ${layer.name}" unit="mm"
         .edit=${layerEdits.thickness(this.index)}></number-field>
       ${grown ? html`<span class="grown">${formatNumber(this.thickness_mm, 4)} at this size</span>` : nothing}`;
   }

@@ -1,49 +1,117 @@
-import { LitElement, html } from 'lit';
-import { customElement, property } from 'lit/decorators.js';
+import { LitElement, html, nothing } from 'lit';
+import { customElement, property, query } from 'lit/decorators.js';
+import type { Fault } from '../../../physics/case/index.js';
 import type { Finding } from '../../../physics/results.js';
-import type { ScanPoint } from '../curve-panel/scan-point.js';
+import type { DetailSpectra } from '../../workers/detail-spectra.js';
+import type { ScanPoint } from '../../workers/scan-slice.js';
+import type { DeskCommand } from '../desk-header/desk-header.js';
+import type { ExplainCard } from '../explain-card/explain-card.js';
+import type { ExplainRequest } from '../figure-value/figure-value.js';
 import { comparisonOf, evaluationOf, type DeskModel } from '../model/desk-model.js';
+import type { Paper } from './paper.js';
+import { sectionInView } from './section-in-view.js';
 import '../beam-path/beam-path.js';
 import '../caution-footer/caution-footer.js';
 import '../comparison-table/comparison-table.js';
 import '../curve-panel/curve-panel.js';
 import '../desk-header/desk-header.js';
+import '../explain-card/explain-card.js';
+import '../fault-list/fault-list.js';
 import '../finding-list/finding-list.js';
+
+/** The sections of the working paper that are built, in their order. */
+export const sections = [
+  { id: 'room', name: 'Room' },
+  { id: 'patient', name: 'Patient' },
+  { id: 'task', name: 'Task' },
+  { id: 'techniques', name: 'Techniques' },
+  { id: 'balance', name: 'Balance' },
+] as const;
 
 /**
  * The arrangement of the desk: head, beam path, margin with curve, table and findings, the working
  * paper below, cautions. Lives in the page itself, not in a shadow, so that sections have addresses.
  *
- * Properties: `model`, `scan`, `hold` and what the header shows. Events: those of what it holds.
+ * Properties: `model` (nothing is drawn before it is set), `scan`, `spectra`, `hold`, and what the
+ * head shows: `examples`, `canUndo`, `canRedo`, `status`, `paper`; `refused` (a file not opened and
+ * why), `trouble` (why there is no answer). Events: `case-edit`, `command`, `example`,
+ * `choose-size`, `choose-hold`, `show-technique` from what it holds.
  */
 @customElement('desk-page')
 export class DeskPage extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
   @property({ attribute: false }) scan: readonly ScanPoint[] | null = null;
+  @property({ attribute: false }) spectra: DetailSpectra | null = null;
+  @property({ type: Boolean }) curveStale = false;
   @property() hold = 'detectorAirKerma';
+  @property({ attribute: false }) examples: readonly string[] = [];
+  @property({ type: Boolean }) canUndo = false;
+  @property({ type: Boolean }) canRedo = false;
+  @property() status = '';
+  @property() paper: Paper = 'auto';
+  @property({ attribute: false }) refused: { heading: string; faults: readonly Fault[] } | null = null;
+  @property() trouble = '';
+  @property() here = '';
+  @query('explain-card') private card!: ExplainCard;
+
+  private stopWatching: () => void = () => undefined;
 
   protected override createRenderRoot() {
     return this;
   }
 
+  override connectedCallback() {
+    super.connectedCallback();
+    this.addEventListener('explain', (event: CustomEvent<ExplainRequest>) => {
+      this.card.show(event.detail, event.composedPath()[0] as HTMLElement);
+    });
+  }
+
+  protected override firstUpdated() {
+    this.stopWatching = sectionInView(this, (id) => {
+      this.here = id;
+    });
+  }
+
+  override disconnectedCallback() {
+    super.disconnectedCallback();
+    this.stopWatching();
+  }
+
   private findings(): Finding[] {
     const { model } = this;
-    const comparison = comparisonOf(model);
     return [
       ...(evaluationOf(model, model.left)?.findings ?? []),
       ...(evaluationOf(model, model.right)?.findings ?? []),
-      ...(comparison?.rows.flatMap((row) => row.findings) ?? []),
+      ...(comparisonOf(model)?.rows.flatMap((row) => row.findings) ?? []),
       ...(model.weighing?.findings ?? []),
     ];
   }
 
+  private head() {
+    const { faults } = this.model.draft;
+    const count = faults.length === 1 ? 'One fault stands' : `${faults.length} faults stand`;
+    return html`<div class="head">
+      <desk-header .model=${this.model} .sections=${sections} .here=${this.here} .examples=${this.examples}
+        .canUndo=${this.canUndo} .canRedo=${this.canRedo} .status=${this.status} .paper=${this.paper}></desk-header>
+      ${this.refused
+        ? html`<fault-list closable .heading=${this.refused.heading} .faults=${this.refused.faults} @close=${() => {
+            this.refused = null;
+          }}></fault-list>`
+        : nothing}
+      <fault-list .heading="${count}; results use the last good values in their place" .faults=${faults}></fault-list>
+      ${this.trouble ? html`<p class="trouble" role="alert">${this.trouble}</p>` : nothing}
+    </div>`;
+  }
+
   override render() {
     const { model } = this;
-    return html`<desk-header .model=${model}></desk-header>
+    if (!model) return nothing;
+    return html`${this.head()}
       <main>
         <beam-path .model=${model}></beam-path>
         <aside class="margin" aria-label="Balance and findings">
-          <curve-panel .model=${model} .scan=${this.scan} .hold=${this.hold}></curve-panel>
+          <curve-panel .model=${model} .scan=${this.scan} .hold=${this.hold} ?stale=${this.curveStale}></curve-panel>
           <div>
             <comparison-table .model=${model}></comparison-table>
             <finding-list .findings=${this.findings()} ?stale=${model.stale}></finding-list>
@@ -51,12 +119,20 @@ export class DeskPage extends LitElement {
         </aside>
         <div class="sections"></div>
       </main>
-      <caution-footer></caution-footer>`;
+      <caution-footer></caution-footer>
+      <explain-card></explain-card>`;
   }
 }
 
 declare global {
   interface HTMLElementTagNameMap {
     'desk-page': DeskPage;
+  }
+  interface HTMLElementEventMap {
+    command: CustomEvent<DeskCommand>;
+    example: CustomEvent<string>;
+    'choose-size': CustomEvent<string>;
+    'choose-hold': CustomEvent<string>;
+    'show-technique': CustomEvent<number>;
   }
 }

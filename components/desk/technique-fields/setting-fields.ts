@@ -19,7 +19,7 @@ export function techniqueName(model: DeskModel, technique: number): TemplateResu
   };
   return html`<h2 class="technique">
       <text-field inline .draft=${model.draft} path="techniques[${technique}].name" label="Name of technique ${technique + 1}"
-        .edit=${(name: string) => ({ key: `rename ${technique}`, change: renameTechnique(technique, name) })}></text-field>
+        .edit=${(name: string) => ({ change: renameTechnique(technique, name) })}></text-field>
     </h2>
     ${choosable
       ? html`<label class="switch">shown <select @change=${choose}>${techniques.map((entry, i) =>

@@ -1,4 +1,4 @@
-import type { ScanPoint } from '../../../components/desk/curve-panel/scan-point.js';
+import type { ScanPoint } from '../../../components/workers/scan-slice.js';
 import { sampleWeighing } from './weighing.js';
 
 /** Smooth invented curves with the look of real ones. */

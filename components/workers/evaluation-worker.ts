@@ -1,0 +1,4 @@
+import { expose } from 'comlink';
+import { evaluationHost } from './evaluation-host.js';
+
+expose(evaluationHost());

@@ -1,0 +1,58 @@
+import { type Remote, wrap } from 'comlink';
+import type { ParsedCase } from '../../physics/case/index.js';
+import type { Weighing } from '../../physics/results.js';
+import type { DetailSpectra } from './detail-spectra.js';
+import type { EvaluationHost, ScanRequest } from './evaluation-host.js';
+import type { ScanPoint } from './scan-slice.js';
+
+/** The evaluation worker as async functions. Every promise settles, also when the worker dies. */
+export interface Evaluator {
+  readonly load: (parsed: ParsedCase) => Promise<void>;
+  readonly weigh: () => Promise<Weighing>;
+  readonly scan: (request: ScanRequest) => Promise<ScanPoint[]>;
+  readonly spectra: (size: string) => Promise<DetailSpectra>;
+  readonly end: () => void;
+}
+
+/** The worker stopped: out of memory, or its script could not be had. */
+export class WorkerLost extends Error {}
+
+/**
+ * Starts the worker that `make` gives, and another one whenever one is lost. Calls under way when
+ * it is lost reject with `WorkerLost`; the case must then be loaded again.
+ */
+export function startEvaluator(make: () => Worker): Evaluator {
+  let worker: Worker | null = null;
+  let remote: Remote<EvaluationHost> | null = null;
+  const pending = new Set<(error: Error) => void>();
+
+  const lose = (message: string) => {
+    worker?.terminate();
+    worker = null;
+    remote = null;
+    // Comlink's promises never settle after this, so ours reject in their place.
+    for (const reject of pending) reject(new WorkerLost(message));
+    pending.clear();
+  };
+  const host = (): Remote<EvaluationHost> => {
+    if (remote) return remote;
+    worker = make();
+    worker.addEventListener('error', (event) => lose(event.message || 'the worker could not start'));
+    worker.addEventListener('messageerror', () => lose('the worker’s answer could not be read'));
+    remote = wrap<EvaluationHost>(worker);
+    return remote;
+  };
+  const ask = <T>(call: (to: Remote<EvaluationHost>) => Promise<T>): Promise<T> =>
+    new Promise((resolve, reject) => {
+      pending.add(reject);
+      call(host()).then(resolve, reject).finally(() => pending.delete(reject));
+    });
+
+  return {
+    load: (parsed) => ask((to) => to.load(parsed)),
+    weigh: () => ask((to) => to.weigh()),
+    scan: (request) => ask((to) => to.scan(request)),
+    spectra: (size) => ask((to) => to.spectra(size)),
+    end: () => lose('the evaluator was ended'),
+  };
+}

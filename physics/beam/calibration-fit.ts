@@ -1,4 +1,5 @@
 import { levenbergMarquardt } from 'ml-levenberg-marquardt';
+import { meanEnergy_keV } from './fluence.js';
 import { inherentFor, type ModelledReading, modelledValues } from './reading-model.js';
 
 /** Potential at which the output scale is anchored: ln g = ln outputFactor + b ln(kV/80). */
@@ -84,10 +85,13 @@ export const outputFactorAt_kV = (fit: TubeFit, potential_kV: number): number =>
 const potentialCount = (readings: readonly ModelledReading[]): number =>
   new Set(readings.map(({ reading }) => reading.potential_kV)).size;
 
+/** The reading nearest 80 kV; of several the softest beam, which shows the inherent filter best. */
 function nearestAnchor(readings: readonly ModelledReading[]): ModelledReading | undefined {
-  const distance = ({ reading }: ModelledReading) =>
+  const away = ({ reading }: ModelledReading) =>
     Math.abs(reading.potential_kV - anchorPotential_kV);
-  return readings.toSorted((a, b) => distance(a) - distance(b))[0];
+  return readings.toSorted(
+    (a, b) => away(a) - away(b) || meanEnergy_keV(a.beam) - meanEnergy_keV(b.beam),
+  )[0];
 }
 
 function meetAtAnchor(

@@ -25,7 +25,8 @@ export {
 
 // The room's own tube.
 
-export { type CalibrationOptions, calibrate, readingFaults } from './calibrate.js';
+export type { CalibrationOptions } from './believed-readings.js';
+export { calibrate, readingFaults } from './calibrate.js';
 export { beamFaults } from './filtration-faults.js';
 
 // What stands in the way.

@@ -3,8 +3,12 @@ import type { Fault } from '../case/fault.js';
 import { numberText } from '../number-text.js';
 import { type ModelledReading, modelledValues } from './reading-model.js';
 
-/** A half-value layer is believed between those of this much and this much inherent aluminium. */
+/**
+ * A half-value layer is believed between those of this much and this much inherent aluminium, and
+ * beyond them by this factor: behind a thick added filter the inherent filter hardly shows.
+ */
 const believedInherent_mmAl = [0.5, 25] as const;
+const believedBeyond = 1.25;
 /** An output is believed between these output scales; a real tube lies within 0.5 to 1.3. */
 const believedOutputFactor = [0.15, 5] as const;
 /** What a mistaken unit must bring the output scale to, to be named as the likely cause. */
@@ -25,9 +29,10 @@ const outputMistakes = [
 export function halfValueLayerFault(modelled: ModelledReading): Fault | null {
   const value = modelled.reading.halfValueLayer_mmAl;
   if (value === null) return null;
-  const [least, most] = believedInherent_mmAl.map(
+  const [thin, thick] = believedInherent_mmAl.map(
     (inherent) => modelledValues(modelled, inherent).halfValueLayer_mmAl,
   );
+  const [least, most] = [thin / believedBeyond, thick * believedBeyond];
   if (within(value, [least, most])) return null;
   const meant = [value * 10, value / 10].find((v) => within(v, [least, most]));
   return {

@@ -174,6 +174,14 @@ describe('a room the model describes exactly', () => {
     ]);
   });
 
+  test('meets the unfiltered reading where a filtered one stands at the same potential', () => {
+    const soft = readingOf(exact, 80);
+    const hard = readingOf(exact, 80, '0.2 Cu');
+    const off = { ...hard, halfValueLayer_mmAl: (hard.halfValueLayer_mmAl ?? 0) * 1.03 };
+    const { inherentFilter_mmAl } = calibrate(tube, [off, soft], filters, vacuum);
+    expectWithin(inherentFilter_mmAl, 3, 1e-4, 't');
+  });
+
   test('keeps the entered output when only half-value layers are read', () => {
     const readings = [{ ...readingOf(exact, 80), airKerma_uGy_per_mAs: null }];
     const { outputFactor, inherentFilter_mmAl } = calibrate(tube, readings, filters, vacuum);

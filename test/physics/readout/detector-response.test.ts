@@ -102,9 +102,9 @@ describe('escape of a photon born in a slab', () => {
         fc.double({ min: 0, max: 1e5, noNaN: true }),
         fc.double({ min: 0, max: 1e4, noNaN: true }),
         (depth, lineDepth) => {
-          const escape = slabEscape(depth, lineDepth);
-          expect(escape).toBeGreaterThanOrEqual(0);
-          expect(escape).toBeLessThanOrEqual(1 + 1e-12);
+          const probability = slabEscape(depth, lineDepth);
+          expect(probability).toBeGreaterThanOrEqual(0);
+          expect(probability).toBeLessThanOrEqual(1 + 1e-12);
         },
       ),
     );

@@ -55,4 +55,5 @@ export {
   tenthValueLayer_mm,
 } from './half-value-layer.js';
 export { idealSnrSquaredPerAirKerma_per_mm2_uGy } from './ideal-snr.js';
+export { type SpectrumRow, spectrumRows } from './spectrum-rows.js';
 export { type ValueLayers, valueLayer_mm, valueLayers } from './value-layer.js';

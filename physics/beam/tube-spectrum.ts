@@ -43,7 +43,7 @@ const spectraKept = 256;
  * modelled, so at least 1 mm aluminium equivalent must follow (filtration-faults.ts). Uncertainty of
  * the output ±10 % from the model and ±30 % from tube to tube until calibrated.
  *
- * @throws RangeError outside 20 to 150 kV or 6 to 22°
+ * @throws RangeError outside 20 to 150 kV or 6 to 22°, or for a grid that ends below the potential
  */
 export function tungstenSpectrum(setting: TubeSetting): Spectrum {
   const { potential_kV, anodeAngle_deg, ripple_percent = 0, outputFactor = 1 } = setting;
@@ -54,6 +54,9 @@ export function tungstenSpectrum(setting: TubeSetting): Spectrum {
     throw new RangeError(`anode angle ${anodeAngle_deg}°: must be 6 to 22`);
   }
   const grid = setting.grid ?? energyGrid(potential_kV, setting.extraEdges_keV);
+  if (!(grid.potential_kV >= potential_kV)) {
+    throw new RangeError(`grid to ${grid.potential_kV} keV: must reach ${potential_kV} kV`);
+  }
   const bare = bareFluence({ grid, potential_kV, anodeAngle_deg, ripple_percent });
   return {
     edges_keV: grid.edges_keV,

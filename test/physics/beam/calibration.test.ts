@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import type { MaterialLayer } from '../../../physics/beam/index.js';
 import {
@@ -226,6 +227,35 @@ describe('a room the model describes exactly', () => {
       ).residuals.at(-1)?.relative_percent ?? Number.NaN;
     expect(Math.abs(residualWith(1))).toBeLessThan(Math.abs(residualWith(20)));
   });
+});
+
+test('any readings, however wrong, end in a finite calibration or a refusal', () => {
+  const anyReading = fc.record({
+    potential_kV: fc.double({ min: 20, max: 150, noNaN: true }),
+    filter: fc.constantFrom('none', '0.2 Cu', 'not there'),
+    halfValueLayer_mmAl: fc.option(fc.double({ min: 1e-3, max: 50, noNaN: true })),
+    airKerma_uGy_per_mAs: fc.option(fc.double({ min: 1e-6, max: 1e5, noNaN: true })),
+    distance_mm: fc.double({ min: 100, max: 10_000, noNaN: true }),
+    relativeUncertainty_percent: fc.double({ min: 1e-3, max: 100, noNaN: true }),
+  });
+  fc.assert(
+    fc.property(fc.array(anyReading, { maxLength: 6 }), fc.boolean(), (readings, air) => {
+      const calibration = calibrate(tube, readings, filters, { air });
+      const { outputFactor, outputExponent, inherentFilter_mmAl, residuals } = calibration;
+      const values = residuals.flatMap(({ model, relative_percent }) => [model, relative_percent]);
+      for (const value of [outputFactor, outputExponent, inherentFilter_mmAl, ...values]) {
+        expect(Number.isFinite(value)).toBe(true);
+      }
+      expect(outputFactor).toBeGreaterThan(0);
+      expect(inherentFilter_mmAl).toBeGreaterThanOrEqual(0);
+      const entered = readings.flatMap((r) => [r.halfValueLayer_mmAl, r.airKerma_uGy_per_mAs]);
+      const refused = calibration.findings.filter(({ code }) => code === 'readingRefused');
+      const given = entered.filter((value) => value !== null).length;
+      expect(residuals.length).toBeLessThanOrEqual(given);
+      if (residuals.length < given) expect(refused.length).toBeGreaterThan(0);
+    }),
+    { numRuns: 40 },
+  );
 });
 
 describe('cautions', () => {

@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import {
   airKerma_uGy,
+  halfValueLayer_mm,
   lineSpectrum,
   monoenergetic,
   rescaleToAirKerma,
@@ -9,10 +10,11 @@ import {
   sourceBeam,
   spectrumFromCsv,
   spectrumFromRows,
+  spectrumRows,
   totalFluence_per_mm2,
 } from '../../../physics/beam/index.js';
 import { rebin } from '../../../physics/beam/rebin.js';
-import { expectWithin, tubeBeam } from './helpers.js';
+import { aluminium, expectWithin, tubeBeam } from './helpers.js';
 
 describe('gamma lines', () => {
   test('stand at their exact energies, ascending, equal ones added', () => {
@@ -149,6 +151,31 @@ describe("a user's own spectrum", () => {
     const { spectrum, badRows } = spectrumFromCsv(text, 60);
     expect(spectrum && totalFluence_per_mm2(spectrum)).toBeCloseTo(2 * 1.5 + 2 * 2.5, 9);
     expect(badRows).toEqual([{ line: 3, reason: 'fluence: x: is not a number' }]);
+  });
+});
+
+describe('a spectrum as rows', () => {
+  test('holds every photon of a tube beam, its lines included, and reads back as the same beam', () => {
+    const beam = tubeBeam(100, 12, 2.5);
+    const rows = spectrumRows(beam);
+    const photons = rows.reduce((sum, row, i) => {
+      const width_keV = beam.edges_keV[i + 1] - beam.edges_keV[i];
+      return sum + row.fluence_per_mm2_per_keV_per_mAs * width_keV;
+    }, 0);
+    expectWithin(photons, totalFluence_per_mm2(beam), 1e-9, 'photons');
+    const text = [
+      'energy_keV,fluence_per_mm2_per_keV_per_mAs',
+      ...rows.map((row) => `${row.energy_keV},${row.fluence_per_mm2_per_keV_per_mAs}`),
+    ].join('\n');
+    const { spectrum, badRows } = spectrumFromCsv(text, 100);
+    expect(badRows).toEqual([]);
+    expectWithin(spectrum && airKerma_uGy(spectrum), airKerma_uGy(beam), 0.2, 'air kerma');
+    expectWithin(
+      spectrum && halfValueLayer_mm(spectrum, aluminium),
+      halfValueLayer_mm(beam, aluminium) ?? Number.NaN,
+      0.2,
+      'HVL1',
+    );
   });
 });
 

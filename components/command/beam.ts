@@ -1,13 +1,14 @@
 import { Command } from 'commander';
+import { beamFaults } from '../../physics/beam/filtration-faults.js';
 import {
   airPath,
-  aluminiumEquivalent_mm,
   attenuate,
   beamQuality,
   kEdges_keV,
   type MaterialLayer,
   type Spectrum,
   scaleSpectrum,
+  type TubeSetting,
   tungstenSpectrum,
 } from '../../physics/beam/index.js';
 import { defaults } from '../../physics/case/index.js';
@@ -33,8 +34,6 @@ interface BeamOptions extends Format {
 }
 
 const tube = defaults.room.tube;
-/** Below this the tungsten L lines, which are not modelled, would reach the point. */
-const leastFiltration_mmAl = 1;
 
 /** `beam`: spectrum and quality of one tube beam at a point on its axis. */
 export const beamCommand = (io: Io): Command =>
@@ -97,30 +96,34 @@ const beamAtPoint = (options: BeamOptions, layers: readonly MaterialLayer[]): Sp
   const slabs_mm = layers.reduce((sum, layer) => sum + layer.thickness_mm, 0);
   const air_mm = options.air ? Math.max(0, options.distance - slabs_mm) : 0;
   const inTheWay = [...layers, airPath(air_mm)];
-  const unfiltered = tungstenSpectrum({
+  const setting = {
     potential_kV: options.potential,
     anodeAngle_deg: options.anodeAngle,
     ripple_percent: options.ripple,
     outputFactor: options.outputFactor,
     extraEdges_keV: kEdges_keV(layers.map(({ material }) => material)),
-  });
-  checkFiltration(unfiltered, inTheWay, options.through ?? []);
-  return scaleSpectrum(attenuate(unfiltered, inTheWay), (1000 / options.distance) ** 2);
+  };
+  checkFiltration(setting, inTheWay, options.through ?? []);
+  return scaleSpectrum(
+    attenuate(tungstenSpectrum(setting), inTheWay),
+    (1000 / options.distance) ** 2,
+  );
 };
 
 const checkFiltration = (
-  unfiltered: Spectrum,
+  setting: TubeSetting,
   layers: readonly MaterialLayer[],
   through: readonly string[],
 ): void => {
-  const equivalent_mm = aluminiumEquivalent_mm(unfiltered, layers);
-  if (equivalent_mm === null || equivalent_mm >= leastFiltration_mmAl - 1e-9) return;
-  refuse(
-    '--through',
-    through.length === 0 ? 'nothing' : through.map((layer) => JSON.stringify(layer)).join(' '),
-    `must amount to at least ${leastFiltration_mmAl} mm aluminium equivalent, not ${shown(equivalent_mm, 3)}`,
-    'list all that lies between anode and point, as in --through "aluminium 2.5 mm"',
-  );
+  for (const { value, rule } of beamFaults(setting, layers)) {
+    const listed = through.map((layer) => JSON.stringify(layer)).join(' ') || 'nothing';
+    refuse(
+      '--through',
+      `${listed}, ${value}`,
+      rule.replace(' with the added filter', ''),
+      'list all that lies between anode and point, as in --through "aluminium 2.5 mm"',
+    );
+  }
 };
 
 const spectrumCsv = (rows: readonly SpectrumRow[]): string =>

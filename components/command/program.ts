@@ -1,19 +1,20 @@
 import { Command } from 'commander';
+import { version } from '../../physics/version.js';
 import { beamCommand } from './beam.js';
 import { cautions } from './cautions.js';
 import type { Io } from './io.js';
 import { matterCommand } from './matter.js';
-import { version } from './version.js';
+import { weighCommand } from './weigh.js';
 
 /** The whole command line, writing through `io`. */
 export const program = (io: Io): Command => {
   const root = new Command('stratabeam')
     .description('Weighs imaging protocols, Current against Proposed, for one room and one task.')
-    .version(version(), '--version', 'print the version')
+    .version(version, '--version', 'print the version')
     .helpOption('-h, --help', 'print this help')
     .helpCommand(false)
     .addHelpText('after', `\n${cautions}`);
-  for (const command of [beamCommand(io), matterCommand(io)]) {
+  for (const command of [weighCommand(io), beamCommand(io), matterCommand(io)]) {
     root.addCommand(withAnswerForms(command));
   }
   return forAll(root, (command) =>

@@ -82,7 +82,7 @@ const crossFaults = (sections: Sections): Fault[] =>
     needs.every((key) => sections[key] !== undefined) ? faults(sections as Case) : [],
   );
 
-/** One fault a place: the first found says best what is wrong there. */
+/** One fault for a value at a place: the first found says best what is wrong there. */
 const firstPerPath = (faults: readonly Fault[]): Fault[] =>
   faults.filter(
     (fault, index) =>

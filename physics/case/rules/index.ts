@@ -1,6 +1,7 @@
 import type { Fault } from '../fault.js';
 import type { Case } from '../schema.js';
 import { agentFaults } from './agent-rules.js';
+import { beamPathFaults } from './beam-rules.js';
 import { materialFaults } from './material-rules.js';
 import { patientFaults, patientMaterialFaults } from './patient-rules.js';
 import { roomFaults, roomMaterialFaults } from './room-rules.js';
@@ -23,6 +24,7 @@ export const crossRules: readonly {
   { needs: ['task', 'materials'], faults: taskMaterialFaults },
   { needs: ['task', 'patient'], faults: detailFaults },
   { needs: ['techniques', 'room'], faults: techniqueFaults },
+  { needs: ['room', 'materials', 'techniques'], faults: beamPathFaults },
   { needs: ['measuredChecks', 'techniques', 'patient'], faults: measuredCheckFaults },
   {
     needs: ['agentsCompared', 'materials'],

@@ -1,0 +1,103 @@
+import type {
+  Calibration,
+  Comparison,
+  Finding,
+  HoldConstant,
+  Ratios,
+  Weighing,
+} from '../../physics/results.js';
+import { shown } from './numbers.js';
+import { plainTableText } from './plain-table.js';
+import { sizeTables } from './weigh-size-tables.js';
+
+/** A weighing for people: heading, a table for each size, the comparisons, then what must be read. */
+export const weighTables = (weighing: Weighing): string => {
+  const sizes = [...new Set(weighing.evaluations.map(({ size }) => size))];
+  return [
+    headingText(weighing),
+    ...sizes.flatMap((size) => [
+      ...sizeTables(weighing.evaluations.filter((evaluation) => evaluation.size === size)),
+      ...weighing.comparisons.filter((comparison) => comparison.size === size).map(comparisonTable),
+    ]),
+    findingsText(weighing),
+    assumedText(weighing.assumed),
+  ]
+    .filter((part) => part !== '')
+    .join('\n');
+};
+
+const headingText = ({ case: stamp, version, calibration }: Weighing): string => {
+  const heading = `${stamp.title || 'Untitled case'}\ncase ${stamp.hash}, Stratabeam ${version}\n`;
+  return calibration === null
+    ? `${heading}\nNot calibrated to readings of the room.\n`
+    : `${heading}\n${calibrationTable(calibration)}`;
+};
+
+const readingNames = {
+  halfValueLayer_mmAl: 'half-value layer, mm Al',
+  airKerma_uGy_per_mAs: 'air kerma, µGy/mAs',
+} as const;
+
+const calibrationTable = (calibration: Calibration): string =>
+  plainTableText({
+    title:
+      `Calibration: output factor ${shown(calibration.outputFactor)}, ` +
+      `inherent filter ${shown(calibration.inherentFilter_mmAl)} mm Al`,
+    headings: ['reading', 'kV', 'measured', 'model', 'difference %'],
+    rows: calibration.residuals.map((residual) => [
+      readingNames[residual.quantity],
+      String(residual.potential_kV),
+      shown(residual.measured),
+      shown(residual.model),
+      residual.relative_percent.toFixed(1),
+    ]),
+  });
+
+const holdingWords: Readonly<Record<HoldConstant, string>> = {
+  asSet: 'as set',
+  sdnr: 'SdNR',
+  detectorAirKerma: 'detector air kerma',
+  detectorSignal: 'detector signal',
+  incidentAirKerma: 'incident air kerma',
+  tubeLoad: 'tube load',
+};
+
+const ratioColumns: readonly (readonly [keyof Ratios, string])[] = [
+  ['sdnr', 'SdNR'],
+  ['incidentAirKerma', 'incident kerma'],
+  ['entranceSurfaceAirKerma', 'entrance kerma'],
+  ['kermaAreaProduct', 'KAP'],
+  ['energyImparted', 'energy imparted'],
+  ['tubeLoad', 'tube load'],
+  ['power', 'power'],
+  ['subjectContrast', 'contrast'],
+];
+
+const comparisonTable = ({ size, from, to, rows }: Comparison): string =>
+  plainTableText({
+    title: `${to} over ${from}, size ${size}`,
+    headings: ['held constant', ...ratioColumns.map(([, heading]) => heading)],
+    rows: rows.map(({ holdConstant, ratio }) => [
+      holdingWords[holdConstant],
+      ...ratioColumns.map(([key]) => shown(ratio[key], 3)),
+    ]),
+  });
+
+const findingsText = ({ findings, evaluations, comparisons }: Weighing): string => {
+  const lines = [
+    ...findings.map((finding) => line(finding)),
+    ...evaluations.flatMap(({ technique, size, findings: own }) =>
+      own.map((finding) => line(finding, `${technique}, ${size}`)),
+    ),
+    ...comparisons.flatMap(({ to, size, rows }) =>
+      rows.flatMap(({ findings: own }) => own.map((finding) => line(finding, `${to}, ${size}`))),
+    ),
+  ];
+  return lines.length === 0 ? '' : `Findings\n${[...new Set(lines)].join('\n')}\n`;
+};
+
+const line = ({ severity, message }: Finding, about?: string): string =>
+  `  ${severity}: ${about ? `${about}: ` : ''}${message}`;
+
+const assumedText = (assumed: readonly string[]): string =>
+  assumed.length === 0 ? '' : `Assumed because the case is silent\n  ${assumed.join('\n  ')}\n`;

@@ -83,7 +83,8 @@ function inherentEquivalent_mm(tube: CalibratedTube, material: (name: string) =>
   return aluminiumEquivalent_mm(bare, layers) ?? 0;
 }
 
-function requiredMaterial(name: string): Material {
+/** A named material, of which there must be one. */
+export function requiredMaterial(name: string): Material {
   const material = namedMaterial(name);
   if (!material) throw new Error(`material "${name}": is not known`);
   return material;

@@ -1,6 +1,11 @@
 import { levenbergMarquardt } from 'ml-levenberg-marquardt';
 import { meanEnergy_keV } from './fluence.js';
-import { inherentFor, type ModelledReading, modelledValues } from './reading-model.js';
+import {
+  inherentFor,
+  type ModelledReading,
+  modelledHalfValueLayer_mmAl,
+  modelledOutput_uGy_per_mAs,
+} from './reading-model.js';
 
 /** Potential at which the output scale is anchored: ln g = ln outputFactor + b ln(kV/80). */
 export const anchorPotential_kV = 80;
@@ -15,7 +20,8 @@ export interface TubeFit {
 /** Readings at as many potentials as this are fitted together instead of met at one. */
 const potentialsForFit = 3;
 const greatestInherent_mmAl = 50;
-const maxIterations = 15;
+// From the start above, five steps settle synthetic rooms to the last printed digit.
+const maxIterations = 10;
 
 /**
  * Inherent filter t, output scale g and its exponent b from readings.
@@ -116,7 +122,7 @@ function outputFactorAtAnchor(
   const nearest = nearestAnchor(outputs);
   const measured = nearest?.reading.airKerma_uGy_per_mAs;
   if (!nearest || !measured) return start.outputFactor;
-  return measured / modelledValues(nearest, inherent_mmAl).airKerma_uGy_per_mAs;
+  return measured / modelledOutput_uGy_per_mAs(nearest, inherent_mmAl);
 }
 
 /** A logarithm measured and modelled, both over the reading's relative uncertainty. */
@@ -132,8 +138,7 @@ function layerPoint(modelled: ModelledReading): FitPoint {
   return {
     measured: perUncertainty * Math.log(modelled.reading.halfValueLayer_mmAl ?? 1),
     model: (fit) =>
-      perUncertainty *
-      Math.log(modelledValues(modelled, fit.inherentFilter_mmAl).halfValueLayer_mmAl),
+      perUncertainty * Math.log(modelledHalfValueLayer_mmAl(modelled, fit.inherentFilter_mmAl)),
   };
 }
 
@@ -146,7 +151,7 @@ function outputPoint(modelled: ModelledReading): FitPoint {
       perUncertainty *
       Math.log(
         outputFactorAt_kV(fit, potential_kV) *
-          modelledValues(modelled, fit.inherentFilter_mmAl).airKerma_uGy_per_mAs,
+          modelledOutput_uGy_per_mAs(modelled, fit.inherentFilter_mmAl),
       ),
   };
 }

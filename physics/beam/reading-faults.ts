@@ -1,7 +1,11 @@
 import { airKermaPerRoentgen_mGy } from '../../materials/index.js';
 import type { Fault } from '../case/fault.js';
 import { numberText } from '../number-text.js';
-import { type ModelledReading, modelledValues } from './reading-model.js';
+import {
+  type ModelledReading,
+  modelledHalfValueLayer_mmAl,
+  modelledOutput_uGy_per_mAs,
+} from './reading-model.js';
 
 /**
  * A half-value layer is believed between those of this much and this much inherent aluminium, and
@@ -29,8 +33,8 @@ const outputMistakes = [
 export function halfValueLayerFault(modelled: ModelledReading): Fault | null {
   const value = modelled.reading.halfValueLayer_mmAl;
   if (value === null) return null;
-  const [thin, thick] = believedInherent_mmAl.map(
-    (inherent) => modelledValues(modelled, inherent).halfValueLayer_mmAl,
+  const [thin, thick] = believedInherent_mmAl.map((inherent) =>
+    modelledHalfValueLayer_mmAl(modelled, inherent),
   );
   const [least, most] = [thin / believedBeyond, thick * believedBeyond];
   if (within(value, [least, most])) return null;
@@ -50,7 +54,7 @@ export function halfValueLayerFault(modelled: ModelledReading): Fault | null {
 export function outputFault(modelled: ModelledReading, inherent_mmAl: number): Fault | null {
   const value = modelled.reading.airKerma_uGy_per_mAs;
   if (value === null) return null;
-  const model = modelledValues(modelled, inherent_mmAl).airKerma_uGy_per_mAs;
+  const model = modelledOutput_uGy_per_mAs(modelled, inherent_mmAl);
   if (within(value / model, believedOutputFactor)) return null;
   const [least, most] = believedOutputFactor.map((factor) => factor * model);
   const mistake = outputMistakes.find(({ factor }) =>

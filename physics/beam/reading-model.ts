@@ -20,12 +20,6 @@ export interface ModelledReading {
   readonly beam: Spectrum;
 }
 
-/** What the model says at a reading's place with `inherent_mmAl` of aluminium and output scale 1. */
-export interface ModelledValues {
-  readonly halfValueLayer_mmAl: number;
-  readonly airKerma_uGy_per_mAs: number;
-}
-
 /**
  * The beam that reaches a reading's meter: the tube's spectrum at its potential behind the named
  * filter, by the inverse square of its distance and, with air, the air on the way.
@@ -48,16 +42,22 @@ export function modelReading(
   return { index, reading, beam: scaleSpectrum(attenuate(bare, layers), inverseSquare) };
 }
 
-/** Half-value layer and output of a modelled reading behind an inherent filter. */
-export function modelledValues({ beam }: ModelledReading, inherent_mmAl: number): ModelledValues {
-  const aluminium = referenceMaterial('aluminium');
-  const filtered = attenuate(beam, [{ material: aluminium, thickness_mm: inherent_mmAl }]);
-  return {
-    // A tube beam is never empty, so a half-value layer exists.
-    halfValueLayer_mmAl: halfValueLayer_mm(filtered, aluminium) ?? 0,
-    airKerma_uGy_per_mAs: airKerma_uGy(filtered),
-  };
-}
+/** First half-value layer at a reading's place behind an inherent filter, mm Al. */
+export const modelledHalfValueLayer_mmAl = (
+  modelled: ModelledReading,
+  inherent_mmAl: number,
+): number =>
+  // A tube beam is never empty, so a half-value layer exists.
+  halfValueLayer_mm(behindInherent(modelled, inherent_mmAl), referenceMaterial('aluminium')) ?? 0;
+
+/** Output at a reading's place behind an inherent filter, with output scale 1. */
+export const modelledOutput_uGy_per_mAs = (
+  modelled: ModelledReading,
+  inherent_mmAl: number,
+): number => airKerma_uGy(behindInherent(modelled, inherent_mmAl));
+
+const behindInherent = ({ beam }: ModelledReading, inherent_mmAl: number): Spectrum =>
+  attenuate(beam, [{ material: referenceMaterial('aluminium'), thickness_mm: inherent_mmAl }]);
 
 /** Inherent aluminium that gives the reading its half-value layer; null where there is none. */
 export const inherentFor = ({ beam, reading }: ModelledReading): number | null =>

@@ -1,9 +1,11 @@
 import { doseAt, exposureAt, figureOfMeritAt } from './at-load.js';
 import { beamQuality } from './beam/index.js';
 import type { Case } from './case/schema.js';
+import { isCurve } from './control.js';
 import { notYetComputed } from './findings.js';
 import { framesPerRun } from './frames.js';
-import { limitFindings } from './limits.js';
+import { nearestAllowedText } from './limits/nearest-allowed.js';
+import { isAllowed, limitFindings } from './limits.js';
 import type { OperatingPoint } from './operating-point.js';
 import { iodineEquivalent_mg_per_cm2, noiseAt, readoutWeights, sdnrAt } from './readout/index.js';
 import type { Evaluation, Finding } from './results.js';
@@ -62,7 +64,7 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
     },
     exposure,
     figureOfMerit: figureOfMeritAt(c, made, dose, tubeLoad_mAs),
-    findings: [
+    findings: withNearest(c, point, [
       ...point.findings,
       ...placement.findings,
       ...limitFindings({
@@ -78,8 +80,22 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
         path,
       }),
       ...missing(dose.energyImparted_mJ),
-    ],
+    ]),
   };
+};
+
+/** A limit without a remedy of its own names the nearest setting of the room that is allowed. */
+const withNearest = (c: Case, point: OperatingPoint, findings: Finding[]): Finding[] => {
+  if (isAllowed(findings) || isCurve(point.technique.control)) return findings;
+  const nearest = nearestAllowedText(c, point);
+  const words = nearest
+    ? `Nearest allowed: ${nearest}.`
+    : 'No setting of this room is allowed at this size under this control.';
+  return findings.map((finding) =>
+    finding.severity === 'limit'
+      ? { ...finding, nearest, message: `${finding.message} ${words}` }
+      : finding,
+  );
 };
 
 const missing = (energyImparted_mJ: number | null): Finding[] =>

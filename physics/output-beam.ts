@@ -37,6 +37,16 @@ export const outputBeam = (
   potential_kV: number,
   filter: string,
 ): OutputBeam => {
+  const beams = kept(beamsOf, prepared, () => new Map<string, OutputBeam>());
+  if (beams.size > beamsKept) beams.clear();
+  return kept(beams, `${potential_kV}:${filter}`, () => makeBeam(prepared, potential_kV, filter));
+};
+
+/** More than any room's potentials times filters; what random potentials fill is let go. */
+const beamsKept = 4000;
+const beamsOf = new WeakMap<Prepared, Map<string, OutputBeam>>();
+
+const makeBeam = (prepared: Prepared, potential_kV: number, filter: string): OutputBeam => {
   const { source, tube } = prepared.room;
   const added = prepared.filters.get(filter) ?? [];
   if (source) {

@@ -43,7 +43,7 @@ const responsesOf = (c: Case, size: Size, stack: Stack): ScatterResponses => {
   const keys = [geometry, support, detector, grid ?? nothing, c.patient, c.materials, size];
   return responses.get(keys, () => {
     const prepared = prepare(c);
-    return scatterResponses(stack, prepared.detector, prepared.grid && prepared.grid.table);
+    return scatterResponses(stack, prepared.detector, prepared.grid?.table ?? null);
   });
 };
 

@@ -98,8 +98,8 @@ const doseYield = (
       entrance_mGy === null
         ? null
         : entrance_mGy * skinToAirRatio(skin, prepare(c).material('skin')),
-    energyImparted_mJ: deposited && deposited.energyImparted_mJ,
-    meanAbsorbedDose_mGy: deposited && deposited.meanAbsorbedDose_mGy,
-    layerAbsorbedDose_mGy: deposited && deposited.layerAbsorbedDose_mGy,
+    energyImparted_mJ: deposited?.energyImparted_mJ ?? null,
+    meanAbsorbedDose_mGy: deposited?.meanAbsorbedDose_mGy ?? null,
+    layerAbsorbedDose_mGy: deposited?.layerAbsorbedDose_mGy ?? null,
   };
 };

@@ -26,7 +26,7 @@ export const potentialLimits = ({ case: c, setting, path }: LimitInputs): Findin
     return [
       limit({
         code: 'potentialRange',
-        message: `${potential_kV} kV lies outside the room's ${range.min} to ${range.max} kV; the nearest is ${nearest} kV.`,
+        message: `${potential_kV} kV lies outside the room's ${range.min} to ${range.max} kV.`,
         bound,
         ...where,
       }),
@@ -36,7 +36,7 @@ export const potentialLimits = ({ case: c, setting, path }: LimitInputs): Findin
     return [
       limit({
         code: 'potentialStep',
-        message: `${potential_kV} kV is not one of the room's steps of ${range.step} kV from ${range.min} kV; the nearest is ${nearest} kV.`,
+        message: `${potential_kV} kV is not one of the room's steps of ${range.step} kV from ${range.min} kV.`,
         bound: range.step,
         ...where,
       }),
@@ -80,7 +80,7 @@ export const loadLimits = (inputs: LimitInputs): Finding[] => {
     findings.push(
       limit({
         code: 'power',
-        message: `Needs ${numberText(power_kW)} kW for ${numberText(exposureTime_ms)} ms (${numberText(power_kW / available_kW, 2)} times the power available); the room has ${numberText(available_kW)} kW.`,
+        message: `Needs ${numberText(power_kW)} kW for ${numberText(exposureTime_ms)} ms (×${(power_kW / available_kW).toFixed(2)}); the room has ${numberText(available_kW)} kW.`,
         path,
         value: power_kW,
         bound: available_kW,

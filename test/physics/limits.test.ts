@@ -6,8 +6,24 @@ import { nearestPotential_kV } from '../../physics/limits/tube-limits.js';
 const rule = ruleSchema.parse({
   kind: 'minimum-hvl',
   segments: [
-    { from_kV: 51, to_kV: 70, points: [[51, 1.3], [60, 1.5], [70, 1.8]] },
-    { from_kV: 71, to_kV: 150, points: [[71, 2.5], [80, 2.9], [150, 5.4]] },
+    {
+      from_kV: 51,
+      to_kV: 70,
+      points: [
+        [51, 1.3],
+        [60, 1.5],
+        [70, 1.8],
+      ],
+    },
+    {
+      from_kV: 71,
+      to_kV: 150,
+      points: [
+        [71, 2.5],
+        [80, 2.9],
+        [150, 5.4],
+      ],
+    },
   ],
   source: '21 CFR 1020.30(m)(1)',
   date: '2006-06-10',

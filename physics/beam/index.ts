@@ -20,13 +20,13 @@ export {
   type SpectrumRows,
   spectrumFromCsv,
   spectrumFromRows,
-  userSpectrum,
 } from './user-spectrum.js';
 
 // The room's own tube.
 
 export type { CalibrationOptions } from './believed-readings.js';
 export { calibrate, readingFaults } from './calibrate.js';
+export { anchorPotential_kV, outputFactorAt_kV, type TubeFit } from './calibration-fit.js';
 export { beamFaults } from './filtration-faults.js';
 
 // What stands in the way.

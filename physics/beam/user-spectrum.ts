@@ -68,23 +68,6 @@ export function spectrumFromRows(request: SpectrumRows): SourceBeam {
   };
 }
 
-/** The spectrum alone; without photons when the rows cannot be read. */
-export function userSpectrum(
-  rows: SpectrumRows['rows'],
-  potential_kV: number,
-  extraEdges_keV: readonly number[] = [],
-): Spectrum {
-  const { spectrum } = spectrumFromRows({
-    rows,
-    fluenceIs: 'per keV',
-    potential_kV,
-    extraEdges_keV,
-  });
-  if (spectrum) return spectrum;
-  const { edges_keV, energies_keV } = energyGrid(potential_kV, extraEdges_keV);
-  return { edges_keV, energies_keV, fluence_per_mm2: new Float64Array(energies_keV.length) };
-}
-
 /** The same from a table; bad rows are returned beside it. */
 export function spectrumFromCsv(
   text: string,

@@ -1,21 +1,11 @@
+import { potentialColumn, thicknessColumn } from './common-columns.js';
 import { readColumns } from './read-columns.js';
 
 const positive = { min: 1e-6, max: 1e6 };
 
 const columns = {
-  thickness_mm: {
-    kind: 'number',
-    names: ['thickness', 'patient thickness'],
-    unit: 'mm',
-    ...positive,
-  },
-  potential_kV: {
-    kind: 'number',
-    names: ['potential', 'tube potential', 'tube voltage', 'kv', 'kvp'],
-    unit: 'kV',
-    min: 20,
-    max: 150,
-  },
+  thickness_mm: thicknessColumn,
+  potential_kV: potentialColumn,
   tubeCurrent_mA: { kind: 'number', names: ['tube current', 'current'], unit: 'mA', ...positive },
   exposureTime_ms: { kind: 'number', names: ['exposure time', 'time'], unit: 'ms', ...positive },
   filter: { kind: 'text', names: ['added filter'] },

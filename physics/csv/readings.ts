@@ -1,14 +1,9 @@
+import { potentialColumn } from './common-columns.js';
 import { readColumns } from './read-columns.js';
 
 /** Columns of a table of readings; a row must hold a half-value layer, an output or both. */
 const columns = {
-  potential_kV: {
-    kind: 'number',
-    names: ['potential', 'tube potential', 'tube voltage', 'kv', 'kvp'],
-    unit: 'kV',
-    min: 20,
-    max: 150,
-  },
+  potential_kV: potentialColumn,
   filter: { kind: 'text', names: ['added filter'], optional: true },
   halfValueLayer_mmAl: {
     kind: 'number',

@@ -1,13 +1,8 @@
+import { thicknessColumn } from './common-columns.js';
 import { readColumns } from './read-columns.js';
 
 const columns = {
-  thickness_mm: {
-    kind: 'number',
-    names: ['thickness', 'patient thickness'],
-    unit: 'mm',
-    min: 1e-6,
-    max: 2000,
-  },
+  thickness_mm: thicknessColumn,
   weight: {
     kind: 'number',
     names: ['count', 'number', 'frequency'],

@@ -1,6 +1,7 @@
 import { kept } from '../materials/kept.js';
 import {
   attenuate,
+  outputFactorAt_kV,
   type Spectrum,
   scaleSpectrum,
   sourceBeam,
@@ -9,17 +10,12 @@ import {
 import type { Prepared } from './prepare.js';
 import type { Finding } from './results.js';
 
-/** The potential at which the output law ln g = ln outputFactor + b ln(kV/80) is anchored. */
-const outputAnchor_kV = 80;
-
 /** Output scale g of the room's tube at a potential: calibrated, or as entered. */
 export const outputFactorAt = (
   { room, calibration }: Pick<Prepared, 'room' | 'calibration'>,
   potential_kV: number,
 ): number =>
-  calibration
-    ? calibration.outputFactor * (potential_kV / outputAnchor_kV) ** calibration.outputExponent
-    : room.tube.outputFactor;
+  calibration ? outputFactorAt_kV(calibration, potential_kV) : room.tube.outputFactor;
 
 /** The room's beam, or what had to be said about it. */
 export interface OutputBeam {

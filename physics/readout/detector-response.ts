@@ -1,6 +1,7 @@
 import { absorptionEdges, type Material } from '../../materials/index.js';
 import { kept } from '../../materials/kept.js';
 import type { Detector } from '../case/schema.js';
+import { KeptBy, nothing } from '../kept-by.js';
 import {
   type DetectorInteractions,
   detectorInteractions,
@@ -43,7 +44,7 @@ export interface DetectorResponse {
 
 type Read = (energy_keV: number, eta: number, lost_keV: number, lostSquare_keV2: number) => number;
 
-const known = new WeakMap<Detector, DetectorResponse>();
+const known = new KeptBy<DetectorResponse>();
 
 /**
  * The response of a detector: any material at an areal density, or `ideal` (η = 1, no escape).
@@ -56,28 +57,26 @@ const known = new WeakMap<Detector, DetectorResponse>();
  * G_l of `slabEscape`. Energy that Compton-scattered photons take out of the slab is not modelled
  * (valid where photoelectric absorption dominates: below about 120 keV in these materials).
  *
- * Range 1 keV to 20 MeV in energy, cosβ above 0 to 1. Kept per detector object.
+ * Range 1 keV to 20 MeV in energy, cosβ above 0 to 1. Kept per detector and the material its name stands for.
  *
  * @throws Error when the material's name is unknown to `materials`.
  */
 export const detectorResponse = (
   detector: Detector,
   materials: (name: string) => Material,
-): DetectorResponse => kept(known, detector, () => makeResponse(detector, materials));
-
-const makeResponse = (
-  detector: Detector,
-  materials: (name: string) => Material,
 ): DetectorResponse => {
-  const isIdeal = detector.material === 'ideal';
-  const material = isIdeal ? null : materials(detector.material);
+  const material = detector.material === 'ideal' ? null : materials(detector.material);
+  return known.get([detector, material ?? nothing], () => makeResponse(detector, material));
+};
+
+const makeResponse = (detector: Detector, material: Material | null): DetectorResponse => {
   const slab = material && detectorInteractions(material, detector.arealDensity_mg_per_cm2 / 1000);
   const reads = readsOf(detector);
   return {
     name: detector.material,
-    isIdeal,
+    isIdeal: material === null,
     response: detector.response,
-    opticalSwank: isIdeal ? 1 : detector.opticalSwank,
+    opticalSwank: material ? detector.opticalSwank : 1,
     edges_keV: edgesOf(detector, material),
     efficiency: angular(slab, reads.eta),
     energyFraction: angular(slab, reads.epsilon),

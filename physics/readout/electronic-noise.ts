@@ -19,7 +19,7 @@ export const quantumVariance_per_mm2 = (beam: Spectrum, response: DetectorRespon
   return variance / response.opticalSwank;
 };
 
-const known = new WeakMap<Detector, number>();
+const known = new WeakMap<DetectorResponse, number>();
 
 /**
  * Electronic noise variance per mm², constant in signal units: the quantum variance of the named
@@ -30,7 +30,7 @@ export const electronicVariance_per_mm2 = (
   detector: Detector,
   response: DetectorResponse,
 ): number =>
-  kept(known, detector, () => {
+  kept(known, response, () => {
     if (response.isIdeal || detector.electronicNoiseKerma_uGy === 0) return 0;
     const beam = referenceBeam(detector.electronicNoiseBeam);
     const perKerma = quantumVariance_per_mm2(beam, response) / airKerma_uGy(beam);

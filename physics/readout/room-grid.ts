@@ -1,6 +1,6 @@
-import { kept } from '../../materials/kept.js';
 import type { Material } from '../../materials/material.js';
 import type { Grid } from '../case/schema.js';
+import { KeptBy } from '../kept-by.js';
 import { gridGeometry } from './grid-geometry.js';
 import { type GridTable, gridTable } from './grid-table.js';
 
@@ -14,15 +14,19 @@ export interface RoomGrid {
   } | null;
 }
 
-const known = new WeakMap<Grid, RoomGrid>();
+const known = new KeptBy<RoomGrid>();
 
 /**
- * The grid a case describes, tabulated once per grid object.
+ * The grid a case describes, tabulated once per grid object and the materials its names stand for.
  *
- * @throws Error when strips leave no interspace or a material is unknown.
+ * @throws Error when strips leave no interspace or a material is unknown; a parsed case has neither.
  */
-export const roomGrid = (grid: Grid, materials: (name: string) => Material): RoomGrid =>
-  kept(known, grid, () => ({
-    table: gridTable(gridGeometry(grid, materials)),
+export const roomGrid = (grid: Grid, materials: (name: string) => Material): RoomGrid => {
+  const geometry = gridGeometry(grid, materials);
+  const { stripMaterial, interspaceMaterial, covers } = geometry;
+  const made = [stripMaterial, interspaceMaterial, ...covers.map(({ material }) => material)];
+  return known.get([grid, ...made], () => ({
+    table: gridTable(geometry),
     measured: grid.measured,
   }));
+};

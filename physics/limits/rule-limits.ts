@@ -55,7 +55,7 @@ const minimumHvlFindings = (inputs: LimitInputs, rule: MinimumHvl, path: string)
       {
         code: 'minimumHvl',
         severity: 'limit',
-        message: `Half-value layer ${numberText(value)} mm Al is below the ${numberText(bound)} mm Al asked for at ${potential_kV} kV (${origin(rule)}).`,
+        message: `Half-value layer ${numberText(value, 4)} mm Al is below the ${numberText(bound, 4)} mm Al asked for at ${potential_kV} kV (${origin(rule)}).`,
         path,
         value,
         bound,
@@ -68,7 +68,7 @@ const minimumHvlFindings = (inputs: LimitInputs, rule: MinimumHvl, path: string)
         {
           code: 'ruleUnconfirmed',
           severity: 'note',
-          message: `Half-value layer ${numberText(value)} mm Al is above ${numberText(bound)} mm Al at ${potential_kV} kV, but the rule's text is ${rule.provenance} (${rule.source}): confirm the text, and measure.`,
+          message: `Half-value layer ${numberText(value, 4)} mm Al is above the ${numberText(bound, 4)} mm Al asked for at ${potential_kV} kV, but the rule’s text is ${rule.provenance} (${rule.source}): confirm the text, and measure.`,
           path,
           value,
           bound,

@@ -1,38 +1,27 @@
-import type { Evaluation } from '../../physics/results.js';
+import type { AlongBeam } from '../../physics/along-beam.js';
 import type { SpineLayout } from './spine-layout.js';
 
-/** Decades of photon fluence between full ink and bare paper. */
+/** Decades of photons per mm² between full ink and bare paper. */
 const decades = 4;
 const darkest = 0.62;
 
-export interface FluencePoint {
-  readonly y: number;
-  readonly fluence_per_mm2: number;
+/** Where a distance from the focal spot is drawn: to scale in the patient, shortened outside it. */
+export function drawnAt(
+  distance_mm: number,
+  layout: SpineLayout,
+  { sourceToSkin_mm, thickness_mm, sourceToDetector_mm }: { sourceToSkin_mm: number; thickness_mm: number; sourceToDetector_mm: number },
+): number {
+  const exit_mm = sourceToSkin_mm + thickness_mm;
+  const between = (from_mm: number, to_mm: number, top: number, bottom: number) =>
+    to_mm > from_mm ? top + ((distance_mm - from_mm) / (to_mm - from_mm)) * (bottom - top) : bottom;
+  if (distance_mm <= sourceToSkin_mm) return between(0, sourceToSkin_mm, layout.tube, layout.patient.top);
+  if (distance_mm <= exit_mm) return between(sourceToSkin_mm, exit_mm, layout.patient.top, layout.patient.bottom);
+  return between(exit_mm, sourceToDetector_mm, layout.patient.bottom, layout.detector.top);
 }
 
-/**
- * Primary photons per mm² and frame where the beam meets tube, skin, every layer's exit face and the
- * detector, from the evaluation's transmissions by number and the inverse square law.
- */
-export function fluenceAlong(
-  evaluation: Evaluation,
-  layout: SpineLayout,
-  geometry: { readonly sourceToSkin_mm: number; readonly exitToDetector_mm: number; readonly layers_mm: readonly number[]; readonly parallel: boolean },
-): FluencePoint[] {
-  const atOneMetre = evaluation.beam.fluence_per_mm2_per_mAs * evaluation.exposure.tubeLoad_mAs;
-  const spread = (distance_mm: number) => (geometry.parallel ? 1 : (1000 / distance_mm) ** 2);
-  const skin = geometry.sourceToSkin_mm;
-  const points = [{ y: layout.patient.top, fluence_per_mm2: atOneMetre * spread(skin) }];
-  let depth = 0;
-  let transmission = 1;
-  evaluation.transmission.layers.forEach((layer, i) => {
-    depth += geometry.layers_mm[i] ?? 0;
-    transmission = layer.cumulativeByNumber;
-    points.push({ y: layout.layers[i]?.bottom ?? layout.patient.bottom, fluence_per_mm2: atOneMetre * transmission * spread(skin + depth) });
-  });
-  const detector = atOneMetre * transmission * spread(skin + depth + geometry.exitToDetector_mm);
-  return [...points, { y: layout.detector.top, fluence_per_mm2: detector }];
-}
+/** The most photons per mm² of any of the beams: what full ink stands for. */
+export const mostPhotons = (beams: readonly AlongBeam[]): number =>
+  Math.max(0, ...beams.flatMap((beam) => beam.primaryFluence_per_mm2));
 
 /**
  * Ink density by the logarithm of photons per mm²: `most` is the fluence of full ink, and every

@@ -1,10 +1,10 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
 import { html, nothing, svg, type SVGTemplateResult, type TemplateResult } from 'lit';
-import { formatNumber } from './format.js';
+import { formatEntry, formatNumber } from './format.js';
 import { techniqueInk } from './inks.js';
+import { placeLabels, wordsWidth } from './label-places.js';
 import { techniqueMark } from './technique-mark.js';
-import { placeAlong } from './place-along.js';
 
 /** One potential of one filter's line. */
 export interface CurvePoint {
@@ -92,24 +92,43 @@ function lineOf(entry: CurveLine, { x, y }: Scales): SVGTemplateResult[] {
   );
 }
 
-/** Labels at the right-hand ends of the lines, moved apart where they would touch. */
-function lineNames(data: DoseCurveData, { x, y }: Scales, { width }: CurveFrame): SVGTemplateResult[] {
+/** What is written on the plot: techniques first, so that they get the places they want. */
+function plotNames(data: DoseCurveData, { x, y }: Scales, frame: CurveFrame): SVGTemplateResult[] {
   const right = x.domain()[1];
+  const marks = data.marks.map((mark) => ({
+    x: x(mark.dose),
+    y: y(mark.value),
+    words: `${mark.name} ${formatEntry(mark.potential_kV)} kV`,
+    color: techniqueInk(mark.ink).color,
+  }));
   const ends = data.lines.flatMap((entry) => {
-    const inside = entry.points.filter((point) => point.dose <= right && point.dose >= 0);
+    const inside = entry.points.filter((point) => point.dose <= right);
     const end = inside.reduce<CurvePoint | null>((a, b) => (a && a.dose > b.dose ? a : b), null);
-    const limits = [...new Set(entry.points.map((point) => point.forbidden).filter((limit) => limit !== null))];
-    return end ? [{ entry, end, limits }] : [];
-  });
-  ends.sort((a, b) => y(a.end.value) - y(b.end.value));
-  const tops = placeAlong(ends.map(({ end }) => ({ anchor: y(end.value) - 9, height: 14 })), 0, y.range()[0]);
-  return ends.map(({ entry, end, limits }, i) => {
+    if (!end) return [];
     const color = entry.ink === null ? 'var(--soft)' : techniqueInk(entry.ink).color;
-    const name = entry.filter === 'none' ? 'no filter' : entry.filter;
-    const allForbidden = entry.points.every((point) => point.forbidden);
-    const words = allForbidden && limits.length > 0 ? `${name}, ${limits[0]}` : name;
-    return svg`<text class="name" text-anchor="end" x=${Math.min(width - margin.right, x(end.dose))} y=${tops[i] + 11} fill=${color}>${words}</text>`;
+    return [{ x: x(end.dose), y: y(end.value), words: lineName(entry), color }];
   });
+  const named = [...marks, ...ends].map((entry) => ({ ...entry, width: wordsWidth(entry.words), height: 13 }));
+  const samples = data.lines.flatMap((entry) =>
+    entry.points.filter((point) => point.dose <= right).map((point) => ({ x: x(point.dose), y: y(point.value) })),
+  );
+  const rose = data.rose === null ? [] : [{ x: frame.width - 40, y: y(data.rose) - 5 }];
+  const places = placeLabels(named, [...samples, ...marks, ...rose], {
+    left: margin.left,
+    right: frame.width,
+    top: 0,
+    bottom: frame.height - margin.bottom,
+  });
+  return named.map(
+    ({ words, color }, i) => svg`<text class="name" x=${places[i].x} y=${places[i].y + 4} fill=${color}>${words}</text>`,
+  );
+}
+
+/** A filter's name, and the limit that forbids all of it. */
+function lineName(entry: CurveLine): string {
+  const name = entry.filter === 'none' ? 'no filter' : entry.filter;
+  const limit = entry.points[0]?.forbidden;
+  return limit && entry.points.every((point) => point.forbidden) ? `${name}, ${limit}` : name;
 }
 
 function axes(data: DoseCurveData, { x, y }: Scales, { width, height }: CurveFrame): SVGTemplateResult {
@@ -121,14 +140,6 @@ function axes(data: DoseCurveData, { x, y }: Scales, { width, height }: CurveFra
     )}
     ${x.ticks(5).map((tick) => svg`<text class="tick" text-anchor="middle" x=${x(tick)} y=${base + 16}>${tick}</text>`)}
     <text class="axis-name" text-anchor="end" x=${width - margin.right} y=${base + 33}>${data.doseName}, ${data.doseUnit}</text>`;
-}
-
-function markNames(data: DoseCurveData, { x, y }: Scales): SVGTemplateResult[] {
-  return data.marks.map((mark) => {
-    const { color } = techniqueInk(mark.ink);
-    return svg`${techniqueMark(mark.ink, x(mark.dose), y(mark.value))}
-      <text class="name" x=${x(mark.dose) + 9} y=${y(mark.value) + 15} fill=${color}>${mark.name} ${formatNumber(mark.potential_kV)} kV</text>`;
-  });
 }
 
 /**
@@ -149,9 +160,9 @@ export function doseCurve(data: DoseCurveData, frame: CurveFrame, cursor_kV: num
     ${data.rose === null ? nothing : svg`<line class="rose" x1=${margin.left} x2=${frame.width - margin.right} y1=${y(data.rose)} y2=${y(data.rose)} />
       <text class="tick" text-anchor="end" x=${frame.width - margin.right} y=${y(data.rose) - 5}>Rose, k = ${data.rose}</text>`}
     <g clip-path="url(#${clip})">${data.lines.map((entry) => lineOf(entry, scales))}</g>
-    ${lineNames(data, scales, frame)}
+    ${plotNames(data, scales, frame)}
     ${cursor.map(({ point }) => svg`<circle class="cursor" cx=${x(point.dose)} cy=${y(point.value)} r="3" />`)}
-    ${markNames(data, scales)}
+    ${data.marks.map((mark) => techniqueMark(mark.ink, x(mark.dose), y(mark.value)))}
     ${data.investigational ? svg`<text class="warning" x=${margin.left + 4} y=${frame.height - margin.bottom - 8}>${data.investigational}</text>` : nothing}
   </svg>`;
 }

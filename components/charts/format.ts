@@ -30,7 +30,7 @@ export function formatRatio(ratio: number | null | undefined): string {
   return `×${formatNumber(ratio)}`;
 }
 
-/** A value as it is typed into a field: shortest decimal that reads back as the same number. */
+/** A value as it was entered, or as it is typed into a field: without zeros nobody wrote. */
 export const formatEntry = (value: number): string => String(Number(value.toPrecision(12)));
 
 /** Shares as whole or tenth percent: 25 %, 0.4 %. */

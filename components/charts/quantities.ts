@@ -1,5 +1,9 @@
 import type { Evaluation, Ratios } from '../../physics/results.js';
 
+/** Stations along the beam, in their order. */
+export const quantityGroups = ['beam', 'exposure', 'dose', 'detail', 'scatter and grid', 'detector', 'merit'] as const;
+export type QuantityGroup = (typeof quantityGroups)[number];
+
 /**
  * Every number the desk and the dossier show: its name, unit, what it is per, how it is computed in
  * words, and where it stands in an evaluation. One entry here is one row anywhere.
@@ -8,6 +12,8 @@ export interface Quantity {
   readonly id: string;
   readonly name: string;
   readonly unit: string;
+  /** Where it acts along the beam; tables set groups apart. */
+  readonly group: QuantityGroup;
   /** Per frame or per run where that must be said, else empty. */
   readonly per: '' | 'per frame' | 'per run' | 'per minute';
   /** The computation in words, for someone who wants to check it. */
@@ -16,86 +22,87 @@ export interface Quantity {
 }
 
 const q = (
+  group: QuantityGroup,
   id: string,
   name: string,
   unit: string,
   per: Quantity['per'],
   of: Quantity['of'],
   words: string,
-): Quantity => ({ id, name, unit, per, of, words });
+): Quantity => ({ group, id, name, unit, per, of, words });
 
 const halfValue = (evaluation: Evaluation, material: string) =>
   evaluation.beam.halfValueLayers.find((row) => row.material === material) ?? null;
 
 export const quantities = [
-  q('halfValueLayer', 'Half-value layer', 'mm Al', '', (e) => halfValue(e, 'aluminium')?.first_mm ?? null,
+  q('beam', 'halfValueLayer', 'Half-value layer', 'mm Al', '', (e) => halfValue(e, 'aluminium')?.first_mm ?? null,
     'Aluminium that halves the air kerma of the beam leaving tube and filter, in narrow beam.'),
-  q('meanEnergy', 'Mean energy of the beam', 'keV', '', (e) => e.beam.meanEnergy_keV,
+  q('beam', 'meanEnergy', 'Mean energy of the beam', 'keV', '', (e) => e.beam.meanEnergy_keV,
     'Mean photon energy of the beam leaving tube and filter, weighted by photon number.'),
-  q('exitMeanEnergy', 'Mean energy behind the patient', 'keV', '', (e) => e.transmission.exitMeanEnergy_keV,
+  q('beam', 'exitMeanEnergy', 'Mean energy behind the patient', 'keV', '', (e) => e.transmission.exitMeanEnergy_keV,
     'Mean photon energy of the primary beam at the exit face, after all layers have hardened it.'),
-  q('primaryTransmission', 'Primary transmission', '', '', (e) => e.transmission.primary,
+  q('beam', 'primaryTransmission', 'Primary transmission', '', '', (e) => e.transmission.primary,
     'Air kerma at the exit face over air kerma at the skin, primary photons only, inverse square removed.'),
-  q('tubeLoad', 'Tube load', 'mAs', 'per frame', (e) => e.exposure.tubeLoad_mAs,
+  q('exposure', 'tubeLoad', 'Tube load', 'mAs', 'per frame', (e) => e.exposure.tubeLoad_mAs,
     'Tube current times exposure time that the control needs to reach what it holds.'),
-  q('tubeCurrent', 'Tube current', 'mA', '', (e) => e.exposure.tubeCurrent_mA,
+  q('exposure', 'tubeCurrent', 'Tube current', 'mA', '', (e) => e.exposure.tubeCurrent_mA,
     'Tube load divided by exposure time, as the acquisition fixes one of the two.'),
-  q('exposureTime', 'Exposure time', 'ms', 'per frame', (e) => e.exposure.exposureTime_ms,
+  q('exposure', 'exposureTime', 'Exposure time', 'ms', 'per frame', (e) => e.exposure.exposureTime_ms,
     'Tube load divided by tube current, as the acquisition fixes one of the two.'),
-  q('power', 'Power', 'kW', '', (e) => e.exposure.power_kW, 'Tube current times potential.'),
-  q('incidentAirKerma', 'Incident air kerma', 'mGy', 'per frame', (e) => e.dose.incidentAirKerma_mGy,
+  q('exposure', 'power', 'Power', 'kW', '', (e) => e.exposure.power_kW, 'Tube current times potential.'),
+  q('dose', 'incidentAirKerma', 'Incident air kerma', 'mGy', 'per frame', (e) => e.dose.incidentAirKerma_mGy,
     'Air kerma on the axis at the skin, behind the support, without backscatter.'),
-  q('entranceSurfaceAirKerma', 'Entrance surface air kerma', 'mGy', 'per frame', (e) => e.dose.entranceSurfaceAirKerma_mGy,
+  q('dose', 'entranceSurfaceAirKerma', 'Entrance surface air kerma', 'mGy', 'per frame', (e) => e.dose.entranceSurfaceAirKerma_mGy,
     'Incident air kerma times the backscatter factor of this beam, field and stack.'),
-  q('backscatterFactor', 'Backscatter factor', '', '', (e) => e.dose.backscatterFactor,
+  q('dose', 'backscatterFactor', 'Backscatter factor', '', '', (e) => e.dose.backscatterFactor,
     'Entrance surface air kerma over incident air kerma.'),
-  q('referenceAirKerma', 'Reference air kerma', 'mGy', 'per frame', (e) => e.dose.referenceAirKerma_mGy,
+  q('dose', 'referenceAirKerma', 'Reference air kerma', 'mGy', 'per frame', (e) => e.dose.referenceAirKerma_mGy,
     'Air kerma at the room’s reference point, without backscatter.'),
-  q('kermaAreaProduct', 'Kerma-area product', 'Gy cm²', 'per frame', (e) => e.dose.kermaAreaProduct_Gycm2,
+  q('dose', 'kermaAreaProduct', 'Kerma-area product', 'Gy cm²', 'per frame', (e) => e.dose.kermaAreaProduct_Gycm2,
     'Incident air kerma times the area of the field at the skin.'),
-  q('energyImparted', 'Energy imparted', 'mJ', 'per frame', (e) => e.dose.energyImparted_mJ,
+  q('dose', 'energyImparted', 'Energy imparted', 'mJ', 'per frame', (e) => e.dose.energyImparted_mJ,
     'Energy of the beam that stays in the patient, primary and scattered.'),
-  q('meanAbsorbedDose', 'Mean absorbed dose', 'mGy', 'per frame', (e) => e.dose.meanAbsorbedDose_mGy,
+  q('dose', 'meanAbsorbedDose', 'Mean absorbed dose', 'mGy', 'per frame', (e) => e.dose.meanAbsorbedDose_mGy,
     'Energy imparted over the mass of the irradiated stack.'),
-  q('skinAbsorbedDose', 'Skin absorbed dose', 'mGy', 'per frame', (e) => e.dose.skinAbsorbedDose_mGy,
+  q('dose', 'skinAbsorbedDose', 'Skin absorbed dose', 'mGy', 'per frame', (e) => e.dose.skinAbsorbedDose_mGy,
     'Entrance surface air kerma times the ratio of mass energy absorption, skin over air.'),
-  q('incidentAirKermaRate', 'Incident air kerma rate', 'mGy/min', 'per minute', (e) => e.dose.incidentAirKermaRate_mGy_per_min,
+  q('dose', 'incidentAirKermaRate', 'Incident air kerma rate', 'mGy/min', 'per minute', (e) => e.dose.incidentAirKermaRate_mGy_per_min,
     'Incident air kerma per frame times the frame rate.'),
-  q('runIncidentAirKerma', 'Incident air kerma', 'mGy', 'per run', (e) => e.dose.perRun.incidentAirKerma_mGy,
+  q('dose', 'runIncidentAirKerma', 'Incident air kerma', 'mGy', 'per run', (e) => e.dose.perRun.incidentAirKerma_mGy,
     'Incident air kerma per frame times all frames of the run, masks counted.'),
-  q('runKermaAreaProduct', 'Kerma-area product', 'Gy cm²', 'per run', (e) => e.dose.perRun.kermaAreaProduct_Gycm2,
+  q('dose', 'runKermaAreaProduct', 'Kerma-area product', 'Gy cm²', 'per run', (e) => e.dose.perRun.kermaAreaProduct_Gycm2,
     'Kerma-area product per frame times all frames of the run, masks counted.'),
-  q('subjectContrast', 'Subject contrast', '', '', (e) => e.contrast.subject,
+  q('detail', 'subjectContrast', 'Subject contrast', '', '', (e) => e.contrast.subject,
     'Primary signal without the detail less with it, over without; negative when the detail is more transparent.'),
-  q('detectedContrast', 'Detected contrast', '', '', (e) => e.contrast.detected,
+  q('detail', 'detectedContrast', 'Detected contrast', '', '', (e) => e.contrast.detected,
     'Subject contrast after scatter behind the grid and glare have diluted it.'),
-  q('contrastDegradation', 'Contrast degradation factor', '', '', (e) => e.contrast.degradationFactor,
+  q('detail', 'contrastDegradation', 'Contrast degradation factor', '', '', (e) => e.contrast.degradationFactor,
     'Detected over subject contrast.'),
-  q('iodineEquivalent', 'Iodine equivalent', 'mg/cm²', '', (e) => e.contrast.iodineEquivalent_mg_per_cm2,
+  q('detail', 'iodineEquivalent', 'Iodine equivalent', 'mg/cm²', '', (e) => e.contrast.iodineEquivalent_mg_per_cm2,
     'Areal density of iodine that gives the same subject contrast in this beam behind this stack.'),
-  q('spr', 'Scatter to primary', '', '', (e) => e.scatter.spr,
+  q('scatter and grid', 'spr', 'Scatter to primary', '', '', (e) => e.scatter.spr,
     'Detector signal from scattered photons over that from primary ones at the field centre, no grid.'),
-  q('sprBehindGrid', 'Scatter to primary, behind grid', '', '', (e) => e.scatter.sprBehindGrid,
+  q('scatter and grid', 'sprBehindGrid', 'Scatter to primary, behind grid', '', '', (e) => e.scatter.sprBehindGrid,
     'The same behind the grid where it is in.'),
-  q('buckyFactor', 'Bucky factor', '', '', (e) => e.grid?.buckyFactor ?? null,
+  q('scatter and grid', 'buckyFactor', 'Bucky factor', '', '', (e) => e.grid?.buckyFactor ?? null,
     'One over the grid’s total transmission in this beam behind this stack.'),
-  q('selectivity', 'Grid selectivity', '', '', (e) => e.grid?.selectivity ?? null,
+  q('scatter and grid', 'selectivity', 'Grid selectivity', '', '', (e) => e.grid?.selectivity ?? null,
     'Transmission of primary over transmission of scatter.'),
-  q('snrImprovement', 'SNR improvement factor', '', '', (e) => e.grid?.snrImprovement ?? null,
+  q('scatter and grid', 'snrImprovement', 'SNR improvement factor', '', '', (e) => e.grid?.snrImprovement ?? null,
     'Primary transmission over the square root of total transmission; below 1 the grid costs more than it gives.'),
-  q('detectorAirKerma', 'Detector air kerma', 'µGy', 'per frame', (e) => e.detector.airKerma_uGy,
+  q('detector', 'detectorAirKerma', 'Detector air kerma', 'µGy', 'per frame', (e) => e.detector.airKerma_uGy,
     'Primary and scatter behind the grid, before the detector cover, at the field centre.'),
-  q('absorbedFraction', 'Absorbed in the detector', '', '', (e) => e.detector.absorbedFraction,
+  q('detector', 'absorbedFraction', 'Absorbed in the detector', '', '', (e) => e.detector.absorbedFraction,
     'Share of the primary photons’ energy that the detector absorbs.'),
-  q('noise', 'Noise', '', '', (e) => e.noise.total,
+  q('detector', 'noise', 'Noise', '', '', (e) => e.noise.total,
     'Relative standard deviation of the signal over the detail: quantum, electronic, structure and background together.'),
-  q('sdnr', 'SdNR', '', '', (e) => e.sdnr,
+  q('detector', 'sdnr', 'SdNR', '', '', (e) => e.sdnr,
     'Signal difference to noise ratio of the detail over its own area.'),
-  q('meritKerma', 'SdNR² per incident air kerma', '/mGy', '', (e) => e.figureOfMerit.perIncidentAirKerma_per_mGy,
+  q('merit', 'meritKerma', 'SdNR² per incident air kerma', '/mGy', '', (e) => e.figureOfMerit.perIncidentAirKerma_per_mGy,
     'SdNR squared over incident air kerma per frame: does not change with load while noise is quantum noise.'),
-  q('meritKap', 'SdNR² per kerma-area product', '/(Gy cm²)', '', (e) => e.figureOfMerit.perKermaAreaProduct_per_Gycm2,
+  q('merit', 'meritKap', 'SdNR² per kerma-area product', '/(Gy cm²)', '', (e) => e.figureOfMerit.perKermaAreaProduct_per_Gycm2,
     'SdNR squared over kerma-area product per frame.'),
-  q('meritTube', 'SdNR² per tube energy', '/kJ', '', (e) => e.figureOfMerit.perTubeEnergy_per_kJ,
+  q('merit', 'meritTube', 'SdNR² per tube energy', '/kJ', '', (e) => e.figureOfMerit.perTubeEnergy_per_kJ,
     'SdNR squared over the electrical energy put into the tube per frame.'),
 ] as const;
 

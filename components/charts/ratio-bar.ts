@@ -1,10 +1,9 @@
-import { svg, type SVGTemplateResult } from 'lit';
-import { html, type TemplateResult } from 'lit';
+import { html, type SVGTemplateResult, svg, type TemplateResult } from 'lit';
 import { formatRatio } from './format.js';
 
 /** Greatest ratio a bar can show either way; beyond it the bar ends in an arrow. */
 const reach = 4;
-const width = 76;
+const width = 84;
 const height = 10;
 
 /** Where a ratio lies on the bar's logarithmic scale, in px; 1 is the middle. */

@@ -6,6 +6,7 @@ export * from './case-store.js';
 export * from './draft.js';
 export * from './history.js';
 export * from './layer-changes.js';
+export * from './list-changes.js';
 export * from './path.js';
 export * from './stand-in.js';
 export * from './technique-changes.js';

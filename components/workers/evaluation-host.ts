@@ -1,17 +1,12 @@
+import { type AlongBeam, alongBeam } from '../../physics/along-beam.js';
 import type { ParsedCase } from '../../physics/case/index.js';
 import { sharedWith } from '../../physics/case/shared-with.js';
+import { operatingPoint } from '../../physics/operating-point.js';
 import type { Weighing } from '../../physics/results.js';
+import { sizesOf } from '../../physics/stack/sizes.js';
+import type { SweepSetting } from '../../physics/sweep/sweep-setting.js';
 import { weigh } from '../../physics/weigh.js';
-import { type DetailSpectra, detailSpectra } from './detail-spectra.js';
-import { type ScanHold, type ScanPoint, scanSlice } from './scan-slice.js';
-
-/** A stretch of the potential scan: one filter, some potentials, one size, one technique's frame. */
-export interface ScanRequest {
-  readonly size: string;
-  readonly filter: string;
-  readonly potentials_kV: readonly number[];
-  readonly hold: ScanHold;
-}
+import { type ScanRequest, scanSlice } from './scan-slice.js';
 
 /**
  * What the evaluation worker does, free of any worker: it is handed a case and answers about it.
@@ -20,8 +15,9 @@ export interface ScanRequest {
 export interface EvaluationHost {
   readonly load: (parsed: ParsedCase) => void;
   readonly weigh: () => Weighing;
-  readonly scan: (request: ScanRequest) => ScanPoint[];
-  readonly spectra: (size: string) => DetailSpectra;
+  /** Primary photons along the axis and the spectrum at the detail, per technique that has them. */
+  readonly along: (size: string) => AlongBeam[];
+  readonly scan: (request: ScanRequest) => SweepSetting[];
 }
 
 export function evaluationHost(): EvaluationHost {
@@ -35,7 +31,13 @@ export function evaluationHost(): EvaluationHost {
       loaded = { case: sharedWith(loaded?.case, next.case), assumed: next.assumed };
     },
     weigh: () => weigh(parsed()),
+    along: (name) => {
+      const { case: c } = parsed();
+      const size = sizesOf(c.patient).find((entry) => entry.name === name);
+      if (!size) return [];
+      const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
+      return points.flatMap((point) => ('made' in point ? [alongBeam(point)] : []));
+    },
     scan: (request) => scanSlice(parsed().case, request),
-    spectra: (size) => detailSpectra(parsed().case, size),
   };
 }

@@ -1,16 +1,17 @@
 import { type Remote, wrap } from 'comlink';
+import type { AlongBeam } from '../../physics/along-beam.js';
 import type { ParsedCase } from '../../physics/case/index.js';
 import type { Weighing } from '../../physics/results.js';
-import type { DetailSpectra } from './detail-spectra.js';
-import type { EvaluationHost, ScanRequest } from './evaluation-host.js';
-import type { ScanPoint } from './scan-slice.js';
+import type { SweepSetting } from '../../physics/sweep/sweep-setting.js';
+import type { EvaluationHost } from './evaluation-host.js';
+import type { ScanRequest } from './scan-slice.js';
 
 /** The evaluation worker as async functions. Every promise settles, also when the worker dies. */
 export interface Evaluator {
   readonly load: (parsed: ParsedCase) => Promise<void>;
   readonly weigh: () => Promise<Weighing>;
-  readonly scan: (request: ScanRequest) => Promise<ScanPoint[]>;
-  readonly spectra: (size: string) => Promise<DetailSpectra>;
+  readonly scan: (request: ScanRequest) => Promise<SweepSetting[]>;
+  readonly along: (size: string) => Promise<AlongBeam[]>;
   readonly end: () => void;
 }
 
@@ -52,7 +53,7 @@ export function startEvaluator(make: () => Worker): Evaluator {
     load: (parsed) => ask((to) => to.load(parsed)),
     weigh: () => ask((to) => to.weigh()),
     scan: (request) => ask((to) => to.scan(request)),
-    spectra: (size) => ask((to) => to.spectra(size)),
+    along: (size) => ask((to) => to.along(size)),
     end: () => lose('the evaluator was ended'),
   };
 }

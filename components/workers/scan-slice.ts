@@ -1,41 +1,27 @@
 import type { Case } from '../../physics/case/schema.js';
-import { heldLoad } from '../../physics/compare.js';
-import { evaluate } from '../../physics/evaluate.js';
 import { operatingPoint } from '../../physics/operating-point.js';
-import type { Evaluation, HoldConstant } from '../../physics/results.js';
+import type { HoldConstant } from '../../physics/results.js';
 import { sizesOf } from '../../physics/stack/sizes.js';
-import type { ScanRequest } from './evaluation-host.js';
+import { type SweepSetting, sweepSetting } from '../../physics/sweep/sweep-setting.js';
 
-/** What the scan keeps equal to Current as set while potential varies. */
-export type ScanHold = Exclude<HoldConstant, 'asSet'>;
-
-/** One setting of the potential scan, and the code of the limit that forbids it, if one does. */
-export interface ScanPoint {
-  readonly potential_kV: number;
+/** A stretch of the potential scan: one filter, some potentials, at one size. */
+export interface ScanRequest {
+  readonly size: string;
   readonly filter: string;
-  readonly evaluation: Evaluation;
-  readonly forbidden: string | null;
+  readonly potentials_kV: readonly number[];
+  readonly hold: HoldConstant;
 }
 
 /**
- * Evaluations of Current with another potential and filter, everything else as it is, one quantity
- * held equal to what Current delivers as set. Settings that cannot be computed are left out.
+ * Current with another potential and filter, everything else as it is, one quantity held equal to
+ * what Current delivers as set. Empty where Current itself cannot be computed.
  */
-export function scanSlice(c: Case, request: ScanRequest): ScanPoint[] {
-  const { filter, potentials_kV, hold } = request;
-  const size = sizesOf(c.patient).find(({ name }) => name === request.size);
-  if (!size) return [];
+export function scanSlice(c: Case, { size: name, filter, potentials_kV, hold }: ScanRequest): SweepSetting[] {
+  const size = sizesOf(c.patient).find((entry) => entry.name === name);
   const [technique] = c.techniques;
-  const current = operatingPoint(c, technique, size);
-  if (!('made' in current)) return [];
-  const control = { tubeLoad_mAs: current.tubeLoad_mAs };
-  return potentials_kV.flatMap((potential_kV) => {
-    const point = operatingPoint(c, { ...technique, potential_kV, filter, control }, size);
-    if (!('made' in point)) return [];
-    const { tubeLoad_mAs } = heldLoad(current, point, hold);
-    if (tubeLoad_mAs === null) return [];
-    const evaluation = evaluate(c, { ...point, tubeLoad_mAs }, 0);
-    const limit = evaluation.findings.find(({ severity }) => severity === 'limit');
-    return [{ potential_kV, filter, evaluation, forbidden: limit?.code ?? null }];
-  });
+  const current = size && operatingPoint(c, technique, size);
+  if (!current || !('made' in current)) return [];
+  return potentials_kV.map((potential_kV) =>
+    sweepSetting(c, current, { potential_kV, filter, grid: technique.grid }, hold),
+  );
 }

@@ -30,7 +30,7 @@ export class BeamPath extends LitElement {
 
   static override styles = beamPathSheet;
 
-  private readonly watcher = new ResizeObserver(() => this.arrange());
+  private readonly watcher = new ResizeObserver(() => this.measure());
 
   override connectedCallback() {
     super.connectedCallback();
@@ -54,13 +54,21 @@ export class BeamPath extends LitElement {
     return spineLayout({ ...this.spine, layers_mm, detailDepth_mm: detail?.centreDepth_mm ?? null });
   }
 
+  /** Takes the size the page gives the spine; drawing and rows follow. */
+  private measure() {
+    const spine = this.renderRoot.querySelector<HTMLElement>('.spine');
+    if (!spine) return;
+    const { offsetWidth: width, offsetHeight: height } = spine;
+    if (width === 0 || height === 0) return;
+    if (width !== this.spine.width || height !== this.spine.height) this.spine = { width, height };
+    else this.arrange();
+  }
+
   /** Puts the rows of both sides at the same heights, near where they act, and draws the leaders. */
   private arrange() {
     const root = this.renderRoot;
     const spine = root.querySelector<HTMLElement>('.spine');
     if (!spine) return;
-    const { offsetWidth: width, offsetHeight: height } = spine;
-    if (width !== this.spine.width || height !== this.spine.height) this.spine = { width, height };
     const { stack, detail } = placed(this.model);
     const layout = this.layout(stack, detail);
     const rowsOf = (id: string) => [...root.querySelectorAll<HTMLElement>(`.row[data-station="${id}"]`)];

@@ -11,7 +11,8 @@ export function leaderPath(row: HTMLElement, spine: HTMLElement, layout: SpineLa
   const edge = onLeft ? side.offsetLeft + side.offsetWidth + 3 : side.offsetLeft - 3;
   const body = spine.offsetLeft + (onLeft ? layout.left - 6 : layout.right + layout.recede.x + 6);
   const inBody = anchor >= layout.support.top;
-  const near = onLeft ? spine.offsetLeft + layout.axis - 60 : spine.offsetLeft + layout.axis + 60;
+  const clear = anchor === layout.tube && !onLeft ? 112 : 56;
+  const near = spine.offsetLeft + layout.axis + (onLeft ? -clear : clear);
   const end = inBody ? body : near;
   const elbow = onLeft ? edge + 8 : edge - 8;
   return `M${edge},${y} H${elbow} L${onLeft ? Math.max(elbow, edge + 16) : Math.min(elbow, edge - 16)},${anchor} H${end} `;

@@ -1,5 +1,5 @@
 import { html, nothing, type TemplateResult } from 'lit';
-import { formatNumber } from '../../charts/format.js';
+import { formatEntry } from '../../charts/format.js';
 import { placeAlong } from '../../charts/place-along.js';
 import type { SpineLayout } from '../../charts/spine-layout.js';
 import type { Stack } from '../../../physics/stack/stack.js';
@@ -9,25 +9,28 @@ import '../detail-label/detail-label.js';
 
 const labelHeight = 21;
 
+/** Lengths to a tenth of a millimetre, without needless zeros. */
+const length = (value_mm: number): string => formatEntry(Number(value_mm.toFixed(1)));
+
 const at = (x: number, y: number): string => `left:${x.toFixed(0)}px; top:${y.toFixed(0)}px`;
 
 /** Tube, air, support, grid and detector, named where they stand. */
 function fixtures(model: DeskModel, layout: SpineLayout, stack: Stack | null): TemplateResult {
   const { room } = model.draft.case;
   const { tube, support, grid, detector, geometry } = room;
-  const target = room.source ? `${room.source.kind} source` : `tungsten, ${formatNumber(tube.anodeAngle_deg)}°`;
-  const slabs = support.map((slab) => `${slab.material} ${formatNumber(slab.thickness_mm)} mm`).join(', ');
-  const behind = stack ? `, ${formatNumber(stack.exitToDetector_mm)} mm behind the patient` : '';
-  const gridWords = grid ? `grid ${formatNumber(grid.ratio)}:1, ${formatNumber(grid.strips_per_cm)} per cm` : 'no grid';
+  const target = room.source ? `${room.source.kind} source` : `tungsten, ${formatEntry(tube.anodeAngle_deg)}°`;
+  const slabs = support.map((slab) => `${slab.material} ${formatEntry(slab.thickness_mm)} mm`).join(', ');
+  const behind = stack ? `, ${length(stack.exitToDetector_mm)} mm behind the patient` : '';
+  const gridWords = grid ? `grid ${formatEntry(grid.ratio)}:1, ${formatEntry(grid.strips_per_cm)} per cm` : 'no grid';
   return html`
     <span class="label soft" style=${at(layout.axis + 12, layout.tube - 8)}>${target}</span>
     ${stack
-      ? html`<span class="label soft" style=${at(layout.axis + 70, layout.airBreak - 9)}>${formatNumber(stack.sourceToSkin_mm)} mm to the skin</span>`
+      ? html`<span class="label soft" style=${at(layout.axis + 70, layout.airBreak - 9)}>${length(stack.sourceToSkin_mm)} mm to the skin</span>`
       : nothing}
     ${slabs ? html`<span class="label soft" style=${at(layout.left, layout.support.top - 19)}>${slabs}</span>` : nothing}
     <span class="label soft wash" style=${at(layout.left, layout.grid - 19)}>${gridWords}</span>
     <span class="label soft" style=${at(layout.left, layout.detector.bottom + 4)}
-      >${detector.material}, ${formatNumber(geometry.sourceToDetector_mm)} mm from the focal spot${behind}</span>`;
+      >${detector.material}, ${length(geometry.sourceToDetector_mm)} mm from the focal spot${behind}</span>`;
 }
 
 /** Words on the spine: fixtures, every layer with its material and thickness, and the detail. */

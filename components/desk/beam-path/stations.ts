@@ -17,7 +17,7 @@ export interface Station {
 }
 
 /** A computed number with its name above it; the right-hand side also shows its ratio to the left. */
-function figure(id: string, name?: string) {
+function figure(id: string, name?: string, unit: string | null = null) {
   return (model: DeskModel, technique: number): TemplateResult | typeof nothing => {
     const entry = quantity(id);
     const read = (index: number | null) => {
@@ -29,7 +29,7 @@ function figure(id: string, name?: string) {
     const compared = technique !== model.left && value !== null && before ? value / before : undefined;
     const per = entry.per ? `, ${entry.per}` : '';
     return html`<span class="name">${name ?? entry.name}${per}</span
-      ><figure-value quantity=${id} .value=${value} .ratio=${compared} ?stale=${model.stale}
+      ><figure-value quantity=${id} .value=${value} .ratio=${compared} .unit=${unit} ?stale=${model.stale}
         technique=${model.draft.case.techniques[technique].name}></figure-value>`;
   };
 }
@@ -44,15 +44,15 @@ function figureIfKnown(id: string) {
 }
 
 const methodWords: Record<Evaluation['scatter']['method'], string> = {
-  'first-order': 'first order only',
+  'first-order': 'first order',
   estimate: 'estimate',
   transport: 'transport',
 };
 
 const scatterStation: Station['content'] = (model, technique) => {
   const method = evaluationOf(model, technique)?.scatter.method;
-  const name = `Scatter to primary, behind grid${method ? ` · ${methodWords[method]}` : ''}`;
-  return figure('sprBehindGrid', name)(model, technique);
+  const unit = method ? methodWords[method] : '';
+  return figure('sprBehindGrid', 'Scatter to primary, behind grid', unit)(model, technique);
 };
 
 const loadStation: Station['content'] = (model, technique) => {

@@ -10,7 +10,7 @@ export class CautionFooter extends LitElement {
       border-block-start: 1px solid var(--rule);
       background: var(--paper);
       color: var(--soft);
-      font-size: 0.6875rem;
+      font-size: 0.65rem;
       line-height: 1.4;
       padding: 0.4rem 1.75rem;
     }

@@ -1,6 +1,6 @@
 import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
-import type { ComparisonRow, HoldConstant } from '../../../physics/results.js';
+import type { ComparisonRow, HoldConstant, Ratios } from '../../../physics/results.js';
 import { formatRatio } from '../../charts/format.js';
 import { ratioNames } from '../../charts/quantities.js';
 import { comparisonOf, type DeskModel } from '../model/desk-model.js';
@@ -12,6 +12,9 @@ const columns: readonly (readonly [HoldConstant, string])[] = [
   ['detectorAirKerma', 'equal detector air kerma'],
   ['incidentAirKerma', 'equal incident air kerma'],
 ];
+
+/** What the margin has room for, besides the dose the case leads with; Balance shows all. */
+const inMargin: readonly (keyof Ratios)[] = ['incidentAirKerma', 'energyImparted', 'tubeLoad', 'power', 'detectedContrast', 'sdnr'];
 
 /**
  * Proposed over Current under every equality, one column each.
@@ -32,8 +35,19 @@ export class ComparisonTable extends LitElement {
       tbody th {
         color: var(--soft);
       }
-      th:not(:first-child) {
-        max-width: 5.2rem;
+      tbody th {
+        white-space: nowrap;
+      }
+      thead th:not(:first-child) {
+        width: 4.5rem;
+      }
+      thead th:nth-child(2),
+      thead th:nth-child(3) {
+        width: 2.9rem;
+      }
+      th,
+      td {
+        padding-inline-start: 0.4rem;
       }
     `,
   ];
@@ -43,7 +57,10 @@ export class ComparisonTable extends LitElement {
     if (!comparison) return nothing;
     const rowOf = (hold: HoldConstant): ComparisonRow | undefined =>
       comparison.rows.find((row) => row.holdConstant === hold);
-    const known = ratioNames.filter(([key]) => comparison.rows.some((row) => row.ratio[key] !== null));
+    const { primaryDose } = this.model.draft.case.compare;
+    const known = ratioNames.filter(
+      ([key]) => (inMargin.includes(key) || key === primaryDose) && comparison.rows.some((row) => row.ratio[key] !== null),
+    );
     return html`<table class=${this.model.stale ? 'stale' : ''}>
       <caption class="unseen">Ratios of ${comparison.to} to ${comparison.from}, size ${comparison.size}</caption>
       <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${columns.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>

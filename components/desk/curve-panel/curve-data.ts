@@ -1,16 +1,11 @@
 import { agent } from '../../../materials/index.js';
 import type { Case } from '../../../physics/case/schema.js';
+import { costs } from '../../../physics/sweep/costs.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import type { DoseCurveData } from '../../charts/dose-curve.js';
 import { limitName } from '../../charts/limit-names.js';
 import { type Quantity, quantity } from '../../charts/quantities.js';
 import { evaluationOf, sizeShown, type DeskModel } from '../model/desk-model.js';
-import type { ScanPoint } from '../../workers/scan-slice.js';
-
-const valueIds: Record<Case['compare']['leading'], string> = {
-  sdnr: 'sdnr',
-  subjectContrast: 'subjectContrast',
-  detectedContrast: 'detectedContrast',
-};
 
 /** The words for an agent that is not in clinical use; null for one that is, or none. */
 export const investigationalWords = (c: Case): string | null => {
@@ -20,12 +15,12 @@ export const investigationalWords = (c: Case): string | null => {
 
 /** The quantities on the two axes, as the case chooses them. */
 export const curveAxes = ({ compare }: Case): { value: Quantity; dose: Quantity } => ({
-  value: quantity(valueIds[compare.leading]),
+  value: quantity(compare.leading),
   dose: quantity(compare.primaryDose),
 });
 
 /** What the curve shows, from the scan and the techniques as set. */
-export function curveData(model: DeskModel, scan: readonly ScanPoint[], holdConstant: string): DoseCurveData {
+export function curveData(model: DeskModel, scan: readonly SweepSetting[], holdConstant: string): DoseCurveData {
   const { case: c } = model.draft;
   const { value, dose } = curveAxes(c);
   const shown = [model.left, ...(model.right === null ? [] : [model.right])];
@@ -35,12 +30,12 @@ export function curveData(model: DeskModel, scan: readonly ScanPoint[], holdCons
     ink: inkOf(name),
     points: scan
       .filter((point) => point.filter === name)
-      .flatMap((point) => {
-        const cost = dose.of(point.evaluation);
-        const shows = value.of(point.evaluation);
-        return cost === null || shows === null
-          ? []
-          : [{ potential_kV: point.potential_kV, dose: cost, value: shows, forbidden: point.forbidden && limitName(point.forbidden) }];
+      .flatMap(({ potential_kV, values, findings }) => {
+        const cost = values && costs[c.compare.primaryDose].of(values);
+        if (values === null || cost === null) return [];
+        const limit = findings.find(({ severity }) => severity === 'limit');
+        const forbidden = limit ? limitName(limit.code) : null;
+        return [{ potential_kV, dose: cost, value: values[c.compare.leading], forbidden }];
       }),
   }));
   const marks = shown.flatMap((index) => {

@@ -1,12 +1,12 @@
 import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { type DoseCurveData, doseCurve, pointsAt } from '../../charts/dose-curve.js';
 import { doseCurveTable } from '../../charts/dose-curve-table.js';
 import { formatNumber } from '../../charts/format.js';
 import { sizeShown, type DeskModel } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { curveAxes, curveData } from './curve-data.js';
-import type { ScanPoint } from '../../workers/scan-slice.js';
 import '../fields/choice-field.js';
 
 const values = [
@@ -42,7 +42,7 @@ export const holds = [
 @customElement('curve-panel')
 export class CurvePanel extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
-  @property({ attribute: false }) scan: readonly ScanPoint[] | null = null;
+  @property({ attribute: false }) scan: readonly SweepSetting[] | null = null;
   @property() hold = 'detectorAirKerma';
   @property({ type: Boolean }) stale = false;
   @property({ type: Number }) width = 360;

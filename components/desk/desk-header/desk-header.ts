@@ -1,7 +1,7 @@
-import { LitElement, css, html } from 'lit';
+import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
-import { formatNumber } from '../../charts/format.js';
+import { formatEntry } from '../../charts/format.js';
 import type { DeskModel } from '../model/desk-model.js';
 import '../fields/text-field.js';
 
@@ -169,7 +169,7 @@ export class DeskHeader extends LitElement {
         <text-field inline class="title" .draft=${draft} path="title" label="Title of the case" placeholder="untitled case"></text-field>
         <text-field inline class="question" .draft=${draft} path="question" label="Question" placeholder="what is asked?"></text-field>
         <nav aria-label="Sections">
-          ${this.sections.map(({ id, name }) => html`<a href="#${id}" aria-current=${this.here === id ? 'true' : null}>${name}</a>`)}
+          ${this.sections.map(({ id, name }) => html`<a href="#${id}" aria-current=${this.here === id ? 'true' : nothing}>${name}</a>`)}
         </nav>
       </div>
       <div class="menu">
@@ -178,7 +178,7 @@ export class DeskHeader extends LitElement {
         ${this.command('undo', 'Undo', this.canUndo, 'Ctrl+Z')} ${this.command('redo', 'Redo', this.canRedo, 'Ctrl+Shift+Z')}
         <span class="status" role="status">${this.status}</span>
         <label>size <select @change=${this.chosen('choose-size')}>${sizesOf(draft.case.patient).map(
-          ({ name, thickness_mm }) => html`<option value=${name} ?selected=${name === sizeName} .selected=${name === sizeName}>${name}, ${formatNumber(thickness_mm, 4)} mm</option>`,
+          ({ name, thickness_mm }) => html`<option value=${name} ?selected=${name === sizeName} .selected=${name === sizeName}>${name}, ${formatEntry(thickness_mm)} mm</option>`,
         )}</select></label>
         ${this.command('paper', `paper: ${this.paper}`)}
       </div>

@@ -78,6 +78,7 @@ export class NumberField extends LitElement {
   override render() {
     const fault = faultAt(this.draft, this.path);
     const assumed = isAssumed(this.draft, this.path);
+    const unit = this.unitShown ?? this.unit;
     const text = this.text;
     const chars = Math.max(1, text.length || (this.empty ?? '').length);
     return html`<label class=${`${assumed ? 'assumed' : ''} ${fault ? 'faulty' : ''}`} title=${assumed ? 'assumed: the case is silent here' : nothing}
@@ -90,7 +91,7 @@ export class NumberField extends LitElement {
             aria-invalid=${fault ? 'true' : 'false'} aria-describedby=${fault ? 'fault' : nothing}
             @input=${(event: Event) => this.resize(event.target as HTMLInputElement)}
             @keydown=${this.onKey} @change=${(event: Event) => this.commit((event.target as HTMLInputElement).value)}
-          /><span class="unit">${this.unitShown ?? this.unit}</span></span
+          />${unit ? html`<span class="unit">${unit}</span>` : nothing}</span
         ></label
       >${faultNote(fault)}`;
   }

@@ -53,6 +53,15 @@ export class FigureValue extends LitElement {
       :host([small]) button {
         font-size: inherit;
       }
+      .value {
+        display: inline-flex;
+        align-items: baseline;
+        gap: 0.3em;
+      }
+      /* Ratios of one column share the place of their 1. */
+      .value.compared {
+        min-width: 6.6rem;
+      }
       button:hover {
         text-decoration: underline dotted 1px;
         text-underline-offset: 3px;
@@ -85,8 +94,8 @@ export class FigureValue extends LitElement {
     const { name, unit } = quantity(this.quantity);
     const shown = formatNumber(this.value);
     const shownUnit = this.unit ?? unit;
-    return html`<button part="figure" type="button" aria-label="${name}, ${this.technique}: ${shown} ${shownUnit}" @click=${this.explain}>${shown}</button
-      >${shownUnit ? html`<span class="unit">${shownUnit}</span>` : nothing}${this.ratio === undefined ? nothing : ratioBar(this.ratio)}`;
+    return html`<span class=${this.ratio === undefined ? 'value' : 'value compared'}><button part="figure" type="button" aria-label="${name}, ${this.technique}: ${shown} ${shownUnit}" @click=${this.explain}>${shown}</button
+      >${shownUnit ? html`<span class="unit">${shownUnit}</span>` : nothing}</span>${this.ratio === undefined ? nothing : ratioBar(this.ratio)}`;
   }
 }
 

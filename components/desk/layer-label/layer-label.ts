@@ -1,6 +1,6 @@
 import { LitElement, css, html, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
-import { formatNumber } from '../../charts/format.js';
+import { formatEntry } from '../../charts/format.js';
 import type { DeskModel } from '../model/desk-model.js';
 import { layerEdits } from '../layer-fields/layer-edits.js';
 import { layerKeys } from '../layer-fields/layer-keys.js';
@@ -49,7 +49,7 @@ export class LayerLabel extends LitElement {
         .choices=${materialChoices(draft)}></choice-field>
       <number-field data-field inline .draft=${draft} path="${path}.thickness_mm" label="Thickness of layer ${layer.name}" unit="mm"
         .edit=${layerEdits.thickness(this.index)}></number-field>
-      ${grown ? html`<span class="grown">${formatNumber(this.thickness_mm, 4)} at this size</span>` : nothing}`;
+      ${grown ? html`<span class="grown">${formatEntry(Number(this.thickness_mm.toFixed(1)))} at this size</span>` : nothing}`;
   }
 }
 

@@ -1,3 +1,4 @@
+import type { AlongBeam } from '../../../physics/along-beam.js';
 import type { Size } from '../../../physics/case/schema.js';
 import type { Comparison, Evaluation, Weighing } from '../../../physics/results.js';
 import { type PlacedDetail, placeDetail } from '../../../physics/stack/place-detail.js';
@@ -11,6 +12,8 @@ export interface DeskModel {
   readonly draft: Draft;
   /** The last answer; null before the first. */
   readonly weighing: Weighing | null;
+  /** The beam along the axis at the size looked at, per technique that could be computed. */
+  readonly along: readonly AlongBeam[];
   /** True while `weighing` belongs to an earlier state of the draft. */
   readonly stale: boolean;
   readonly sizeName: string;

@@ -1,9 +1,9 @@
 import type { ParsedCase } from '../../../physics/case/index.js';
-import type { Weighing } from '../../../physics/results.js';
-import type { DetailSpectra } from '../../workers/detail-spectra.js';
+import type { AlongBeam } from '../../../physics/along-beam.js';
+import type { HoldConstant, Weighing } from '../../../physics/results.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import type { Evaluator } from '../../workers/evaluator.js';
 import { latestWins, superseded } from '../../workers/latest-wins.js';
-import type { ScanHold, ScanPoint } from '../../workers/scan-slice.js';
 import { scanPlan } from './scan-plan.js';
 
 /** What is asked for a state of the desk. */
@@ -11,18 +11,24 @@ export interface Question {
   readonly revision: number;
   readonly parsed: ParsedCase;
   readonly size: string;
-  readonly hold: ScanHold;
+  readonly hold: HoldConstant;
+}
+
+/** What the beam path shows. */
+export interface Answer {
+  readonly weighing: Weighing;
+  readonly along: readonly AlongBeam[];
 }
 
 /** Where answers go, each with the question it belongs to. */
 export interface AnswerSink {
-  readonly weighing: (weighing: Weighing, question: Question) => void;
-  readonly curve: (scan: readonly ScanPoint[], spectra: DetailSpectra, question: Question) => void;
+  readonly answer: (answer: Answer, question: Question) => void;
+  readonly curve: (scan: readonly SweepSetting[], question: Question) => void;
   readonly failed: (message: string, question: Question) => void;
 }
 
 /**
- * Asks the evaluator: first the weighing, then, while nothing newer was asked, the spectra and the
+ * Asks the evaluator: first what the beam path shows, then, while nothing newer was asked, the
  * potential scan in slices. The latest question wins; an error reaches the sink and stops nothing.
  */
 export function answering(evaluator: Evaluator, sink: AnswerSink): (question: Question) => void {
@@ -30,24 +36,24 @@ export function answering(evaluator: Evaluator, sink: AnswerSink): (question: Qu
 
   const weigh = latestWins(async (question: Question) => {
     await evaluator.load(question.parsed);
-    return evaluator.weigh();
+    const [weighing, along] = await Promise.all([evaluator.weigh(), evaluator.along(question.size)]);
+    return { weighing, along };
   });
   const scan = async (question: Question) => {
-    const spectra = await evaluator.spectra(question.size);
-    const points: ScanPoint[] = [];
+    const points: SweepSetting[] = [];
     for (const request of scanPlan(question.parsed.case, question.size, question.hold)) {
       if (latest !== question) return;
       points.push(...(await evaluator.scan(request)));
     }
-    if (latest === question) sink.curve(points, spectra, question);
+    if (latest === question) sink.curve(points, question);
   };
 
   return async (question) => {
     latest = question;
     try {
-      const weighing = await weigh(question);
-      if (weighing === superseded) return;
-      sink.weighing(weighing, question);
+      const answer = await weigh(question);
+      if (answer === superseded) return;
+      sink.answer(answer, question);
       if (latest === question) await scan(question);
     } catch (error) {
       sink.failed(error instanceof Error ? error.message : String(error), question);

@@ -2,14 +2,14 @@ import { LitElement, html, nothing } from 'lit';
 import { customElement, property, query } from 'lit/decorators.js';
 import type { Fault } from '../../../physics/case/index.js';
 import type { Finding } from '../../../physics/results.js';
-import type { DetailSpectra } from '../../workers/detail-spectra.js';
-import type { ScanPoint } from '../../workers/scan-slice.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
 import type { ExplainCard } from '../explain-card/explain-card.js';
 import type { ExplainRequest } from '../figure-value/figure-value.js';
 import { comparisonOf, evaluationOf, type DeskModel } from '../model/desk-model.js';
 import type { Paper } from './paper.js';
 import { sectionInView } from './section-in-view.js';
+import '../balance-section/balance-section.js';
 import '../beam-path/beam-path.js';
 import '../caution-footer/caution-footer.js';
 import '../comparison-table/comparison-table.js';
@@ -18,6 +18,10 @@ import '../desk-header/desk-header.js';
 import '../explain-card/explain-card.js';
 import '../fault-list/fault-list.js';
 import '../finding-list/finding-list.js';
+import '../patient-section/patient-section.js';
+import '../room-section/room-section.js';
+import '../task-section/task-section.js';
+import '../techniques-section/techniques-section.js';
 
 /** The sections of the working paper that are built, in their order. */
 export const sections = [
@@ -32,7 +36,7 @@ export const sections = [
  * The arrangement of the desk: head, beam path, margin with curve, table and findings, the working
  * paper below, cautions. Lives in the page itself, not in a shadow, so that sections have addresses.
  *
- * Properties: `model` (nothing is drawn before it is set), `scan`, `spectra`, `hold`, and what the
+ * Properties: `model` (nothing is drawn before it is set), `scan`, `curveStale`, `hold`, and what the
  * head shows: `examples`, `canUndo`, `canRedo`, `status`, `paper`; `refused` (a file not opened and
  * why), `trouble` (why there is no answer). Events: `case-edit`, `command`, `example`,
  * `choose-size`, `choose-hold`, `show-technique` from what it holds.
@@ -40,8 +44,7 @@ export const sections = [
 @customElement('desk-page')
 export class DeskPage extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
-  @property({ attribute: false }) scan: readonly ScanPoint[] | null = null;
-  @property({ attribute: false }) spectra: DetailSpectra | null = null;
+  @property({ attribute: false }) scan: readonly SweepSetting[] | null = null;
   @property({ type: Boolean }) curveStale = false;
   @property() hold = 'detectorAirKerma';
   @property({ attribute: false }) examples: readonly string[] = [];
@@ -117,7 +120,13 @@ export class DeskPage extends LitElement {
             <finding-list .findings=${this.findings()} ?stale=${model.stale}></finding-list>
           </div>
         </aside>
-        <div class="sections"></div>
+        <div class="sections">
+          <room-section id="room" .model=${model}></room-section>
+          <patient-section id="patient" .model=${model}></patient-section>
+          <task-section id="task" .model=${model}></task-section>
+          <techniques-section id="techniques" .model=${model}></techniques-section>
+          <balance-section id="balance" .model=${model}></balance-section>
+        </div>
       </main>
       <caution-footer></caution-footer>
       <explain-card></explain-card>`;

@@ -1,4 +1,5 @@
 import type { Fault } from '../../../physics/case/index.js';
+import type { HoldConstant } from '../../../physics/results.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { autosave } from '../../store/autosave.js';
 import { chooseFiles, fileNameFor, readHanded, saveCase } from '../../store/case-files.js';
@@ -6,7 +7,6 @@ import { createCaseStore, type Sheet, type StoreState } from '../../store/case-s
 import { valueAtPath } from '../../store/path.js';
 import { startEvaluator } from '../../workers/evaluator.js';
 import { makeEvaluationWorker } from '../../workers/make-evaluation-worker.js';
-import type { ScanHold } from '../../workers/scan-slice.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
 import { answering } from './answers.js';
 import type { DeskPage } from './desk-page.js';
@@ -27,13 +27,12 @@ export async function startDesk(page: DeskPage): Promise<void> {
   }
 
   const ask = answering(startEvaluator(makeEvaluationWorker), {
-    weighing: (weighing, { revision }) => {
-      page.model = { ...page.model, weighing, stale: revision !== store.state().revision };
+    answer: (answer, { revision }) => {
+      page.model = { ...page.model, ...answer, stale: revision !== store.state().revision };
       page.trouble = '';
     },
-    curve: (scan, spectra) => {
+    curve: (scan) => {
       page.scan = scan;
-      page.spectra = spectra;
       page.curveStale = false;
     },
     failed: (message) => {
@@ -44,7 +43,7 @@ export async function startDesk(page: DeskPage): Promise<void> {
   const askAgain = () => {
     const { draft, revision } = store.state();
     page.curveStale = true;
-    ask({ revision, parsed: draft, size: page.model.sizeName, hold: page.hold as ScanHold });
+    ask({ revision, parsed: draft, size: page.model.sizeName, hold: page.hold as HoldConstant });
   };
 
   let keeping: ReturnType<typeof setTimeout> | undefined;
@@ -55,6 +54,7 @@ export async function startDesk(page: DeskPage): Promise<void> {
     page.model = {
       draft,
       weighing: page.model?.weighing ?? null,
+      along: page.model?.along ?? [],
       stale: true,
       sizeName: sizes.includes(page.model?.sizeName) ? page.model.sizeName : sizes[0],
       left: 0,

@@ -1,9 +1,10 @@
 import { LitElement, css, html } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
-import { type FluencePoint, fluenceAlong, inkDensity } from '../../charts/beam-shade.js';
+import type { Stack } from '../../../physics/stack/stack.js';
+import { drawnAt, inkDensity, mostPhotons } from '../../charts/beam-shade.js';
 import { type BeamHalf, sectionDrawing } from '../../charts/section-drawing.js';
 import type { SpineLayout } from '../../charts/spine-layout.js';
-import { evaluationOf, placed, type DeskModel } from '../model/desk-model.js';
+import { placed, type DeskModel } from '../model/desk-model.js';
 import { drawingSheet } from '../sheets/drawing-sheet.js';
 
 /**
@@ -32,32 +33,25 @@ export class StackView extends LitElement {
     `,
   ];
 
-  /** Photons per mm² along the page for one technique; empty before the first answer. */
-  private fluence(technique: number | null): FluencePoint[] {
-    const { stack } = placed(this.model);
-    const evaluation = evaluationOf(this.model, technique);
-    if (!stack || !evaluation) return [];
-    return fluenceAlong(evaluation, this.layout, {
-      sourceToSkin_mm: stack.sourceToSkin_mm,
-      exitToDetector_mm: stack.exitToDetector_mm,
-      layers_mm: stack.layers.map((layer) => layer.thickness_mm),
-      parallel: stack.beam === 'parallel',
-    });
-  }
-
-  private half(technique: number, points: readonly FluencePoint[], most: number): BeamHalf {
-    const { techniques, room } = this.model.draft.case;
-    const { filter, grid } = techniques[technique];
-    const layers = room.filters.find((entry) => entry.name === filter)?.layers ?? [];
-    const shade = points.map(({ y, fluence_per_mm2 }) => ({ y, density: inkDensity(fluence_per_mm2, most) }));
+  private half(technique: number, stack: Stack | null): BeamHalf {
+    const { draft, along } = this.model;
+    const { name, filter, grid } = draft.case.techniques[technique];
+    const layers = draft.case.room.filters.find((entry) => entry.name === filter)?.layers ?? [];
+    const beam = along.find((entry) => entry.technique === name);
+    const most = mostPhotons(along);
+    const shade =
+      stack && beam
+        ? beam.distances_mm.map((distance_mm, i) => ({
+            y: drawnAt(distance_mm, this.layout, stack),
+            density: inkDensity(beam.primaryFluence_per_mm2[i], most),
+          }))
+        : [];
     return { index: technique, filtered: layers.length > 0, gridIn: grid === 'in', shade };
   }
 
   override render() {
     const { left, right, draft } = this.model;
     const { stack, detail } = placed(this.model);
-    const points = [this.fluence(left), this.fluence(right)];
-    const most = Math.max(0, ...points.flat().map((point) => point.fluence_per_mm2));
     const { width, height } = this.layout;
     const names = draft.case.patient.layers.map((layer, i) => ({
       name: layer.name,
@@ -73,7 +67,7 @@ export class StackView extends LitElement {
         height_mm: detail.central.displaced_mm,
         round: detail.shape === 'vessel',
       },
-      halves: [this.half(left, points[0], most), right === null ? null : this.half(right, points[1], most)],
+      halves: [this.half(left, stack), right === null ? null : this.half(right, stack)],
       idPrefix: 'stack',
     });
     const words = `Section through the beam: ${names.map((layer) => layer.name).join(', ')}. Thicknesses are in the fields beside it.`;

@@ -29,8 +29,9 @@ export function techniqueName(model: DeskModel, technique: number): TemplateResu
 
 /** Potential, typed in place. */
 export const potentialField = (model: DeskModel, technique: number): TemplateResult =>
-  html`<number-field .draft=${model.draft} path="techniques[${technique}].potential_kV" label="Potential" unit="kV"
-    step=${model.draft.case.room.tube.potential_kV.step}></number-field>`;
+  html`<span class="name">Potential</span
+    ><number-field inline style="--field-size:var(--value)" .draft=${model.draft} path="techniques[${technique}].potential_kV" label="Potential" unit="kV"
+      step=${model.draft.case.room.tube.potential_kV.step}></number-field>`;
 
 /** Filter among the room's, and the half-value layer it gives. */
 export const filterField = (model: DeskModel, technique: number): TemplateResult =>

@@ -1,26 +1,38 @@
-import type { ScanPoint } from '../../../components/workers/scan-slice.js';
-import { sampleWeighing } from './weighing.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 
 /** Smooth invented curves with the look of real ones. */
-const point = (potential_kV: number, filter: string, hardness: number): ScanPoint => {
-  const base = sampleWeighing.evaluations[0];
-  const kerma = 1.42 * hardness * (80 / potential_kV) ** 2.6;
+const setting = (potential_kV: number, filter: string, hardness: number): SweepSetting => {
+  const kerma_mGy = 1.42 * hardness * (80 / potential_kV) ** 2.6;
   const sdnr = 9.8 * (80 / potential_kV) ** 0.9 * (hardness < 1 ? 0.86 : 1);
+  const isBeyond = filter === '0.9 Cu' || (filter === '0.2 Cu' && potential_kV < 58);
   return {
     potential_kV,
     filter,
-    forbidden: filter === '0.9 Cu' || (filter === '0.2 Cu' && potential_kV < 58) ? 'beyond the tube' : null,
-    evaluation: {
-      ...base,
-      setting: { potential_kV, filter, grid: 'in' },
+    size: 'median',
+    values: {
+      tubeLoad_mAs: 20,
+      tubeCurrent_mA: 250,
+      exposureTime_ms: 80,
+      power_kW: 20,
       sdnr,
-      dose: { ...base.dose, incidentAirKerma_mGy: kerma, kermaAreaProduct_Gycm2: kerma * 0.31 },
+      subjectContrast: 0.15,
+      detectedContrast: 0.09,
+      sprBehindGrid: 0.6,
+      detectorAirKerma_uGy: 2.5,
+      incidentAirKerma_mGy: kerma_mGy,
+      entranceSurfaceAirKerma_mGy: null,
+      kermaAreaProduct_Gycm2: kerma_mGy * 0.31,
+      energyImparted_mJ: null,
+      meanAbsorbedDose_mGy: null,
+      halfValueLayer_mmAl: 3,
+      elementMass_g: 0.03,
     },
+    findings: isBeyond ? [{ code: 'power', severity: 'limit', message: 'Invented: beyond the tube.' }] : [],
   };
 };
 
 const hardness: Record<string, number> = { none: 1, '0.2 Cu': 0.35, '0.9 Cu': 0.2 };
 
-export const sampleScan: ScanPoint[] = Object.keys(hardness).flatMap((filter) =>
-  Array.from({ length: 76 }, (_, i) => point(50 + i, filter, hardness[filter])),
+export const sampleScan: SweepSetting[] = Object.keys(hardness).flatMap((filter) =>
+  Array.from({ length: 76 }, (_, i) => setting(50 + i, filter, hardness[filter])),
 );

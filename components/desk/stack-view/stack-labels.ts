@@ -1,0 +1,119 @@
+import type { Point } from '../../../scenes/geometry.js';
+import { onPage, projection } from '../../../scenes/projection.js';
+import type { StackLayout } from '../../../scenes/stack-layout.js';
+import type { StackScene } from '../../../scenes/stack-scene-data.js';
+import type { View } from '../../../scenes/view.js';
+import { formatNumber } from '../../charts/format.js';
+import { placeAlong } from '../../charts/place-along.js';
+
+/** A label on the page: its words, its left edge and top, and the place it speaks of, in px. */
+export interface PlacedLabel {
+  readonly id: string;
+  readonly words: string;
+  readonly left: number;
+  readonly top: number;
+  readonly anchor: readonly [number, number];
+  /** True where a line must lead from the place to the label. */
+  readonly leads: boolean;
+}
+
+interface Wish {
+  readonly id: string;
+  readonly words: string;
+  readonly at: Point;
+  /** Where the label's left edge and middle want to be, from the place. */
+  readonly dx: number;
+  readonly dy: number;
+}
+
+export const labelHeight_px = 17;
+const indent_px = 6;
+/** Moved further than this, a label needs a line to what it names. */
+const own_px = 9;
+/** Seen from above, layers lie behind one another and are not named. */
+const leastTilt = 0.3;
+
+const millimetres = (length_mm: number): string => `${formatNumber(length_mm)} mm`;
+
+/** Names down the left edge of the cut face. */
+function leftWishes(scene: StackScene, layout: StackLayout, tilt: number, zoom: number): Wish[] {
+  const x = -layout.body.halfWidth;
+  const scale = layout.px_per_mm * zoom * tilt;
+  const wish = (id: string, words: string, drawn: number, dy: number): Wish => ({
+    id,
+    words,
+    at: [x, -drawn, 0],
+    dx: indent_px,
+    dy,
+  });
+  const supports = scene.supportEntrance.map((slab) => `${slab.material} ${millimetres(slab.thickness_mm)}`);
+  const layers = scene.layers.map((layer, i) => {
+    const { top, bottom } = layout.layers[i];
+    const words = `${layer.name}, ${layer.material} ${millimetres(layer.thickness_mm)}`;
+    const roomy = (bottom - top) * scale > 2.4 * labelHeight_px;
+    return roomy
+      ? wish(`layer-${i}`, words, top, labelHeight_px * 0.8)
+      : wish(`layer-${i}`, words, (top + bottom) / 2, 0);
+  });
+  const gap_mm = scene.sourceToDetector_mm - layout.along.distanceAt(layout.exit);
+  const gap = `air gap ${millimetres(Math.max(0, gap_mm))}`;
+  const behind = scene.grid ? `${scene.grid.label}, ${gap}` : gap;
+  const toDetector = `${scene.detector.label}, ${millimetres(scene.sourceToDetector_mm)} from the focal spot`;
+  return [
+    ...(supports.length > 0
+      ? [wish('support', supports.join(', '), layout.supportEntrance[0].top, -labelHeight_px * 0.6)]
+      : []),
+    ...layers,
+    wish('gap', behind, layout.grid?.top ?? layout.detector.top, -labelHeight_px * 0.7),
+    wish('detector', toDetector, layout.detector.bottom, labelHeight_px * 0.7),
+  ];
+}
+
+/** Names to the right of the axis: shortened air and the detail. */
+function rightWishes(scene: StackScene, layout: StackLayout): Wish[] {
+  const air = layout.shortened
+    .filter(({ at }) => at < layout.skin)
+    .map(({ at, length_mm, factor }): Wish => ({
+      id: 'air',
+      words: `${millimetres(length_mm)} to the skin, shortened ${formatNumber(factor, 2)} times`,
+      at: [layout.halfField(at)[0], -at, 0],
+      dx: 18,
+      dy: 0,
+    }));
+  const { detail } = scene;
+  if (!detail || layout.detail === null) return air;
+  const breadth = detail.form === 'cylinder' ? detail.height_mm : detail.breadth_mm;
+  return [
+    ...air,
+    { id: 'detail', words: detail.label, at: [breadth / 2, -layout.detail, 0], dx: 26, dy: 0 },
+  ];
+}
+
+/** All labels of a view, none on another; those far from what they name lead there by a line. */
+export function stackLabels(scene: StackScene, layout: StackLayout, view: View): PlacedLabel[] {
+  const tilt = Math.cos((view.elevation_deg * Math.PI) / 180);
+  if (tilt < leastTilt) return [];
+  const p = projection(view, layout);
+  return [leftWishes(scene, layout, tilt, view.zoom), rightWishes(scene, layout)].flatMap((column) => {
+    const placed = column
+      .map((wish) => ({ ...wish, anchor: onPage(p, wish.at) }))
+      .filter(({ anchor: [x, y] }) => x > -200 && x < layout.width_px && y > -20 && y < layout.height_px + 20)
+      .sort((a, b) => a.anchor[1] + a.dy - b.anchor[1] - b.dy);
+    const tops = placeAlong(
+      placed.map(({ anchor, dy }) => ({ anchor: anchor[1] + dy, height: labelHeight_px })),
+      0,
+      layout.height_px,
+    );
+    return placed.map(({ id, words, anchor, dx, dy }, i): PlacedLabel => {
+      const moved = Math.abs(tops[i] + labelHeight_px / 2 - anchor[1] - dy) > own_px;
+      return {
+        id,
+        words,
+        anchor,
+        left: Math.max(2, anchor[0] + dx),
+        top: tops[i],
+        leads: moved || id === 'detail',
+      };
+    });
+  });
+}

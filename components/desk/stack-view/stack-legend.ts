@@ -1,0 +1,51 @@
+import { html, nothing, svg, type TemplateResult } from 'lit';
+import { shownShading } from '../../../scenes/drawing/stack-drawing.js';
+import { inkScale, inkTicks, type InkScale } from '../../../scenes/ink-scale.js';
+import type { StackLayout } from '../../../scenes/stack-layout.js';
+import type { StackScene } from '../../../scenes/stack-scene-data.js';
+import { formatNumber } from '../../charts/format.js';
+import { raisedPower } from './tick-text.js';
+
+const width = 132;
+const bar = 5;
+
+/** Place of a value on the ramp, px; paper on the left, most ink on the right. */
+export function rampPosition({ scale, least, most }: InkScale, value: number): number {
+  const share =
+    scale === 'linear' ? value / most : Math.log(value / least) / Math.log(most / least || 1);
+  return width * Math.min(1, Math.max(0, share));
+}
+
+/** One technique's ramp from the least ink to the most; the ink grows evenly along it. */
+const ramp = (id: string, color: string, y: number, ink: InkScale) => svg`
+  <linearGradient id=${id}>
+    <stop offset="0" stop-color=${color} stop-opacity=${ink.density(ink.least || ink.most * 1e-6)} />
+    <stop offset="1" stop-color=${color} stop-opacity=${ink.density(ink.most)} />
+  </linearGradient>
+  <rect x="0" y=${y} width=${width} height=${bar} fill="url(#${id})" />`;
+
+/** What the ink means: the quantity, its unit, the scale of both techniques, and what is not to scale. */
+export function stackLegend(scene: StackScene, layout: StackLayout): TemplateResult {
+  const shading = shownShading(scene);
+  const ink = inkScale(shading);
+  const text = ink.scale === 'log' ? raisedPower : (value: number) => formatNumber(value, 2);
+  const air = layout.shortened.find(({ at }) => at < layout.skin);
+  const notes = [
+    `${ink.scale === 'log' ? 'log' : 'linear'} scale`,
+    'patient and field in true proportion',
+    ...(air ? [`air shortened ${formatNumber(air.factor, 2)} times`] : []),
+  ];
+  return html`<div class="legend" part="legend">
+    ${ink.most > 0
+      ? html`<svg width=${width + 16} height="26" viewBox="-8 0 ${width + 16} 26" aria-hidden="true">
+          ${ramp('current-ramp', 'var(--current)', 0, ink)}
+          ${scene.techniques.length > 1 ? ramp('proposed-ramp', 'var(--proposed)', bar + 1, ink) : nothing}
+          ${inkTicks(ink).map((tick) => {
+            const x = rampPosition(ink, tick);
+            return svg`<path d="M${x},0 v${2 * bar + 3}" /><text x=${x} y="24" text-anchor="middle">${text(tick)}</text>`;
+          })}
+        </svg>`
+      : nothing}
+    <span>ink: ${shading.quantity}${shading.unit ? html` ${shading.unit}` : nothing} · ${notes.join(' · ')}</span>
+  </div>`;
+}

@@ -1,0 +1,12 @@
+import { type StackScene, trackKinds, type Tracks } from '../../../scenes/stack-scene-data.js';
+
+/** How many pieces of each kind the tracks hold, in the order of `trackKinds`. */
+export const trackCounts = ({ kinds }: Tracks): number[] =>
+  trackKinds.map((_, kind) => kinds.reduce((sum, each) => sum + (each === kind ? 1 : 0), 0));
+
+/** The tracks in words, for those who do not see them. */
+export function trackWords(scene: StackScene, tracks: Tracks): string {
+  const [primary, compton, rayleigh, absorbed] = trackCounts(tracks);
+  const name = scene.techniques[tracks.technique]?.name ?? '';
+  return `Photon paths of ${name}: ${primary} primary (thin line), ${compton} after Compton scatter (line), ${rayleigh} after Rayleigh scatter (dotted), ${absorbed} ends by absorption (dot).`;
+}

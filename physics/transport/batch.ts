@@ -2,7 +2,8 @@ import { collisionLength, crossingLength, drain, type EventBuffer, eventBuffer }
 import { regionCount } from './geometry.js';
 import type { TransportInput } from './input.js';
 import { escapeCount, flyPhotons } from './kernel.js';
-import { randomStream } from './random.js';
+import { meanDeposits_keV } from './mean-deposit.js';
+import { type RandomStream, randomStream, splitmix32 } from './random.js';
 import { rayDepth } from './ray-depth.js';
 import { boxScorer } from './score-boxes.js';
 import { displacementScorer, nestFields } from './score-displacement.js';
@@ -12,7 +13,7 @@ import { type ScoreLayout, scoreLayout } from './score-layout.js';
 /** Where the scores of a run's batches stand. */
 export function layoutOf(input: TransportInput): ScoreLayout {
   const { scoring, geometry, boxes } = input;
-  const isPencil = scoring.kind === 'displacement';
+  const isPencil = scoring?.kind === 'displacement';
   return scoreLayout({
     gaps: isPencil ? scoring.gaps_cm.length : 1,
     fields: isPencil ? scoring.halfFields_cm.length + 1 : 1,
@@ -31,7 +32,7 @@ export function transportBatch(
 ): Float64Array {
   const layout = layoutOf(input);
   const scores = new Float64Array(layout.length);
-  const { crossings, collisions } = scorers(input, layout, scores);
+  const { crossings, collisions } = scorers(input, batch.index, layout, scores);
   scores[layout.emitted] = flyPhotons(input, randomStream(input.seed, batch.index), batch.photons, {
     absorbed_keV: scores.subarray(layout.absorbed, layout.escaped),
     escaped_keV: scores.subarray(layout.escaped, layout.escaped + escapeCount),
@@ -40,29 +41,42 @@ export function transportBatch(
   });
   drain(crossings);
   if (collisions) drain(collisions);
-  if (input.scoring.kind === 'displacement') nestFields(layout, scores);
+  if (input.scoring?.kind === 'displacement') nestFields(layout, scores);
   return scores;
 }
 
 function scorers(
   input: TransportInput,
+  batch: number,
   layout: ScoreLayout,
   scores: Float64Array,
 ): { crossings: EventBuffer; collisions: EventBuffer | null } {
   const { scoring, response, airKerma, matter, geometry, boxes } = input;
   const takers: EventBuffer['take'][] = [];
-  if (boxes.length > 0) takers.push(boxScorer(boxes, layout.boxes, scores));
+  if (boxes.length > 0)
+    takers.push(boxScorer(boxes, meanDeposits_keV(matter), layout.boxes, scores));
+  if (scoring === null) {
+    return { crossings: eventBuffer(crossingLength, ignore), collisions: collisionsTo(takers) };
+  }
   if (scoring.kind === 'displacement') {
     const take = displacementScorer(scoring, response, airKerma, layout, scores);
     return { crossings: eventBuffer(crossingLength, take), collisions: collisionsTo(takers) };
   }
   const target = { scoring, response, airKerma, layout, scores };
-  takers.push(forcedScorer(target, matter, rayDepth(geometry, matter)));
+  takers.push(
+    forcedScorer(target, matter, rayDepth(geometry, matter), rouletteStream(input, batch)),
+  );
   return {
     crossings: eventBuffer(crossingLength, nearScorer(target)),
     collisions: collisionsTo(takers),
   };
 }
+
+const ignore = (): void => undefined;
+
+/** Draws of the scorer come from a stream of their own and leave the photons' paths as they are. */
+const rouletteStream = (input: TransportInput, batch: number): RandomStream =>
+  randomStream(splitmix32(input.seed, -1), batch);
 
 function collisionsTo(takers: readonly EventBuffer['take'][]): EventBuffer | null {
   if (takers.length === 0) return null;

@@ -7,6 +7,7 @@ import { airKermaTable } from './air-kerma.js';
 import { angleDensity } from './angle-density.js';
 import { type BuiltGeometry, buildGeometry, type Surroundings } from './build-geometry.js';
 import { cutoffEnergy_keV, greatestEnergy_keV } from './energy-nodes.js';
+import type { TransportGeometry } from './geometry.js';
 import type { LayerRegion, TransportInput } from './input.js';
 import { matterTables } from './matter-tables.js';
 import { primaryScores } from './primary.js';
@@ -15,6 +16,7 @@ import type { TallyBox } from './score-boxes.js';
 import type { DisplacementScoring } from './score-displacement.js';
 import type { ForcedScoring } from './score-forced.js';
 import { energySampler, type Source } from './source.js';
+import { worthTable } from './worth.js';
 
 /** What a run may change; the defaults follow the stack. */
 export interface TransportOptions extends Surroundings {
@@ -24,6 +26,8 @@ export interface TransportOptions extends Surroundings {
   readonly gaps_mm: readonly number[];
   readonly fieldWidths_mm: readonly number[];
   readonly boxes: readonly TallyBox[];
+  /** False scores absorbed energy alone, which is several times faster. */
+  readonly scatter: boolean;
 }
 
 /**
@@ -61,20 +65,25 @@ export function buildTransportInput(
   const { geometry, materials } = built;
   const source = asPencil ? ({ kind: 'pencil' } as const) : fieldSource(stack);
   const air = referenceMaterial('air');
+  const read = { detector, grid, air };
+  const primary = primaryScores(sampler, source, geometry, materials, read);
   return {
     ...run,
     source,
     spectrum: sampler,
     geometry,
     matter: matterTables(materials, options.fluorescence ?? true),
-    scoring: asPencil
-      ? displacementScoring(stack, options)
-      : forcedScoring(stack, geometry.detector_cm, materials),
+    scoring:
+      options.scatter === false
+        ? null
+        : asPencil
+          ? displacementScoring(stack, options)
+          : forcedScoring(stack, geometry, materials, primary.energy_keV),
     response: responseTable(detector, grid, air, greatest_keV),
     airKerma: airKermaTable(air),
     boxes: options.boxes ?? [],
     layers: layerRegions(stack, built, asPencil),
-    primary: primaryScores(sampler, source, geometry, materials, { detector, grid, air }),
+    primary,
   };
 }
 
@@ -122,19 +131,21 @@ const regionShare = 1 / 3;
 
 function forcedScoring(
   stack: Stack,
-  detector_cm: number,
+  geometry: TransportGeometry,
   materials: readonly Material[],
+  meanEnergy_keV: number,
 ): ForcedScoring {
   const halfField_cm = Math.min(...stack.field_mm) / 20;
   const half = Math.min(halfRegion_cm, halfField_cm * regionShare);
   const atSkin = stack.beam === 'parallel' ? 1 : stack.sourceToSkin_mm / stack.sourceToDetector_mm;
   return {
     kind: 'forced',
-    detector_cm,
+    detector_cm: geometry.detector_cm,
     near_cm,
     halfRegion_cm: half,
     halfSkinRegion_cm: Math.min(halfRegion_cm, halfField_cm * atSkin * regionShare),
     densities: materials.map(angleDensity),
+    worth: worthTable(geometry, materials, meanEnergy_keV),
   };
 }
 

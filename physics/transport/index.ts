@@ -5,6 +5,16 @@ export { buildTransportInput, type TransportOptions } from './build-input.js';
 export type { LayerRegion, TransportInput } from './input.js';
 export { type DetectorFunctions, type GridFunction, idealDetector } from './response-table.js';
 export {
+  type EnergyBalance,
+  energyBalance,
+  type Transport,
+  type TransportEstimate,
+  type TransportLabels,
+  type TransportLayer,
+  transportResult,
+} from './result.js';
+export type { TallyBox } from './score-boxes.js';
+export {
   backscatterFactor,
   boxEnergies_keV,
   type Estimated,
@@ -15,3 +25,4 @@ export {
   scatterToPrimary,
   type TransportScores,
 } from './scores.js';
+export { recordTracks, type Track, trackPoints } from './tracks.js';

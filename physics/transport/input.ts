@@ -19,7 +19,8 @@ export interface LayerRegion {
 export interface TransportInput extends TransportWorld {
   readonly photons: number;
   readonly seed: number;
-  readonly scoring: DisplacementScoring | ForcedScoring;
+  /** How scatter is scored; null when only absorbed energy is asked for. */
+  readonly scoring: DisplacementScoring | ForcedScoring | null;
   readonly response: ResponseTable;
   /** E·(μen/ρ)air at the energy nodes. */
   readonly airKerma: Float64Array;

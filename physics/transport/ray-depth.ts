@@ -8,8 +8,11 @@ import type { MatterTables } from './matter-tables.js';
 /** Deeper than this nothing arrives that could be told from nothing. */
 const opaque = 100;
 
-/** Mean free paths from a point along a direction with w > 0 to the end of the geometry. */
-export type RayDepth = (from: Float64Array, direction: Float64Array, energy_keV: number) => number;
+/**
+ * Replaces `path` of a photon in flight with w > 0 by the mean free paths from where it is, straight
+ * on, to the end of the geometry; nothing else of it changes.
+ */
+export type RayDepth = (photon: Float64Array) => void;
 
 /** The ray tracer of a geometry: a sum over slabs, or a flight through the bounds. */
 export function rayDepth(geometry: TransportGeometry, matter: MatterTables): RayDepth {
@@ -18,32 +21,30 @@ export function rayDepth(geometry: TransportGeometry, matter: MatterTables): Ray
   if (bounds === null) return throughSlabs(geometry, attenuation_per_cm);
   const ray = new Float64Array(flightLength);
   const where = new Int32Array(placeLength);
-  return (from, direction, energy_keV) => {
-    ray.set(from);
-    ray.set(direction, flight.u);
-    ray[flight.energy] = energy_keV;
+  return (photon) => {
+    ray.set(photon);
     ray[flight.path] = opaque;
     placeAt(geometry, bounds, ray, where);
     const ended = marchBounded(geometry, bounds, attenuation_per_cm, ray, where);
-    return ended === face.none ? opaque : opaque - ray[flight.path];
+    photon[flight.path] = ended === face.none ? opaque : opaque - ray[flight.path];
   };
 }
 
 function throughSlabs(geometry: TransportGeometry, attenuation_per_cm: Float32Array): RayDepth {
   const { planes_cm: planes, slabMatter } = geometry;
-  return (from, direction, energy_keV) => {
-    const at = energy_keV * nodesPerKeV;
+  return (photon) => {
+    const at = photon[flight.energy] * nodesPerKeV;
     const node = at | 0;
     const between = at - node;
+    let from = photon[flight.z];
     let perpendicular = 0;
-    let exit = from[2];
-    for (let slab = slabOf(planes, exit); slab < slabMatter.length; slab++) {
+    for (let slab = slabOf(planes, from); slab < slabMatter.length; slab++) {
       const entry = slabMatter[slab] * tableStride + node;
       const lower = attenuation_per_cm[entry];
       const attenuation = lower + between * (attenuation_per_cm[entry + 1] - lower);
-      perpendicular += attenuation * (planes[slab + 1] - exit);
-      exit = planes[slab + 1];
+      perpendicular += attenuation * (planes[slab + 1] - from);
+      from = planes[slab + 1];
     }
-    return perpendicular / direction[2];
+    photon[flight.path] = perpendicular / photon[flight.w];
   };
 }

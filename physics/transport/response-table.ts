@@ -1,4 +1,5 @@
 import { type Material, massEnergyAbsorption } from '../../materials/index.js';
+import { flight } from './flight.js';
 
 /**
  * What a photon scores where it meets the detector plane, as functions of its energy and the cosine
@@ -86,15 +87,14 @@ export function responseTable(
   return { energyNodes, values };
 }
 
-/** Scores of one photon, interpolated, kerma over cosβ; written to `scores`. */
-export function respond(
-  table: ResponseTable,
-  energy_keV: number,
-  cosBeta: number,
-  scores: Float64Array,
-): void {
+/**
+ * Scores of a photon in flight (its energy and direction are read), interpolated, kerma over cosβ;
+ * written to `scores`.
+ */
+export function respond(table: ResponseTable, photon: Float64Array, scores: Float64Array): void {
   const { values } = table;
-  const energyAt = energy_keV * nodesPerKeV;
+  const cosBeta = photon[flight.w];
+  const energyAt = photon[flight.energy] * nodesPerKeV;
   const energyNode = energyAt | 0;
   const angleAt = Math.sqrt(Math.acos(Math.min(1, cosBeta))) * perRootBeta;
   const angleNode = Math.min(angleSteps - 1, angleAt | 0);
@@ -102,16 +102,12 @@ export function respond(
   const g = angleAt - angleNode;
   const lower = (energyNode * angleNodes + angleNode) * quantityCount;
   const upper = lower + angleNodes * quantityCount;
-  const a = (1 - f) * (1 - g);
-  const b = (1 - f) * g;
-  const c = f * (1 - g);
-  const d = f * g;
   for (let q = 0; q < quantityCount; q++) {
-    scores[q] =
-      a * values[lower + q] +
-      b * values[lower + quantityCount + q] +
-      c * values[upper + q] +
-      d * values[upper + quantityCount + q];
+    const below = values[lower + q];
+    const above = values[upper + q];
+    const low = below + g * (values[lower + quantityCount + q] - below);
+    const high = above + g * (values[upper + quantityCount + q] - above);
+    scores[q] = low + f * (high - low);
   }
   const fluence = fluenceWeight(cosBeta);
   scores[quantitiesPerSide - 1] *= fluence;

@@ -1,5 +1,6 @@
 import { airKermaAt } from './air-kerma.js';
 import { crossing, crossingLength, type EventBuffer, face, history } from './events.js';
+import { flightLength } from './flight.js';
 import { fluenceWeight, quantityCount, type ResponseTable, respond } from './response-table.js';
 import { componentCount, type ScoreLayout, scatterAt } from './score-layout.js';
 
@@ -30,6 +31,7 @@ export function displacementScorer(
 ): EventBuffer['take'] {
   const { gaps_cm } = scoring;
   const own = new Float64Array(quantityCount);
+  const photon = new Float64Array(flightLength);
   return (values, end) => {
     for (let at = 0; at < end; at += crossingLength) {
       const past = values[at + crossing.history];
@@ -42,7 +44,8 @@ export function displacementScorer(
         const kerma = airKermaAt(airKerma, energy_keV) * fluenceWeight(-w);
         scores[layout.backscatter + smallestField(scoring, x, y)] += kerma;
       } else if (values[at + crossing.face] === face.detector) {
-        respond(response, energy_keV, w, own);
+        for (let i = 0; i < photon.length; i++) photon[i] = values[at + crossing.x + i];
+        respond(response, photon, own);
         const acrossX = values[at + crossing.u] / w;
         const acrossY = values[at + crossing.v] / w;
         for (let gap = 0; gap < gaps_cm.length; gap++) {

@@ -1,7 +1,7 @@
 import { comptonEnergyRatio } from '../../materials/index.js';
 import { airKermaAt } from './air-kerma.js';
 import { type AngleDensity, comptonDensity, rayleighDensity } from './angle-density.js';
-import { cutoffEnergy_keV, nodesPerKeV, tableStride } from './energy-nodes.js';
+import { nodesPerKeV, tableStride } from './energy-nodes.js';
 import {
   collision,
   collisionLength,
@@ -12,10 +12,13 @@ import {
   history,
   interaction,
 } from './events.js';
+import { flight, flightLength } from './flight.js';
 import type { MatterTables } from './matter-tables.js';
+import { nextUniform, type RandomStream } from './random.js';
 import type { RayDepth } from './ray-depth.js';
 import { fluenceWeight, quantityCount, type ResponseTable, respond } from './response-table.js';
 import { type ScoreLayout, scatterAt } from './score-layout.js';
+import { type WorthTable, worthAt } from './worth.js';
 
 /**
  * Scatter at the field centre by forced detection: every collision sends its expected share of
@@ -30,6 +33,7 @@ export interface ForcedScoring {
   readonly halfRegion_cm: number;
   readonly halfSkinRegion_cm: number;
   readonly densities: readonly AngleDensity[];
+  readonly worth: WorthTable;
 }
 
 /** What both scorers need. Scores are per cm² of detector. */
@@ -41,71 +45,105 @@ export interface ForcedTarget {
   readonly scores: Float64Array;
 }
 
+/** What one collision sends to the centre: at most one photon per process, three numbers each. */
+const sent = { component: 0, energy: 1, weight: 2 } as const;
+const sentLength = 3;
+
 /**
  * Next-event estimator. Per collision and process: share · p(Ω) · cosβ/d² · e^−τ · response, with
- * p per sr at the angle to the centre; a K photon already drawn goes isotropically.
+ * p per sr at the angle to the centre; a K photon already drawn goes isotropically. Collisions of
+ * little worth are scored seldom and count for more (Russian roulette by `worth`).
  */
 export function forcedScorer(
   target: ForcedTarget,
   matter: MatterTables,
   rayDepth: RayDepth,
+  stream: RandomStream,
 ): EventBuffer['take'] {
   const { scoring, response, layout, scores } = target;
-  const { detector_cm, near_cm, densities } = scoring;
+  const { detector_cm, near_cm, densities, worth } = scoring;
   const own = new Float64Array(quantityCount);
-  const from = new Float64Array(3);
-  const towards = new Float64Array(3);
-
-  const score = (component: number, energy_keV: number, weight: number): void => {
-    if (energy_keV < cutoffEnergy_keV || weight === 0) return;
-    const arriving = weight * Math.exp(-rayDepth(from, towards, energy_keV));
-    respond(response, energy_keV, towards[2], own);
-    const to = scatterAt(layout, 0, 0, component - 1, 0);
-    for (let q = 0; q < quantityCount; q++) scores[to + q] += arriving * own[q];
-  };
+  const ray = new Float64Array(flightLength);
+  const photons = new Float64Array(3 * sentLength);
 
   return (values, end) => {
     for (let at = 0; at < end; at += collisionLength) {
-      const height = detector_cm - values[at + collision.z];
+      const x = values[at + collision.x];
+      const y = values[at + collision.y];
+      const z = values[at + collision.z];
+      const height = detector_cm - z;
       if (height <= near_cm) continue;
-      for (let axis = 0; axis < 3; axis++) from[axis] = values[at + collision.x + axis];
-      const distance = Math.hypot(from[0], from[1], height);
-      towards[0] = -from[0] / distance;
-      towards[1] = -from[1] / distance;
-      towards[2] = height / distance;
-      const cosTheta =
-        towards[0] * values[at + collision.u] +
-        towards[1] * values[at + collision.v] +
-        towards[2] * values[at + collision.w];
-      const perArea = towards[2] / (distance * distance);
-      const energy_keV = values[at + collision.energy];
-      const past = values[at + collision.history];
-      const substance = values[at + collision.matter];
-      const shares = sharesAt(matter, substance, energy_keV);
-      const density = densities[substance];
-      const isFirst = past === history.primary;
-      score(
-        isFirst ? history.firstCompton : history.multiple,
-        energy_keV * comptonEnergyRatio(energy_keV, cosTheta),
-        shares.compton * perArea * comptonDensity(density, energy_keV, cosTheta),
-      );
-      score(
-        isFirst ? history.firstRayleigh : history.multiple,
-        energy_keV,
-        shares.rayleigh * perArea * rayleighDensity(density, energy_keV, cosTheta),
-      );
-      if (values[at + collision.kind] === interaction.fluorescence) {
-        score(history.multiple, values[at + collision.energyAfter], perArea / (4 * Math.PI));
+      const distance = Math.sqrt(x * x + y * y + height * height);
+      const cosBeta = height / distance;
+      const kept = Math.min(1, worthAt(worth, z) * cosBeta * cosBeta * cosBeta);
+      if (kept < 1 && nextUniform(stream) > kept) continue;
+      ray[flight.x] = x;
+      ray[flight.y] = y;
+      ray[flight.z] = z;
+      ray[flight.u] = -x / distance;
+      ray[flight.v] = -y / distance;
+      ray[flight.w] = cosBeta;
+      const perArea = cosBeta / (distance * distance * kept);
+      const count = sendPhotons(values, at, ray, perArea, matter, densities, photons);
+      for (let i = 0; i < count * sentLength; i += sentLength) {
+        ray[flight.energy] = photons[i + sent.energy];
+        rayDepth(ray);
+        const arriving = photons[i + sent.weight] * Math.exp(-ray[flight.path]);
+        respond(response, ray, own);
+        const to = scatterAt(layout, 0, 0, photons[i + sent.component] - 1, 0);
+        for (let q = 0; q < quantityCount; q++) scores[to + q] += arriving * own[q];
       }
     }
   };
 }
+
+// Fills `photons` with what a collision sends along `ray`; returns how many.
+function sendPhotons(
+  values: Float64Array,
+  at: number,
+  ray: Float64Array,
+  perArea: number,
+  matter: MatterTables,
+  densities: readonly AngleDensity[],
+  photons: Float64Array,
+): number {
+  const energy_keV = values[at + collision.energy];
+  const substance = values[at + collision.matter];
+  const density = densities[substance];
+  const isFirst = values[at + collision.history] === history.primary;
+  const cosTheta =
+    ray[flight.u] * values[at + collision.u] +
+    ray[flight.v] * values[at + collision.v] +
+    ray[flight.w] * values[at + collision.w];
+  const node = energy_keV * nodesPerKeV;
+  const entry = substance * tableStride + (node | 0);
+  const compton = between(matter.comptonShare, entry, node);
+  const rayleigh = between(matter.scatterShare, entry, node) - compton;
+  photons[sent.component] = isFirst ? history.firstCompton : history.multiple;
+  photons[sent.energy] = energy_keV * comptonEnergyRatio(energy_keV, cosTheta);
+  photons[sent.weight] = compton * perArea * comptonDensity(density, energy_keV, cosTheta);
+  const second = sentLength;
+  photons[second + sent.component] = isFirst ? history.firstRayleigh : history.multiple;
+  photons[second + sent.energy] = energy_keV;
+  photons[second + sent.weight] =
+    rayleigh * perArea * rayleighDensity(density, energy_keV, cosTheta);
+  if (values[at + collision.kind] !== interaction.fluorescence) return 2;
+  const third = 2 * sentLength;
+  photons[third + sent.component] = history.multiple;
+  photons[third + sent.energy] = values[at + collision.energyAfter];
+  photons[third + sent.weight] = perArea / (4 * Math.PI);
+  return 3;
+}
+
+const between = (table: Float32Array, entry: number, node: number): number =>
+  table[entry] + (node - (node | 0)) * (table[entry + 1] - table[entry]);
 
 /** Crossings: photons from near collisions into the central square, and backscatter at the skin. */
 export function nearScorer(target: ForcedTarget): EventBuffer['take'] {
   const { scoring, response, airKerma, layout, scores } = target;
   const { detector_cm, near_cm, halfRegion_cm, halfSkinRegion_cm } = scoring;
   const own = new Float64Array(quantityCount);
+  const photon = new Float64Array(flightLength);
   const perArea = 1 / (4 * halfRegion_cm * halfRegion_cm);
   const perSkinArea = 1 / (4 * halfSkinRegion_cm * halfSkinRegion_cm);
   return (values, end) => {
@@ -123,7 +161,8 @@ export function nearScorer(target: ForcedTarget): EventBuffer['take'] {
         detector_cm - values[at + crossing.lastZ] <= near_cm &&
         isWithin(values, at, halfRegion_cm, detector_cm - values[at + crossing.z])
       ) {
-        respond(response, energy_keV, w, own);
+        for (let i = 0; i < photon.length; i++) photon[i] = values[at + crossing.x + i];
+        respond(response, photon, own);
         const to = scatterAt(layout, 0, 0, past - 1, 0);
         for (let q = 0; q < quantityCount; q++) scores[to + q] += perArea * own[q];
       }
@@ -137,13 +176,4 @@ function isWithin(values: Float64Array, at: number, half: number, height: number
   const x = values[at + crossing.x] + way * values[at + crossing.u];
   const y = values[at + crossing.y] + way * values[at + crossing.v];
   return Math.abs(x) < half && Math.abs(y) < half;
-}
-
-function sharesAt(matter: MatterTables, substance: number, energy_keV: number) {
-  const at = energy_keV * nodesPerKeV;
-  const entry = substance * tableStride + (at | 0);
-  const between = at - (at | 0);
-  const read = (table: Float32Array) => table[entry] + between * (table[entry + 1] - table[entry]);
-  const compton = read(matter.comptonShare);
-  return { compton, rayleigh: read(matter.scatterShare) - compton };
 }

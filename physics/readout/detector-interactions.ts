@@ -1,5 +1,4 @@
 import {
-  absorptionEdges,
   type Material,
   massAttenuation,
   massAttenuationOn,
@@ -7,6 +6,7 @@ import {
   partialCoefficientsOn,
 } from '../../materials/index.js';
 import { locate, locatorOf } from '../scatter/locate.js';
+import { edgeNodes, edgesWithin } from './edge-nodes.js';
 import { type KEmission, kEmissions } from './k-emission.js';
 
 /** How a photon of one energy meets the detector, whatever its direction. */
@@ -31,23 +31,8 @@ export interface DetectorInteractions {
 }
 
 const range_keV = [4, 150] as const;
+/** Nodes stand 0.8 % apart. */
 const nodesPerUnit = 120;
-const hair = 1e-6;
-
-/** Nodes 0.8 % apart with every edge doubled, a hair apart. */
-const nodesOf = (material: Material): Float64Array => {
-  const [from, to] = range_keV;
-  const edges = absorptionEdges(material, from * 1.001, to * 0.999).map((edge) => edge.energy_keV);
-  const breaks = [...new Set([from, ...edges, to])].sort((a, b) => a - b);
-  const nodes: number[] = [];
-  for (let k = 1; k < breaks.length; k++) {
-    const low = breaks[k - 1];
-    const high = k === breaks.length - 1 ? to : breaks[k] * (1 - hair);
-    const steps = Math.max(1, Math.ceil(Math.log(high / low) * nodesPerUnit));
-    for (let i = 0; i <= steps; i++) nodes.push(low * (high / low) ** (i / steps));
-  }
-  return Float64Array.from(nodes);
-};
 
 /** Attenuation and K emission of a detector of a material and areal density in g/cm². */
 export const detectorInteractions = (
@@ -92,7 +77,7 @@ export const detectorInteractions = (
     return into;
   };
 
-  const nodes = nodesOf(material);
+  const nodes = edgeNodes(...range_keV, edgesWithin([material], ...range_keV), nodesPerUnit);
   const table = on(nodes);
   const logDepth = table.depth.map((depth) => Math.log(depth));
   const locator = locatorOf(nodes);

@@ -1,6 +1,7 @@
-import { absorptionEdges, type Material, massAttenuation } from '../../materials/index.js';
+import { type Material, massAttenuation } from '../../materials/index.js';
 import { opticalDepth } from '../beam/attenuate.js';
 import { locate, locatorOf } from '../scatter/locate.js';
+import { edgeNodes, edgesWithin } from './edge-nodes.js';
 import type { GridGeometry } from './grid-geometry.js';
 import { type GridAtEnergy, meanGridTransmission } from './grid-transmission.js';
 
@@ -24,7 +25,6 @@ export interface GridTable {
 const range_keV = [8, 150] as const;
 const energyNodes = 150;
 const betaNodes = 48;
-const hair = 1e-6;
 
 const per_mm = (material: Material, energy_keV: number): number =>
   (massAttenuation(material, energy_keV) * material.density_g_per_cm3) / 10;
@@ -41,30 +41,6 @@ export const gridAtEnergy = (grid: GridGeometry, energy_keV: number): GridAtEner
     0,
   ),
 });
-
-/** Edges of everything the grid is made of, ascending, each once. */
-const edgesOf = (grid: GridGeometry): number[] => {
-  const [from, to] = range_keV;
-  const materials = [grid.stripMaterial, grid.interspaceMaterial];
-  for (const { material } of grid.covers) materials.push(material);
-  const edges = materials.flatMap((material) => absorptionEdges(material, from + 0.1, to - 0.1));
-  return [...new Set(edges.map(({ energy_keV }) => energy_keV))].sort((a, b) => a - b);
-};
-
-/** Nodes evenly spaced in ln E between the edges, which stand doubled; about `energyNodes` in all. */
-const nodesBetween = (edges_keV: readonly number[]): Float64Array => {
-  const [from, to] = range_keV;
-  const breaks = [from, ...edges_keV, to];
-  const nodes: number[] = [];
-  for (let k = 1; k < breaks.length; k++) {
-    const low = breaks[k - 1];
-    const high = k === breaks.length - 1 ? breaks[k] : breaks[k] * (1 - hair);
-    const span = Math.log(high / low);
-    const steps = Math.max(1, Math.round((span / Math.log(to / from)) * energyNodes));
-    for (let i = 0; i <= steps; i++) nodes.push(low * Math.exp((span * i) / steps));
-  }
-  return Float64Array.from(nodes);
-};
 
 const tabulate = (
   grid: GridGeometry,
@@ -98,8 +74,10 @@ const cubic = (before: number, low: number, high: number, after: number, t: numb
  * full transmission anywhere, and 1e-3 of the transmitted share of isotropic scatter (tested).
  */
 export const gridTable = (grid: GridGeometry): GridTable => {
-  const edges_keV = edgesOf(grid);
-  const energies_keV = nodesBetween(edges_keV);
+  const [from, to] = range_keV;
+  const covers = grid.covers.map(({ material }) => material);
+  const edges_keV = edgesWithin([grid.stripMaterial, grid.interspaceMaterial, ...covers], from, to);
+  const energies_keV = edgeNodes(from, to, edges_keV, energyNodes / Math.log(to / from));
   const betas_rad = Float64Array.from(
     { length: betaNodes },
     (_, j) => (Math.PI / 2) * (j / (betaNodes - 1)) ** 2,

@@ -1,8 +1,8 @@
 import { Command } from 'commander';
-import { beamFaults } from '../../physics/beam/filtration-faults.js';
 import {
   airPath,
   attenuate,
+  beamFaults,
   beamQuality,
   kEdges_keV,
   type MaterialLayer,

@@ -2,6 +2,7 @@ import { Command } from 'commander';
 import { version } from '../../physics/version.js';
 import { beamCommand } from './beam.js';
 import { cautions } from './cautions.js';
+import { checksCommand } from './checks.js';
 import type { Io } from './io.js';
 import { matterCommand } from './matter.js';
 import { weighCommand } from './weigh.js';
@@ -14,7 +15,7 @@ export const program = (io: Io): Command => {
     .helpOption('-h, --help', 'print this help')
     .helpCommand(false)
     .addHelpText('after', `\n${cautions}`);
-  for (const command of [weighCommand(io), beamCommand(io), matterCommand(io)]) {
+  for (const command of [weighCommand(io), beamCommand(io), matterCommand(io), checksCommand(io)]) {
     root.addCommand(withAnswerForms(command));
   }
   return forAll(root, (command) =>

@@ -1,5 +1,4 @@
-import { beamFaults } from '../../beam/filtration-faults.js';
-import { type MaterialLayer, readingFaults } from '../../beam/index.js';
+import { beamFaults, type MaterialLayer, readingFaults } from '../../beam/index.js';
 import { resolveMaterial } from '../../stack/resolve-material.js';
 import type { Fault } from '../fault.js';
 import type { Case, Slab } from '../schema.js';

@@ -50,8 +50,9 @@ function obliqueFaces(layout: SpineLayout): SVGTemplateResult {
 /** One half of the fan, from the focal spot to the detector, shaded by primary photons. */
 function beamHalf(layout: SpineLayout, half: BeamHalf, side: -1 | 1, prefix: string): SVGTemplateResult {
   const { axis, tube, detector } = layout;
-  const edge = axis + side * layout.halfWidth(detector.top);
-  const outline = path([axis, tube], [axis, detector.top], [edge, detector.top]);
+  const bends = [layout.patient.top, layout.patient.bottom, detector.top];
+  const edge = bends.map((y) => [axis + side * layout.halfWidth(y), y] as const);
+  const outline = path([axis, detector.top], [axis, tube], ...edge);
   const id = `${prefix}-shade-${side}`;
   const { color } = techniqueInk(half.index);
   const stops = half.shade.map(
@@ -61,7 +62,7 @@ function beamHalf(layout: SpineLayout, half: BeamHalf, side: -1 | 1, prefix: str
   return svg`
     <linearGradient id=${id} gradientUnits="userSpaceOnUse" x1="0" x2="0" y1=${tube} y2=${detector.top}>${stops}</linearGradient>
     <path d=${outline} fill=${stops.length > 0 ? `url(#${id})` : 'none'} />
-    <path class="ray" d="M${axis},${tube} L${edge},${detector.top}" stroke=${color} stroke-dasharray=${techniqueInk(half.index).dash} />`;
+    <path class="ray" d=${`M${axis},${tube}${edge.map(([x, y]) => `L${x},${y}`).join('')}`} stroke=${color} stroke-dasharray=${techniqueInk(half.index).dash} />`;
 }
 
 /** The filter of each half: a thin line where there is none, a hatched slip where there is one. */
@@ -89,7 +90,8 @@ function gridHalf(layout: SpineLayout, half: BeamHalf, side: -1 | 1): SVGTemplat
 }
 
 /** The conventional break line across the shortened air. */
-function airBreak({ axis, airBreak: y }: SpineLayout): SVGTemplateResult {
+function airBreak({ axis, airBreak: y }: SpineLayout): SVGTemplateResult | typeof nothing {
+  if (y === null) return nothing;
   const d = `M${axis - 62},${y} h44 l6,-7 l12,14 l6,-7 h44`;
   return svg`<path class="gap" d=${d} /><path class="break" d=${d} />`;
 }

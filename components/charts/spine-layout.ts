@@ -29,7 +29,8 @@ export interface SpineLayout {
   readonly recede: { readonly x: number; readonly y: number };
   readonly tube: number;
   readonly filter: number;
-  readonly airBreak: number;
+  /** Where the air is drawn shortened; null where it is not. */
+  readonly airBreak: number | null;
   readonly support: Band;
   readonly patient: Band;
   readonly layers: readonly Band[];

@@ -11,7 +11,7 @@ export const beamPathSheet = css`
     grid-template-columns: minmax(11rem, 1fr) minmax(24rem, 29rem) minmax(14rem, 1fr);
     column-gap: 0.75rem;
     position: relative;
-    height: var(--path-height, 45rem);
+    height: max(var(--path-least, 0px), clamp(38rem, 100vh - 10rem, 48rem));
   }
   .side {
     position: relative;
@@ -93,6 +93,20 @@ export const beamPathSheet = css`
     position: absolute;
     inset: 0;
   }
+  .labels {
+    position: absolute;
+    inset: 0;
+    pointer-events: none;
+  }
+  .labels > * {
+    pointer-events: auto;
+  }
+  .labels > .soft {
+    pointer-events: none;
+  }
+  .labels[inert] {
+    visibility: hidden;
+  }
   .label {
     position: absolute;
     font-size: var(--small);
@@ -102,9 +116,42 @@ export const beamPathSheet = css`
   .label.soft {
     color: var(--soft);
   }
+  .label.soft {
+    padding-inline: 0.2rem;
+    background: color-mix(in srgb, var(--paper) 78%, transparent);
+  }
+  .table {
+    font-size: var(--small);
+    color: var(--soft);
+    max-width: 40rem;
+    margin: 0 auto 0.9rem;
+    text-align: center;
+  }
+  .table summary {
+    cursor: pointer;
+  }
+  .table table {
+    border-collapse: collapse;
+    width: 100%;
+    color: var(--ink);
+    text-align: start;
+  }
+  .table :is(th, td) {
+    font-weight: 400;
+    text-align: start;
+    padding: 0.2rem 0.8rem 0.2rem 0;
+    border-block-end: 1px solid var(--rule);
+  }
+  .table .number {
+    text-align: end;
+  }
+  :focus-visible {
+    outline: 2px solid var(--ink);
+    outline-offset: 2px;
+  }
   .caption {
     margin: 0;
-    padding: 0.4rem 0 0.9rem;
+    padding: 0.4rem 0 0.3rem;
     text-align: center;
     color: var(--soft);
     font-size: var(--small);

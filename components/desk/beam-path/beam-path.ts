@@ -4,8 +4,13 @@ import { placeAlong } from '../../charts/place-along.js';
 import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
 import type { PlacedDetail } from '../../../physics/stack/place-detail.js';
 import type { Stack } from '../../../physics/stack/stack.js';
+import { stackAnchors } from '../../../scenes/stack-anchors.js';
+import { stackLayout } from '../../../scenes/stack-layout.js';
+import { spineOfScene } from '../stack-view/spine-of-scene.js';
+import { stackSceneOf } from '../stack-view/stack-scene.js';
 import { placed, sizeShown, type DeskModel } from '../model/desk-model.js';
 import { beamPathSheet } from './beam-path-sheet.js';
+import { beamTable } from './beam-table.js';
 import { leaderPath } from './leader-path.js';
 import { spineLabels } from './spine-labels.js';
 import { stations } from './stations.js';
@@ -14,6 +19,9 @@ import '../fields/choice-field.js';
 import '../fields/number-field.js';
 import '../fields/text-field.js';
 import '../stack-view/stack-view.js';
+
+/** Narrowest spine drawn, in px. */
+const leastWidth = 200;
 
 /**
  * The beam from focal spot to detector, with what is set and read on the left (Current) and right
@@ -27,6 +35,7 @@ import '../stack-view/stack-view.js';
 export class BeamPath extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
   @state() private spine = { width: 440, height: 700 };
+  @state() private turned = false;
 
   static override styles = beamPathSheet;
 
@@ -48,6 +57,8 @@ export class BeamPath extends LitElement {
   }
 
   private layout(stack: Stack | null, detail: PlacedDetail | null): SpineLayout {
+    const scene = stackSceneOf(this.model);
+    if (scene) return spineOfScene(stackAnchors(stackLayout(scene, this.spine.width, this.spine.height)));
     const layers_mm = stack
       ? stack.layers.map((layer) => layer.thickness_mm)
       : this.model.draft.case.patient.layers.map((layer) => layer.thickness_mm);
@@ -59,7 +70,8 @@ export class BeamPath extends LitElement {
     const spine = this.renderRoot.querySelector<HTMLElement>('.spine');
     if (!spine) return;
     const { offsetWidth: width, offsetHeight: height } = spine;
-    if (width === 0 || height === 0) return;
+    // Before the page's own style sheet has come there is no width worth drawing for.
+    if (width < leastWidth || height === 0) return;
     if (width !== this.spine.width || height !== this.spine.height) this.spine = { width, height };
     else this.arrange();
   }
@@ -108,13 +120,16 @@ export class BeamPath extends LitElement {
         <svg class="leaders" aria-hidden="true"><path /></svg>
         ${this.side(model.left, 'left')}
         <section class="spine" aria-label="Beam path">
-          <stack-view .model=${model} .layout=${layout}></stack-view>
+          <stack-view .model=${model} .layout=${layout} @view-turned=${(event: CustomEvent<boolean>) => {
+            this.turned = event.detail;
+          }}></stack-view>
           ${stack ? nothing : html`<p class="unplaced">The patient has no place in this room at size ${sizeShown(model).name}: see the findings.</p>`}
-          ${spineLabels(model, layout, stack)}
+          <div class="labels" ?inert=${this.turned}>${spineLabels(model, layout, stack)}</div>
         </section>
         ${this.side(model.right, 'right')}
       </div>
-      <p class="caption">depths to scale, air shortened · ink: primary photons per mm² and frame, logarithmic · ratios as set, size ${sizeShown(model).name}</p>`;
+      <p class="caption">to scale, free air shortened · ink: primary photons per mm² and frame, logarithmic · ratios as set, size ${sizeShown(model).name}</p>
+      ${beamTable(model)}`;
   }
 }
 

@@ -21,11 +21,12 @@ function fixtures(model: DeskModel, layout: SpineLayout, stack: Stack | null): T
   const target = room.source ? `${room.source.kind} source` : `tungsten, ${formatEntry(tube.anodeAngle_deg)}°`;
   const slabs = support.map((slab) => `${slab.material} ${formatEntry(slab.thickness_mm)} mm`).join(', ');
   const behind = stack ? `, ${length(stack.exitToDetector_mm)} mm behind the patient` : '';
+  const air = layout.airBreak ?? (layout.tube + layout.patient.top) / 2;
   const gridWords = grid ? `grid ${formatEntry(grid.ratio)}:1, ${formatEntry(grid.strips_per_cm)} per cm` : 'no grid';
   return html`
     <span class="label soft" style=${at(layout.axis + 12, layout.tube - 8)}>${target}</span>
     ${stack
-      ? html`<span class="label soft" style=${at(layout.axis + 70, layout.airBreak - 9)}>${length(stack.sourceToSkin_mm)} mm to the skin</span>`
+      ? html`<span class="label soft" style=${at(layout.axis + layout.halfWidth(air) + 84, air - 9)}>${length(stack.sourceToSkin_mm)} mm to the skin</span>`
       : nothing}
     ${slabs ? html`<span class="label soft" style=${at(layout.left, layout.support.top - 19)}>${slabs}</span>` : nothing}
     <span class="label soft wash" style=${at(layout.left, layout.grid - 19)}>${gridWords}</span>

@@ -46,7 +46,9 @@ function leftWishes(scene: StackScene, layout: StackLayout, tilt: number, zoom: 
     dx: indent_px,
     dy,
   });
-  const supports = scene.supportEntrance.map((slab) => `${slab.material} ${millimetres(slab.thickness_mm)}`);
+  const supports = scene.supportEntrance.map(
+    (slab) => `${slab.material} ${millimetres(slab.thickness_mm)}`,
+  );
   const layers = scene.layers.map((layer, i) => {
     const { top, bottom } = layout.layers[i];
     const words = `${layer.name}, ${layer.material} ${millimetres(layer.thickness_mm)}`;
@@ -73,13 +75,15 @@ function leftWishes(scene: StackScene, layout: StackLayout, tilt: number, zoom: 
 function rightWishes(scene: StackScene, layout: StackLayout): Wish[] {
   const air = layout.shortened
     .filter(({ at }) => at < layout.skin)
-    .map(({ at, length_mm, factor }): Wish => ({
-      id: 'air',
-      words: `${millimetres(length_mm)} to the skin, shortened ${formatNumber(factor, 2)} times`,
-      at: [layout.halfField(at)[0], -at, 0],
-      dx: 18,
-      dy: 0,
-    }));
+    .map(
+      ({ at, length_mm, factor }): Wish => ({
+        id: 'air',
+        words: `${millimetres(length_mm)} to the skin, shortened ${formatNumber(factor, 2)} times`,
+        at: [layout.halfField(at)[0], -at, 0],
+        dx: 18,
+        dy: 0,
+      }),
+    );
   const { detail } = scene;
   if (!detail || layout.detail === null) return air;
   const breadth = detail.form === 'cylinder' ? detail.height_mm : detail.breadth_mm;
@@ -94,26 +98,31 @@ export function stackLabels(scene: StackScene, layout: StackLayout, view: View):
   const tilt = Math.cos((view.elevation_deg * Math.PI) / 180);
   if (tilt < leastTilt) return [];
   const p = projection(view, layout);
-  return [leftWishes(scene, layout, tilt, view.zoom), rightWishes(scene, layout)].flatMap((column) => {
-    const placed = column
-      .map((wish) => ({ ...wish, anchor: onPage(p, wish.at) }))
-      .filter(({ anchor: [x, y] }) => x > -200 && x < layout.width_px && y > -20 && y < layout.height_px + 20)
-      .sort((a, b) => a.anchor[1] + a.dy - b.anchor[1] - b.dy);
-    const tops = placeAlong(
-      placed.map(({ anchor, dy }) => ({ anchor: anchor[1] + dy, height: labelHeight_px })),
-      0,
-      layout.height_px,
-    );
-    return placed.map(({ id, words, anchor, dx, dy }, i): PlacedLabel => {
-      const moved = Math.abs(tops[i] + labelHeight_px / 2 - anchor[1] - dy) > own_px;
-      return {
-        id,
-        words,
-        anchor,
-        left: Math.max(2, anchor[0] + dx),
-        top: tops[i],
-        leads: moved || id === 'detail',
-      };
-    });
-  });
+  return [leftWishes(scene, layout, tilt, view.zoom), rightWishes(scene, layout)].flatMap(
+    (column) => {
+      const placed = column
+        .map((wish) => ({ ...wish, anchor: onPage(p, wish.at) }))
+        .filter(
+          ({ anchor: [x, y] }) =>
+            x > -200 && x < layout.width_px && y > -20 && y < layout.height_px + 20,
+        )
+        .sort((a, b) => a.anchor[1] + a.dy - b.anchor[1] - b.dy);
+      const tops = placeAlong(
+        placed.map(({ anchor, dy }) => ({ anchor: anchor[1] + dy, height: labelHeight_px })),
+        0,
+        layout.height_px,
+      );
+      return placed.map(({ id, words, anchor, dx, dy }, i): PlacedLabel => {
+        const moved = Math.abs(tops[i] + labelHeight_px / 2 - anchor[1] - dy) > own_px;
+        return {
+          id,
+          words,
+          anchor,
+          left: Math.max(2, anchor[0] + dx),
+          top: tops[i],
+          leads: moved || id === 'detail',
+        };
+      });
+    },
+  );
 }

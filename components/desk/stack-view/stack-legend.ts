@@ -1,6 +1,6 @@
 import { html, nothing, svg, type TemplateResult } from 'lit';
 import { shownShading } from '../../../scenes/drawing/stack-drawing.js';
-import { inkScale, inkTicks, type InkScale } from '../../../scenes/ink-scale.js';
+import { type InkScale, inkScale, inkTicks } from '../../../scenes/ink-scale.js';
 import type { StackLayout } from '../../../scenes/stack-layout.js';
 import type { StackScene } from '../../../scenes/stack-scene-data.js';
 import { formatNumber } from '../../charts/format.js';
@@ -36,8 +36,9 @@ export function stackLegend(scene: StackScene, layout: StackLayout): TemplateRes
     ...(air ? [`air shortened ${formatNumber(air.factor, 2)} times`] : []),
   ];
   return html`<div class="legend" part="legend">
-    ${ink.most > 0
-      ? html`<svg width=${width + 16} height="26" viewBox="-8 0 ${width + 16} 26" aria-hidden="true">
+    ${
+      ink.most > 0
+        ? html`<svg width=${width + 16} height="26" viewBox="-8 0 ${width + 16} 26" aria-hidden="true">
           ${ramp('current-ramp', 'var(--current)', 0, ink)}
           ${scene.techniques.length > 1 ? ramp('proposed-ramp', 'var(--proposed)', bar + 1, ink) : nothing}
           ${inkTicks(ink).map((tick) => {
@@ -45,7 +46,8 @@ export function stackLegend(scene: StackScene, layout: StackLayout): TemplateRes
             return svg`<path d="M${x},0 v${2 * bar + 3}" /><text x=${x} y="24" text-anchor="middle">${text(tick)}</text>`;
           })}
         </svg>`
-      : nothing}
+        : nothing
+    }
     <span>ink: ${shading.quantity}${shading.unit ? html` ${shading.unit}` : nothing} · ${notes.join(' · ')}</span>
   </div>`;
 }

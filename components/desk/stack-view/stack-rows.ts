@@ -48,7 +48,12 @@ function slabRows(scene: StackScene, slabs: readonly SceneSlab[], from_mm: numbe
 /** The stack as a table, in the order the beam meets it: what the drawing shows, in numbers. */
 export function stackRows(scene: StackScene): StackRow[] {
   const support_mm = scene.supportEntrance.reduce((sum, slab) => sum + slab.thickness_mm, 0);
-  const point = (name: string, material: string, thickness_mm: number | null, depth_mm: number): StackRow => ({
+  const point = (
+    name: string,
+    material: string,
+    thickness_mm: number | null,
+    depth_mm: number,
+  ): StackRow => ({
     name,
     material,
     thickness_mm,
@@ -69,6 +74,11 @@ export function stackRows(scene: StackScene): StackRow[] {
     ...detailRow,
     ...layers.slice(inLayer),
     ...slabRows(scene, scene.supportExit, patientThickness_mm(scene)),
-    point('detector', scene.detector.label, null, scene.sourceToDetector_mm - scene.sourceToSkin_mm),
+    point(
+      'detector',
+      scene.detector.label,
+      null,
+      scene.sourceToDetector_mm - scene.sourceToSkin_mm,
+    ),
   ];
 }

@@ -11,7 +11,10 @@ export function stackTable(scene: StackScene): TemplateResult {
   const { techniques, primary, shading, grid } = scene;
   const span = techniques.length;
   const settings = techniques
-    .map((t) => `${t.name}: filter ${t.filter?.label ?? 'none'}, grid ${grid && t.isGridIn ? 'in' : 'out'}`)
+    .map(
+      (t) =>
+        `${t.name}: filter ${t.filter?.label ?? 'none'}, grid ${grid && t.isGridIn ? 'in' : 'out'}`,
+    )
     .join('; ');
   return html`<table>
       <caption>

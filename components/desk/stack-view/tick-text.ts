@@ -4,5 +4,7 @@ const superscript = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 export function raisedPower(value: number): string {
   const power = Math.round(Math.log10(value));
   if (Math.abs(power) <= 2) return String(Number((10 ** power).toPrecision(1)));
-  return `10${String(power).replace('-', '⁻').replace(/\d/g, (digit) => superscript[Number(digit)])}`;
+  return `10${String(power)
+    .replace('-', '⁻')
+    .replace(/\d/g, (digit) => superscript[Number(digit)])}`;
 }

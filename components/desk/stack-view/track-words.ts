@@ -1,4 +1,4 @@
-import { type StackScene, trackKinds, type Tracks } from '../../../scenes/stack-scene-data.js';
+import { type StackScene, type Tracks, trackKinds } from '../../../scenes/stack-scene-data.js';
 
 /** How many pieces of each kind the tracks hold, in the order of `trackKinds`. */
 export const trackCounts = ({ kinds }: Tracks): number[] =>

@@ -124,11 +124,15 @@ const withDisagreement = (
     const { incidentAirKerma, sdnr } = row.ratio;
     if (row.holdConstant === 'sdnr' || incidentAirKerma === null || sdnr === null) return row;
     const findings: Finding[] = [];
-    if (incidentAirKerma < 1 && atEqualSdnr !== null && atEqualSdnr > 1) {
+    if (incidentAirKerma < 1 && (atEqualSdnr === null || atEqualSdnr > 1)) {
+      const otherwise =
+        atEqualSdnr === null
+          ? 'but reaches equal SdNR at no tube load'
+          : `but more (×${numberText(atEqualSdnr)}) at equal SdNR`;
       findings.push({
         code: 'equalitiesDisagree',
         severity: 'caution',
-        message: `${name} has less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(row.holdConstant)}, but more (×${numberText(atEqualSdnr)}) at equal SdNR.`,
+        message: `${name} has less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(row.holdConstant)}, ${otherwise}.`,
         value: incidentAirKerma,
         bound: atEqualSdnr,
       });

@@ -17,7 +17,7 @@ export interface Prepared {
   readonly material: (name: string) => Material;
   readonly detector: DetectorResponse;
   readonly grid: RoomGrid | null;
-  /** K edges of everything in the beam: bin boundaries of every spectrum of this case. */
+  /** Edges of everything in the beam: bin boundaries of every spectrum of this case. */
   readonly edges_keV: readonly number[];
   readonly calibration: Calibration | null;
   /** Between anode and added filter: calibrated aluminium, or the filtration as entered. */
@@ -49,14 +49,16 @@ const makePrepared = (c: Case): Prepared => {
     material,
     detector,
     grid,
-    edges_keV: kEdges_keV([
-      ...[...filters.values()].flat().map((layer) => layer.material),
-      ...room.support.map((slab) => material(slab.material)),
-      ...c.patient.layers.map((layer) => layerMaterial(c, layer)),
-      ...detailMaterials(c, material),
-      ...(room.detector.material === 'ideal' ? [] : [material(room.detector.material)]),
-      ...(room.grid ? [material(room.grid.strip.material)] : []),
-    ]),
+    edges_keV: [
+      ...detector.edges_keV,
+      ...kEdges_keV([
+        ...[...filters.values()].flat().map((layer) => layer.material),
+        ...room.support.map((slab) => material(slab.material)),
+        ...c.patient.layers.map((layer) => layerMaterial(c, layer)),
+        ...detailMaterials(c, material),
+        ...(room.grid ? [material(room.grid.strip.material)] : []),
+      ]),
+    ],
     calibration,
     inherentFilter: calibration
       ? [{ material: material('aluminium'), thickness_mm: calibration.inherentFilter_mmAl }]

@@ -120,6 +120,14 @@ export const beamPathSheet = css`
     padding-inline: 0.2rem;
     background: color-mix(in srgb, var(--paper) 78%, transparent);
   }
+  .label.foot {
+    margin-inline-start: -0.2rem;
+  }
+  @media (max-width: 719px) {
+    .label.foot {
+      white-space: normal;
+    }
+  }
   .table {
     font-size: var(--small);
     color: var(--soft);

@@ -4,8 +4,7 @@ import { placeAlong } from '../../charts/place-along.js';
 import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
 import type { PlacedDetail } from '../../../physics/stack/place-detail.js';
 import type { Stack } from '../../../physics/stack/stack.js';
-import { stackAnchors } from '../../../scenes/stack-anchors.js';
-import { stackLayout } from '../../../scenes/stack-layout.js';
+import type { StackAnchors } from '../../../scenes/stack-anchors.js';
 import { spineOfScene } from '../stack-view/spine-of-scene.js';
 import { stackSceneOf } from '../stack-view/stack-scene.js';
 import { placed, sizeShown, type DeskModel } from '../model/desk-model.js';
@@ -36,6 +35,8 @@ export class BeamPath extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
   @state() private spine = { width: 440, height: 700 };
   @state() private turned = false;
+  /** Where the layer view has drawn things. */
+  @state() private anchors: StackAnchors | null = null;
 
   static override styles = beamPathSheet;
 
@@ -57,8 +58,7 @@ export class BeamPath extends LitElement {
   }
 
   private layout(stack: Stack | null, detail: PlacedDetail | null): SpineLayout {
-    const scene = stackSceneOf(this.model);
-    if (scene) return spineOfScene(stackAnchors(stackLayout(scene, this.spine.width, this.spine.height)));
+    if (stack && this.anchors) return spineOfScene(this.anchors);
     const layers_mm = stack
       ? stack.layers.map((layer) => layer.thickness_mm)
       : this.model.draft.case.patient.layers.map((layer) => layer.thickness_mm);
@@ -120,7 +120,9 @@ export class BeamPath extends LitElement {
         <svg class="leaders" aria-hidden="true"><path /></svg>
         ${this.side(model.left, 'left')}
         <section class="spine" aria-label="Beam path">
-          <stack-view .model=${model} .layout=${layout} @view-turned=${(event: CustomEvent<boolean>) => {
+          <stack-view .scene=${stackSceneOf(model)} labels="turned" @stack-anchors=${(event: CustomEvent<StackAnchors>) => {
+            this.anchors = event.detail;
+          }} @view-turned=${(event: CustomEvent<boolean>) => {
             this.turned = event.detail;
           }}></stack-view>
           ${stack ? nothing : html`<p class="unplaced">The patient has no place in this room at size ${sizeShown(model).name}: see the findings.</p>`}

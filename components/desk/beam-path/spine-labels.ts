@@ -26,11 +26,11 @@ function fixtures(model: DeskModel, layout: SpineLayout, stack: Stack | null): T
   return html`
     <span class="label soft" style=${at(layout.axis + 12, layout.tube - 8)}>${target}</span>
     ${stack
-      ? html`<span class="label soft" style=${at(layout.axis + layout.halfWidth(air) + 84, air - 9)}>${length(stack.sourceToSkin_mm)} mm to the skin</span>`
+      ? html`<span class="label soft" style="right:2px; top:${(air - 9).toFixed(0)}px">${length(stack.sourceToSkin_mm)} mm to the skin</span>`
       : nothing}
     ${slabs ? html`<span class="label soft" style=${at(layout.left, layout.support.top - 19)}>${slabs}</span>` : nothing}
     <span class="label soft wash" style=${at(layout.left, layout.grid - 19)}>${gridWords}</span>
-    <span class="label soft" style=${at(layout.left, layout.detector.bottom + 4)}
+    <span class="label soft foot" style=${at(layout.left, layout.detector.bottom + 4)}
       >${detector.material}, ${length(geometry.sourceToDetector_mm)} mm from the focal spot${behind}</span>`;
 }
 

@@ -6,7 +6,8 @@ import { ratioNames } from '../../charts/quantities.js';
 import { comparisonOf, type DeskModel } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 
-const columns: readonly (readonly [HoldConstant, string])[] = [
+/** The equalities the margin shows. */
+export const marginColumns: readonly (readonly [HoldConstant, string])[] = [
   ['asSet', 'as set'],
   ['sdnr', 'equal SdNR'],
   ['detectorAirKerma', 'equal detector air kerma'],
@@ -63,9 +64,9 @@ export class ComparisonTable extends LitElement {
     );
     return html`<table class=${this.model.stale ? 'stale' : ''}>
       <caption class="unseen">Ratios of ${comparison.to} to ${comparison.from}, size ${comparison.size}</caption>
-      <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${columns.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>
+      <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${marginColumns.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>
       <tbody>${known.map(
-        ([key, name]) => html`<tr><th scope="row">${name}</th>${columns.map(
+        ([key, name]) => html`<tr><th scope="row">${name}</th>${marginColumns.map(
           ([hold]) => html`<td>${formatRatio(rowOf(hold)?.ratio[key]).replace('×', '')}</td>`,
         )}</tr>`,
       )}</tbody>

@@ -9,6 +9,7 @@ import type { ExplainRequest } from '../figure-value/figure-value.js';
 import { comparisonOf, evaluationOf, type DeskModel } from '../model/desk-model.js';
 import type { Paper } from './paper.js';
 import { sectionInView } from './section-in-view.js';
+import { marginColumns } from '../comparison-table/comparison-table.js';
 import '../balance-section/balance-section.js';
 import '../beam-path/beam-path.js';
 import '../caution-footer/caution-footer.js';
@@ -86,7 +87,9 @@ export class DeskPage extends LitElement {
     return [
       ...(evaluationOf(model, model.left)?.findings ?? []),
       ...(evaluationOf(model, model.right)?.findings ?? []),
-      ...(comparisonOf(model)?.rows.flatMap((row) => row.findings) ?? []),
+      ...(comparisonOf(model)?.rows ?? [])
+        .filter(({ holdConstant }) => marginColumns.some(([hold]) => hold === holdConstant))
+        .flatMap((row) => row.findings),
       ...(model.weighing?.findings ?? []),
     ];
   }

@@ -3,7 +3,8 @@ import { lightInks, type StackInks } from '../../../scenes/inks.js';
 /** The inks of the page an element stands on, from its custom properties. */
 export function pageInks(element: Element): StackInks {
   const style = getComputedStyle(element);
-  const read = (name: string, otherwise: string) => style.getPropertyValue(name).trim() || otherwise;
+  const read = (name: string, otherwise: string) =>
+    style.getPropertyValue(name).trim() || otherwise;
   return {
     paper: read('--paper', lightInks.paper),
     shade: read('--paper-shade', lightInks.shade),

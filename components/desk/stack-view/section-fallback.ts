@@ -5,7 +5,7 @@ import type { StackAnchors } from '../../../scenes/stack-anchors.js';
 import type { StackLayout } from '../../../scenes/stack-layout.js';
 import type { StackScene } from '../../../scenes/stack-scene-data.js';
 import { type BeamHalf, sectionDrawing } from '../../charts/section-drawing.js';
-import { spineOf } from './spine-of-anchors.js';
+import { spineOfScene } from './spine-of-scene.js';
 
 /** Gradient stops that are enough for an eye. */
 const stops = 48;
@@ -34,7 +34,7 @@ export function sectionFallback(
   const second = scene.techniques.length > 1 ? half(scene, rows[1], 1, at) : null;
   return html`<svg class="section drawing" viewBox="0 0 ${at.width} ${at.height}" aria-hidden="true">
     ${sectionDrawing({
-      layout: spineOf(at),
+      layout: spineOfScene(at),
       layers: scene.layers,
       support: scene.supportEntrance.length > 0,
       grid: scene.grid !== null,

@@ -3,7 +3,7 @@ import { onPage, projection } from '../../../scenes/projection.js';
 import type { StackLayout } from '../../../scenes/stack-layout.js';
 import type { StackScene } from '../../../scenes/stack-scene-data.js';
 import type { View } from '../../../scenes/view.js';
-import { formatNumber } from '../../charts/format.js';
+import { formatEntry } from '../../charts/format.js';
 import { placeAlong } from '../../charts/place-along.js';
 
 /** A label on the page: its words, its left edge and top, and the place it speaks of, in px. */
@@ -33,7 +33,11 @@ const own_px = 9;
 /** Seen from above, layers lie behind one another and are not named. */
 const leastTilt = 0.3;
 
-const millimetres = (length_mm: number): string => `${formatNumber(length_mm)} mm`;
+/** Width of words as they are set, near enough to keep them on the page. */
+const width_px = (words: string): number => 6.9 * words.length;
+
+const millimetres = (length_mm: number): string =>
+  `${formatEntry(Number(length_mm.toPrecision(4)))} mm`;
 
 /** Names down the left edge of the cut face. */
 function leftWishes(scene: StackScene, layout: StackLayout, tilt: number, zoom: number): Wish[] {
@@ -76,9 +80,9 @@ function rightWishes(scene: StackScene, layout: StackLayout): Wish[] {
   const air = layout.shortened
     .filter(({ at }) => at < layout.skin)
     .map(
-      ({ at, length_mm, factor }): Wish => ({
+      ({ at, length_mm }): Wish => ({
         id: 'air',
-        words: `${millimetres(length_mm)} to the skin, shortened ${formatNumber(factor, 2)} times`,
+        words: `${millimetres(length_mm)} to the skin`,
         at: [layout.halfField(at)[0], -at, 0],
         dx: 18,
         dy: 0,
@@ -118,7 +122,7 @@ export function stackLabels(scene: StackScene, layout: StackLayout, view: View):
           id,
           words,
           anchor,
-          left: Math.max(2, anchor[0] + dx),
+          left: Math.max(2, Math.min(anchor[0] + dx, layout.width_px - width_px(words))),
           top: tops[i],
           leads: moved || id === 'detail',
         };

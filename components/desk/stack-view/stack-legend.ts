@@ -31,16 +31,15 @@ export function stackLegend(scene: StackScene, layout: StackLayout): TemplateRes
   const text = ink.scale === 'log' ? raisedPower : (value: number) => formatNumber(value, 2);
   const air = layout.shortened.find(({ at }) => at < layout.skin);
   const notes = [
-    `${ink.scale === 'log' ? 'log' : 'linear'} scale`,
-    'patient and field in true proportion',
-    ...(air ? [`air shortened ${formatNumber(air.factor, 2)} times`] : []),
+    ink.scale === 'log' ? 'log scale' : 'linear scale',
+    air ? `to scale but for air, shortened ${formatNumber(air.factor, 2)} times` : 'to scale',
   ];
   return html`<div class="legend" part="legend">
     ${
       ink.most > 0
         ? html`<svg width=${width + 16} height="26" viewBox="-8 0 ${width + 16} 26" aria-hidden="true">
-          ${ramp('current-ramp', 'var(--current)', 0, ink)}
-          ${scene.techniques.length > 1 ? ramp('proposed-ramp', 'var(--proposed)', bar + 1, ink) : nothing}
+          ${ramp('current-ramp', 'var(--graphite)', 0, ink)}
+          ${scene.techniques.length > 1 ? ramp('proposed-ramp', 'var(--madder)', bar + 1, ink) : nothing}
           ${inkTicks(ink).map((tick) => {
             const x = rampPosition(ink, tick);
             return svg`<path d="M${x},0 v${2 * bar + 3}" /><text x=${x} y="24" text-anchor="middle">${text(tick)}</text>`;
@@ -48,6 +47,6 @@ export function stackLegend(scene: StackScene, layout: StackLayout): TemplateRes
         </svg>`
         : nothing
     }
-    <span>ink: ${shading.quantity}${shading.unit ? html` ${shading.unit}` : nothing} · ${notes.join(' · ')}</span>
+    <span>ink: ${[shading.quantity, shading.unit].filter(Boolean).join(', ')} · ${notes.join(' · ')}</span>
   </div>`;
 }

@@ -1,9 +1,14 @@
 import { namedMaterial } from '../../../materials/index.js';
 import type { AlongBeam } from '../../../physics/along-beam.js';
 import type { Stack, StackLayer } from '../../../physics/stack/stack.js';
-import type { DepthProfile, SceneSlab, SceneTechnique, StackScene } from '../../../scenes/stack-scene-data.js';
+import type {
+  DepthProfile,
+  SceneSlab,
+  SceneTechnique,
+  StackScene,
+} from '../../../scenes/stack-scene-data.js';
 import { formatEntry } from '../../charts/format.js';
-import { placed, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, placed } from '../model/desk-model.js';
 
 const slab = ({ name, material, thickness_mm }: StackLayer): SceneSlab => ({
   name,
@@ -16,12 +21,21 @@ const slab = ({ name, material, thickness_mm }: StackLayer): SceneSlab => ({
 const above = [0.02, 0.05, 0.1, 0.2, 0.35, 0.5, 0.7, 0.85];
 
 /** Primary photons per mm² by depth; above the skin the beam of the skin spread back by distance. */
-export function primaryProfile({ distances_mm, primaryFluence_per_mm2 }: AlongBeam, stack: Stack): DepthProfile {
+export function primaryProfile(
+  { distances_mm, primaryFluence_per_mm2 }: AlongBeam,
+  stack: Stack,
+): DepthProfile {
   const toSkin = stack.sourceToSkin_mm;
   const spread = (share: number) => (stack.beam === 'parallel' ? 1 : 1 / share ** 2);
   return {
-    depths_mm: [...above.map((share) => (share - 1) * toSkin), ...distances_mm.map((distance) => distance - toSkin)],
-    values: [...above.map((share) => primaryFluence_per_mm2[0] * spread(share)), ...primaryFluence_per_mm2],
+    depths_mm: [
+      ...above.map((share) => (share - 1) * toSkin),
+      ...distances_mm.map((distance) => distance - toSkin),
+    ],
+    values: [
+      ...above.map((share) => primaryFluence_per_mm2[0] * spread(share)),
+      ...primaryFluence_per_mm2,
+    ],
   };
 }
 
@@ -31,8 +45,21 @@ function techniqueOf({ draft }: DeskModel, index: number): SceneTechnique {
   return { name, filter: layers.length > 0 ? { label: filter } : null, isGridIn: grid === 'in' };
 }
 
-/** What the layer view draws of the desk; null where the patient has no place in the room. */
+const made = new WeakMap<DeskModel, StackScene | null>();
+
+/**
+ * What the layer view draws of the desk; null where the patient has no place in the room. The same
+ * object for the same model, so that nothing is drawn twice.
+ */
 export function stackSceneOf(model: DeskModel): StackScene | null {
+  const known = made.get(model);
+  if (known !== undefined) return known;
+  const scene = sceneOf(model);
+  made.set(model, scene);
+  return scene;
+}
+
+function sceneOf(model: DeskModel): StackScene | null {
   const { stack, detail } = placed(model);
   if (!stack) return null;
   const { room, patient, task } = model.draft.case;
@@ -57,7 +84,10 @@ export function stackSceneOf(model: DeskModel): StackScene | null {
       centreDepth_mm: detail.centreDepth_mm,
       height_mm: detail.central.displaced_mm,
       breadth_mm: detail.shape === 'vessel' ? detail.central.displaced_mm : task.detail.length_mm,
-      length_mm: detail.shape === 'vessel' ? task.detail.length_mm : (task.detail.width_mm ?? task.detail.length_mm),
+      length_mm:
+        detail.shape === 'vessel'
+          ? task.detail.length_mm
+          : (task.detail.width_mm ?? task.detail.length_mm),
       isAbsence: detail.shape === 'defect',
       label: task.detail.shape,
     },

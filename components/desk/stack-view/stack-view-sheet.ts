@@ -49,16 +49,21 @@ export const stackViewSheet = css`
   .label {
     position: absolute;
     height: 17px;
-    padding: 0 0.3em;
     line-height: 17px;
     white-space: nowrap;
     pointer-events: none;
-    background: color-mix(in srgb, var(--paper) 78%, transparent);
-    border-radius: 2px;
+  }
+  .label,
+  .from {
+    text-shadow:
+      0 0 2px var(--paper),
+      0 0 2px var(--paper),
+      0 0 4px var(--paper),
+      0 0 4px var(--paper),
+      0 0 6px var(--paper);
   }
   .label.soft {
     color: var(--soft);
-    background: color-mix(in srgb, var(--paper) 60%, transparent);
   }
   .from {
     position: absolute;
@@ -153,9 +158,14 @@ export const stackViewSheet = css`
     padding: 0.25rem 0.35rem;
     border-block-end: 1px solid var(--rule);
     vertical-align: bottom;
+    white-space: nowrap;
   }
   thead th {
     color: var(--soft);
+  }
+  thead th,
+  td.words {
+    white-space: normal;
   }
   thead th:nth-child(-n + 2),
   tbody th,
@@ -173,10 +183,18 @@ export const stackViewSheet = css`
     clip-path: inset(50%);
     white-space: nowrap;
   }
+  .flat .place,
+  .solid .section {
+    display: none;
+  }
   @media print {
     .views,
-    details {
+    details,
+    .place {
       display: none;
+    }
+    .solid .section {
+      display: block;
     }
   }
 `;

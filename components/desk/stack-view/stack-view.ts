@@ -1,229 +1,274 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { html, LitElement, nothing, type PropertyValues, svg } from 'lit';
 import { customElement, property, query, state } from 'lit/decorators.js';
-import { stackLayout } from '../../../scenes/stack-layout.js';
-import type { StackPicture } from '../../../scenes/stack-picture.js';
-import { isSectionView, sectionView, type View, viewWords, zoomed } from '../../../scenes/view.js';
-import { drawnAt, inkDensity, mostPhotons } from '../../charts/beam-shade.js';
-import { type BeamHalf, sectionDrawing } from '../../charts/section-drawing.js';
-import type { SpineLayout } from '../../charts/spine-layout.js';
-import { placed, type DeskModel } from '../model/desk-model.js';
+import type { StackInks } from '../../../scenes/inks.js';
+import { pivotOnPage } from '../../../scenes/projection.js';
+import { type StackAnchors, stackAnchors } from '../../../scenes/stack-anchors.js';
+import { type StackLayout, stackLayout } from '../../../scenes/stack-layout.js';
+import type { StackScene } from '../../../scenes/stack-scene-data.js';
+import {
+  isSectionView,
+  sectionView,
+  type View,
+  viewBetween,
+  viewWords,
+} from '../../../scenes/view.js';
+import { type PresetName, presetNames, presetView } from '../../../scenes/view-presets.js';
 import { drawingSheet } from '../sheets/drawing-sheet.js';
 import { onPaperChange, pageInks } from './page-inks.js';
-import { stackSceneOf } from './stack-scene.js';
-import { viewForDrag, viewForKey } from './view-hand.js';
+import { type HostedPicture, hostPicture } from './picture-host.js';
+import { sectionFallback } from './section-fallback.js';
+import { type PlacedLabel, stackLabels } from './stack-labels.js';
+import { stackLegend } from './stack-legend.js';
+import { stackTable } from './stack-table.js';
+import { stackViewSheet } from './stack-view-sheet.js';
+import { keyWords, stackWords } from './stack-words.js';
+import { keyAnswer } from './view-keys.js';
+import { followPointer } from './view-pointer.js';
+
+const moves_ms = 260;
+const announced_ms = 350;
 
 /**
- * The stack in the beam in true proportion, split down the middle between the two techniques shown,
- * inked by primary photons per mm².
+ * The stack in the beam in three dimensions, cut open along the axis, in true proportion.
  *
- * Shows: the 3D picture; where there is no WebGL2, and in print, a section drawing of the same.
- * Properties: `model`, `layout` (where things stand in the section view).
- * Events: `view-turned` with true while the labels beside the section do not fit the view.
- * Keyboard: arrows turn, Shift+arrows shift, + and − enlarge, 1–6 named views, 0 back.
- * Parts: none.
+ * Shows: focal spot, filters, support, layers, detail, grid, detector; the beam split between
+ * Current (left) and Proposed (right), inked by primary photons or by the scene's `shading`; photon
+ * tracks. Until WebGL2 is there, without it and in print, the same as a flat section.
+ * Properties: `scene`; `palette` (null: the page's custom properties); `view`, one of the named
+ * views; `labels`, `all`, `turned` (own labels only when turned away from the section), `none`.
+ * Events: `stack-anchors` with StackAnchors, the places in the section view, whenever they change;
+ * `view-turned` with true while labels beside the section do not fit the view. Both bubble.
+ * Keyboard: arrows turn, Shift and arrows shift, + and − zoom, 1–6 named views, 0 or Home resets.
+ * Pointer: drag turns, Shift and drag shifts, the wheel zooms with Ctrl or once the view has focus.
+ * Parts: `stage`, `label`, `legend`, `views`, `table`.
  */
 @customElement('stack-view')
 export class StackView extends LitElement {
-  @property({ attribute: false }) model!: DeskModel;
-  @property({ attribute: false }) layout!: SpineLayout;
-  @state() private view: View = sectionView;
-  @state() private flat = true;
-  @query('canvas') private canvas!: HTMLCanvasElement;
+  @property({ attribute: false }) scene: StackScene | null = null;
+  @property({ attribute: false }) palette: StackInks | null = null;
+  @property() view: PresetName = 'section';
+  @property() labels: 'all' | 'turned' | 'none' = 'all';
 
-  private picture: StackPicture | null = null;
-  private shown: unknown[] = [];
-  private stopPaper: () => void = () => undefined;
-  private dragFrom: { x: number; y: number; view: View } | null = null;
+  @state() private looking: View = sectionView;
+  @state() private size: readonly [number, number] = [0, 0];
+  @state() private isSolid = false;
+  @state() private announced = '';
+  @query('.stage') private stage!: HTMLElement;
+  @query('.place') private place!: HTMLElement;
 
-  static override styles = [
-    drawingSheet,
-    css`
-      :host {
-        display: block;
-      }
-      canvas,
-      svg {
-        position: absolute;
-        inset: 0;
-        width: 100%;
-        height: 100%;
-        overflow: visible;
-      }
-      canvas {
-        touch-action: pan-y;
-        cursor: grab;
-      }
-      canvas:active {
-        cursor: grabbing;
-      }
-      .flat canvas,
-      .solid svg {
-        visibility: hidden;
-      }
-      :focus-visible {
-        outline: 2px solid var(--ink);
-        outline-offset: 2px;
-      }
-      button {
-        position: absolute;
-        inset-block-start: 0.6rem;
-        inset-inline-end: 0;
-        font: inherit;
-        font-size: var(--small);
-        color: var(--ink);
-        background: var(--paper);
-        border: 0;
-        border-block-end: 1px dotted var(--entry-rule);
-        padding: 0;
-        cursor: pointer;
-      }
-      @media print {
-        canvas {
-          display: none;
-        }
-        .solid svg {
-          visibility: visible;
-        }
-      }
-    `,
-  ];
+  static override styles = [drawingSheet, stackViewSheet];
+
+  private layout: StackLayout | null = null;
+  private anchors: StackAnchors | null = null;
+  private told = '';
+  /** The named view looked from; null once it has been turned by hand. */
+  private preset: PresetName | null = 'section';
+  private hosted: HostedPicture | null = null;
+  private listening = new AbortController();
+  private move = 0;
+  private pause = 0;
+  private readonly watcher = new ResizeObserver(() => this.measure());
+
+  /** Frames the 3D drawing has taken so far; it takes none at rest. */
+  get frames(): number {
+    return this.hosted?.picture.frames() ?? 0;
+  }
 
   override connectedCallback() {
     super.connectedCallback();
-    this.stopPaper = onPaperChange(() => this.picture?.ink(pageInks(this)));
+    if (this.hasUpdated) this.start();
+  }
+
+  protected override firstUpdated() {
+    this.start();
   }
 
   override disconnectedCallback() {
     super.disconnectedCallback();
-    this.stopPaper();
-    this.letGo();
+    this.listening.abort();
+    this.watcher.disconnect();
+    cancelAnimationFrame(this.move);
+    clearTimeout(this.pause);
+    this.release();
   }
 
-  private letGo() {
-    this.picture?.dispose();
-    this.picture = null;
-    this.shown = [];
-    this.flat = true;
+  private start() {
+    this.listening = new AbortController();
+    const { signal } = this.listening;
+    this.watcher.observe(this.stage);
+    followPointer(
+      {
+        stage: this.stage,
+        view: () => this.looking,
+        change: (view) => this.turn(view, null),
+        pivot: () => (this.layout ? pivotOnPage(this.layout) : [0, 0]),
+      },
+      signal,
+    );
+    signal.addEventListener(
+      'abort',
+      onPaperChange(() => this.requestUpdate('palette')),
+    );
+    void this.solidify(signal);
   }
 
-  protected override async firstUpdated() {
-    const { stackPicture } = await import('../../../scenes/stack-picture.js');
-    const begin = () => {
-      if (!this.isConnected) return;
-      this.picture = stackPicture(this.canvas, pageInks(this));
-      this.flat = this.picture === null;
-      this.draw();
-    };
-    this.canvas.addEventListener('webglcontextlost', (event) => {
-      event.preventDefault();
-      this.letGo();
+  /** Exchanges the flat section for the 3D drawing as soon as that can be had. */
+  private async solidify(signal: AbortSignal) {
+    const hosted = await hostPicture(this.place, this.inks(), (happened) => {
+      if (happened === 'lost') this.isSolid = false;
+      else {
+        this.release();
+        void this.solidify(signal);
+      }
     });
-    this.canvas.addEventListener('webglcontextrestored', begin);
-    begin();
-  }
-
-  protected override updated() {
-    this.draw();
-  }
-
-  /** Hands the picture what it has not drawn yet; at rest nothing is drawn. */
-  private draw() {
-    const { width, height } = this.layout;
-    const { draft, along, left, right, sizeName } = this.model;
-    const wanted = [draft.case, along, left, right, sizeName, width, height];
-    if (!this.picture || wanted.every((value, i) => value === this.shown[i])) return;
-    const scene = stackSceneOf(this.model);
-    if (!scene) return;
-    this.shown = wanted;
-    this.picture.show(scene, stackLayout(scene, width, height));
-    this.picture.look(this.view);
-  }
-
-  private look(view: View) {
-    this.view = view;
-    this.picture?.look(view);
-    this.dispatchEvent(new CustomEvent('view-turned', { detail: !isSectionView(view), bubbles: true, composed: true }));
-  }
-
-  private onKey(event: KeyboardEvent) {
-    const scene = stackSceneOf(this.model);
-    if (!scene || !this.picture) return;
-    const layout = stackLayout(scene, this.layout.width, this.layout.height);
-    const view = viewForKey(event, this.view, layout, scene.detail?.height_mm ?? 10);
-    if (!view) return;
-    event.preventDefault();
-    this.look(view);
-  }
-
-  private onPointer(event: PointerEvent) {
-    if (event.type === 'pointerdown' && event.button === 0) {
-      this.canvas.setPointerCapture(event.pointerId);
-      this.dragFrom = { x: event.clientX, y: event.clientY, view: this.view };
-    } else if (event.type === 'pointermove' && this.dragFrom) {
-      const { x, y, view } = this.dragFrom;
-      this.look(viewForDrag(view, event.clientX - x, event.clientY - y, event.shiftKey));
-    } else if (event.type !== 'pointermove') {
-      this.dragFrom = null;
+    if (signal.aborted) hosted?.remove();
+    else if (hosted) {
+      this.hosted = hosted;
+      this.isSolid = true;
+      if (this.scene && this.layout) hosted.picture.show(this.scene, this.layout);
+      hosted.picture.look(this.looking);
     }
   }
 
-  private onWheel(event: WheelEvent) {
-    // Scrolling the page over the drawing stays scrolling; Ctrl (a pinch) enlarges.
-    if (!event.ctrlKey) return;
+  private release() {
+    this.hosted?.remove();
+    this.hosted = null;
+    this.isSolid = false;
+  }
+
+  private inks = (): StackInks => this.palette ?? pageInks(this);
+
+  private measure() {
+    const { clientWidth, clientHeight } = this.stage;
+    if (clientWidth !== this.size[0] || clientHeight !== this.size[1]) {
+      this.size = [clientWidth, clientHeight];
+    }
+  }
+
+  /** Looks at the stack from somewhere else; named views are gone to in a short movement. */
+  private turn(view: View, preset: PresetName | null) {
+    cancelAnimationFrame(this.move);
+    this.preset = preset;
+    const isCalm = matchMedia('(prefers-reduced-motion: reduce)').matches;
+    if (preset === null || isCalm || !this.isSolid) this.look(view);
+    else this.moveTo(view);
+    clearTimeout(this.pause);
+    this.pause = window.setTimeout(() => {
+      this.announced = `Seen ${viewWords(view)}.`;
+    }, announced_ms);
+  }
+
+  private moveTo(view: View) {
+    const from = this.looking;
+    let begun = 0;
+    const step = (now: number) => {
+      begun ||= now;
+      const share = Math.min(1, (now - begun) / moves_ms);
+      this.look(viewBetween(from, view, share * share * (3 - 2 * share)));
+      if (share < 1) this.move = requestAnimationFrame(step);
+    };
+    this.move = requestAnimationFrame(step);
+  }
+
+  private look(view: View) {
+    const before = isSectionView(this.looking);
+    this.looking = view;
+    const isSection = isSectionView(view);
+    if (isSection !== before) this.tell('view-turned', !isSection);
+  }
+
+  private tell(name: string, detail: unknown) {
+    this.dispatchEvent(new CustomEvent(name, { detail, bubbles: true, composed: true }));
+  }
+
+  /** Tells where things stand, when that is news. */
+  private tellAnchors() {
+    const places = JSON.stringify(this.anchors);
+    if (places === this.told) return;
+    this.told = places;
+    this.tell('stack-anchors', this.anchors);
+  }
+
+  private named(name: PresetName, layout: StackLayout): View {
+    const detail = this.scene?.detail;
+    return presetView(name, layout, detail ? Math.max(detail.height_mm, detail.breadth_mm) : 10);
+  }
+
+  private go(name: PresetName) {
+    this.view = name;
+    this.preset = name;
+    if (this.layout) this.turn(this.named(name, this.layout), name);
+  }
+
+  private onKey(event: KeyboardEvent) {
+    const answer = keyAnswer(event, this.looking);
+    if (!answer) return;
     event.preventDefault();
-    this.look(zoomed(this.view, Math.exp(-event.deltaY / 300)));
+    if ('preset' in answer) this.go(answer.preset);
+    else this.turn(answer.view, null);
   }
 
-  private half(technique: number): BeamHalf {
-    const { draft, along } = this.model;
-    const { stack } = placed(this.model);
-    const { name, filter, grid } = draft.case.techniques[technique];
-    const layers = draft.case.room.filters.find((entry) => entry.name === filter)?.layers ?? [];
-    const beam = along.find((entry) => entry.technique === name);
-    const most = mostPhotons(along);
-    const shade =
-      stack && beam
-        ? beam.distances_mm.map((distance_mm, i) => ({
-            y: drawnAt(distance_mm, this.layout, stack),
-            density: inkDensity(beam.primaryFluence_per_mm2[i], most),
-          }))
-        : [];
-    return { index: technique, filtered: layers.length > 0, gridIn: grid === 'in', shade };
+  protected override willUpdate(changed: PropertyValues) {
+    if (changed.has('view') && this.view !== this.preset) this.go(this.view);
+    if (!changed.has('scene') && !changed.has('size')) return;
+    const [width, height] = this.size;
+    const { scene } = this;
+    this.layout = scene && width > 0 && height > 0 ? stackLayout(scene, width, height) : null;
+    this.anchors = this.layout && stackAnchors(this.layout);
+    if (this.layout && this.preset) this.looking = this.named(this.preset, this.layout);
   }
 
-  private drawing() {
-    const { left, right, draft } = this.model;
-    const { stack, detail } = placed(this.model);
-    const families = draft.case.patient.layers.map((layer, i) => ({
-      name: layer.name,
-      family: stack?.layers[i]?.material.family ?? ('soft tissue' as const),
-    }));
-    return sectionDrawing({
-      layout: this.layout,
-      layers: families,
-      support: draft.case.room.support.some((slab) => slab.side === 'entrance'),
-      grid: draft.case.room.grid !== null,
-      detail: detail && {
-        breadth_mm: detail.shape === 'vessel' ? detail.central.displaced_mm : draft.case.task.detail.length_mm,
-        height_mm: detail.central.displaced_mm,
-        round: detail.shape === 'vessel',
-      },
-      halves: [this.half(left), right === null ? null : this.half(right)],
-      idPrefix: 'stack',
-    });
+  protected override updated(changed: PropertyValues) {
+    const picture = this.hosted?.picture;
+    if (changed.has('palette')) picture?.ink(this.inks());
+    if ((changed.has('scene') || changed.has('size')) && this.scene && this.layout) {
+      picture?.show(this.scene, this.layout);
+      this.tellAnchors();
+    }
+    if (changed.has('looking')) picture?.look(this.looking);
+  }
+
+  private label = ({ id, words, left, top }: PlacedLabel) =>
+    html`<span class="label ${id.startsWith('layer') || id === 'detail' ? '' : 'soft'}" part="label"
+      style="left:${left.toFixed(1)}px;top:${top.toFixed(1)}px">${words}</span>`;
+
+  private overlay(scene: StackScene, layout: StackLayout) {
+    const isTurned = !isSectionView(this.looking);
+    if (this.labels === 'none' || (this.labels === 'turned' && !isTurned)) return nothing;
+    const labels = stackLabels(scene, layout, this.looking);
+    const leaders = labels.filter(({ leads }) => leads);
+    return html`<svg class="leaders" aria-hidden="true">
+        ${leaders.map(({ anchor: [x, y], left, top }) => svg`<path d="M${x},${y} L${left - 1},${top + 8.5}" />`)}
+      </svg>
+      ${labels.map(this.label)}`;
+  }
+
+  private foot(scene: StackScene, layout: StackLayout) {
+    return html`<div class="foot">
+      ${stackLegend(scene, layout)}
+      <div class="views" part="views" role="group" aria-label="Views">
+        ${presetNames.map(
+          (name) =>
+            html`<button type="button" aria-pressed=${this.preset === name} @click=${() => this.go(name)}>${name}</button>`,
+        )}
+      </div>
+      <details part="table"><summary>as a table</summary><div class="sheet">${stackTable(scene)}</div></details>
+    </div>`;
   }
 
   override render() {
-    const { width, height } = this.layout;
-    const names = this.model.draft.case.patient.layers.map(({ name }) => name).join(', ');
-    const words = `The stack in the beam: ${names}. Seen ${viewWords(this.view)}. Its figures are in the table below it.`;
-    return html`<div class=${this.flat ? 'flat' : 'solid'}>
-      <svg class="drawing" viewBox="0 0 ${width} ${height}" role="img" aria-label=${words} aria-hidden=${this.flat ? 'false' : 'true'}>${this.drawing()}</svg>
-      <canvas role="img" aria-label=${words} aria-hidden=${this.flat ? 'true' : 'false'} tabindex=${this.flat ? -1 : 0}
-        @keydown=${this.onKey} @wheel=${{ handleEvent: (event: WheelEvent) => this.onWheel(event), passive: false }}
-        @pointerdown=${this.onPointer} @pointermove=${this.onPointer} @pointerup=${this.onPointer} @pointercancel=${this.onPointer}></canvas>
-      ${isSectionView(this.view) ? nothing : html`<button type="button" @click=${() => this.look(sectionView)}>back to the section</button>`}
-    </div>`;
+    const { scene, layout, anchors, looking } = this;
+    return html`<div class="stage ${this.isSolid ? 'solid' : 'flat'}" part="stage" role="application" tabindex="0"
+        aria-label=${scene ? stackWords(scene) : 'No stack to show.'} aria-describedby="keys"
+        aria-roledescription="layer view" @keydown=${this.onKey}>
+        <div class="place"></div>
+        ${scene && layout && anchors ? sectionFallback(scene, layout, anchors) : nothing}
+        ${scene && layout ? this.overlay(scene, layout) : nothing}
+        ${isSectionView(looking) ? nothing : html`<p class="from" aria-hidden="true">${viewWords(looking)}</p>`}
+      </div>
+      <p class="unseen" id="keys">${keyWords}</p>
+      <p class="unseen" role="status">${this.announced}</p>
+      ${scene && layout ? this.foot(scene, layout) : nothing}`;
   }
 }
 
@@ -233,5 +278,6 @@ declare global {
   }
   interface HTMLElementEventMap {
     'view-turned': CustomEvent<boolean>;
+    'stack-anchors': CustomEvent<StackAnchors>;
   }
 }

@@ -1,5 +1,3 @@
-import { createRequire } from 'node:module';
-import { pathToFileURL } from 'node:url';
 import { Worker } from 'node:worker_threads';
 import type { FromTransportWorker, TransportWorker } from './transport-messages.js';
 
@@ -23,7 +21,7 @@ export function makeTransportThread(): TransportWorker {
 
 // A thread does not inherit the loader of TypeScript source, so it registers its own.
 function sourceLoader(): string[] {
-  const api = pathToFileURL(createRequire(import.meta.url).resolve('tsx/esm/api'));
-  const register = `import { register } from ${JSON.stringify(api.href)}; register();`;
+  const api = import.meta.resolve('tsx/esm/api');
+  const register = `import { register } from ${JSON.stringify(api)}; register();`;
   return ['--import', `data:text/javascript,${encodeURIComponent(register)}`];
 }

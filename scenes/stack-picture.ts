@@ -1,7 +1,8 @@
 import { type Mesh, OrthographicCamera, Scene, WebGLRenderer } from 'three';
+import { densityRows } from './density-rows.js';
 import { shownShading, stackDrawing } from './drawing/stack-drawing.js';
 import { trackStrokes } from './drawing/track-strokes.js';
-import { densityRows, densityTexture } from './graphics/density-texture.js';
+import { densityTexture } from './graphics/density-texture.js';
 import { faceMaterial, faceMesh } from './graphics/face-mesh.js';
 import { pageUniforms, setInks } from './graphics/ink-uniforms.js';
 import { strokeMaterial, strokeMesh } from './graphics/stroke-mesh.js';
@@ -135,6 +136,7 @@ export function stackPicture(canvas: HTMLCanvasElement, inks: StackInks): StackP
       clear();
       for (const material of Object.values(materials)) material.dispose();
       renderer.dispose();
+      renderer.forceContextLoss();
       shown = null;
     },
   };

@@ -90,6 +90,6 @@ export function viewWords(view: View): string {
   if (elevation !== 0) parts.push(`${Math.abs(elevation)}° ${elevation > 0 ? 'above' : 'below'}`);
   const from = parts.length > 0 ? `from ${parts.join(', ')}` : 'from the front';
   const drawn = parts.length === 0 && view.oblique > 0.5 ? ', oblique' : '';
-  const size = Math.abs(view.zoom - 1) < 0.005 ? '' : `, ${view.zoom.toFixed(1)} times as large`;
+  const size = Math.abs(view.zoom - 1) < 0.05 ? '' : `, ${view.zoom.toFixed(1)} times as large`;
   return `${from}${drawn}${size}`;
 }

@@ -1,5 +1,6 @@
 import { caseHash } from './case/hash.js';
 import type { ParsedCase } from './case/parse.js';
+import type { Size } from './case/schema.js';
 import { compare } from './compare.js';
 import { evaluate } from './evaluate.js';
 import { caseFindings, techniqueFindings } from './findings.js';
@@ -12,10 +13,14 @@ import { version } from './version.js';
 /**
  * Weighs a case: every technique at every size, and every Proposed against Current.
  *
+ * @param sizes which sizes to weigh; all of the mix unless told otherwise.
  * @returns a frozen answer that clones to a worker. A technique that cannot be computed at a size
  *   is left out of `evaluations` and named in `findings`.
  */
-export const weigh = ({ case: c, assumed }: ParsedCase): Weighing => {
+export const weigh = (
+  { case: c, assumed }: ParsedCase,
+  sizes: readonly Size[] = sizesOf(c.patient),
+): Weighing => {
   const evaluations: Evaluation[] = [];
   const comparisons: Comparison[] = [];
   const findings: Finding[] = [
@@ -23,7 +28,7 @@ export const weigh = ({ case: c, assumed }: ParsedCase): Weighing => {
     ...(prepare(c).calibration?.findings ?? []),
     ...c.techniques.flatMap((technique, i) => techniqueFindings(technique, `techniques[${i}]`)),
   ];
-  for (const size of sizesOf(c.patient)) {
+  for (const size of sizes) {
     const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
     points.forEach((point, index) => {
       if ('made' in point) evaluations.push(evaluate(c, point, index));

@@ -14,7 +14,8 @@ import { type ScanRequest, scanSlice } from './scan-slice.js';
  */
 export interface EvaluationHost {
   readonly load: (parsed: ParsedCase) => void;
-  readonly weigh: () => Weighing;
+  /** The answer at one size of the mix, so that none has to wait for the others. */
+  readonly weigh: (size: string) => Weighing;
   /** Primary photons along the axis and the spectrum at the detail, per technique that has them. */
   readonly along: (size: string) => AlongBeam[];
   readonly scan: (request: ScanRequest) => SweepSetting[];
@@ -26,14 +27,15 @@ export function evaluationHost(): EvaluationHost {
     if (!loaded) throw new Error('no case was handed over');
     return loaded;
   };
+  const sizesNamed = (name: string) => sizesOf(parsed().case.patient).filter((size) => size.name === name);
   return {
     load: (next) => {
       loaded = { case: sharedWith(loaded?.case, next.case), assumed: next.assumed };
     },
-    weigh: () => weigh(parsed()),
+    weigh: (name) => weigh(parsed(), sizesNamed(name)),
     along: (name) => {
       const { case: c } = parsed();
-      const size = sizesOf(c.patient).find((entry) => entry.name === name);
+      const [size] = sizesNamed(name);
       if (!size) return [];
       const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
       return points.flatMap((point) => ('made' in point ? [alongBeam(point)] : []));

@@ -9,7 +9,7 @@ import type { ScanRequest } from './scan-slice.js';
 /** The evaluation worker as async functions. Every promise settles, also when the worker dies. */
 export interface Evaluator {
   readonly load: (parsed: ParsedCase) => Promise<void>;
-  readonly weigh: () => Promise<Weighing>;
+  readonly weigh: (size: string) => Promise<Weighing>;
   readonly scan: (request: ScanRequest) => Promise<SweepSetting[]>;
   readonly along: (size: string) => Promise<AlongBeam[]>;
   readonly end: () => void;
@@ -51,7 +51,7 @@ export function startEvaluator(make: () => Worker): Evaluator {
 
   return {
     load: (parsed) => ask((to) => to.load(parsed)),
-    weigh: () => ask((to) => to.weigh()),
+    weigh: (size) => ask((to) => to.weigh(size)),
     scan: (request) => ask((to) => to.scan(request)),
     along: (size) => ask((to) => to.along(size)),
     end: () => lose('the evaluator was ended'),

@@ -73,6 +73,14 @@ export const beamPathSheet = css`
     font-size: var(--small);
     color: var(--soft);
   }
+  .switch select {
+    font: inherit;
+    color: var(--field-ink);
+    background: var(--paper);
+    border: 0;
+    border-block-end: 1px dotted var(--entry-rule);
+    padding: 0;
+  }
   .leaders {
     position: absolute;
     inset: 0;
@@ -127,31 +135,6 @@ export const beamPathSheet = css`
     .label.foot {
       white-space: normal;
     }
-  }
-  .table {
-    font-size: var(--small);
-    color: var(--soft);
-    max-width: 40rem;
-    margin: 0 auto 0.9rem;
-    text-align: center;
-  }
-  .table summary {
-    cursor: pointer;
-  }
-  .table table {
-    border-collapse: collapse;
-    width: 100%;
-    color: var(--ink);
-    text-align: start;
-  }
-  .table :is(th, td) {
-    font-weight: 400;
-    text-align: start;
-    padding: 0.2rem 0.8rem 0.2rem 0;
-    border-block-end: 1px solid var(--rule);
-  }
-  .table .number {
-    text-align: end;
   }
   :focus-visible {
     outline: 2px solid var(--ink);

@@ -9,7 +9,6 @@ import { spineOfScene } from '../stack-view/spine-of-scene.js';
 import { stackSceneOf } from '../stack-view/stack-scene.js';
 import { placed, sizeShown, type DeskModel } from '../model/desk-model.js';
 import { beamPathSheet } from './beam-path-sheet.js';
-import { beamTable } from './beam-table.js';
 import { leaderPath } from './leader-path.js';
 import { spineLabels } from './spine-labels.js';
 import { stations } from './stations.js';
@@ -89,7 +88,7 @@ export class BeamPath extends LitElement {
     const tops = placeAlong(
       used.map((station, i) => ({ anchor: station.anchor(layout), height: heights[i] })),
       0,
-      layout.height,
+      spine.offsetHeight,
     );
     const paths: string[] = [];
     used.forEach((station, i) => {
@@ -130,8 +129,7 @@ export class BeamPath extends LitElement {
         </section>
         ${this.side(model.right, 'right')}
       </div>
-      <p class="caption">to scale, free air shortened · ink: primary photons per mm² and frame, logarithmic · ratios as set, size ${sizeShown(model).name}</p>
-      ${beamTable(model)}`;
+      <p class="caption">ratios are as set, size ${sizeShown(model).name}; click a number for how it is computed</p>`;
   }
 }
 

@@ -10,8 +10,10 @@ import type { Draft } from '../../store/draft.js';
 /** Everything the elements of the desk are handed: what is edited, and the last answer to it. */
 export interface DeskModel {
   readonly draft: Draft;
-  /** The last answer; null before the first. */
+  /** The last answer at the size looked at; null before the first. */
   readonly weighing: Weighing | null;
+  /** Answers at the other sizes of the mix, as far as they have come. */
+  readonly others: readonly Weighing[];
   /** The beam along the axis at the size looked at, per technique that could be computed. */
   readonly along: readonly AlongBeam[];
   /** True while `weighing` belongs to an earlier state of the draft. */

@@ -24,6 +24,26 @@ import '../room-section/room-section.js';
 import '../task-section/task-section.js';
 import '../techniques-section/techniques-section.js';
 
+/** Whether a finding with this path is about the case or one of the techniques shown. */
+const concerns = ({ left, right }: DeskModel, path = ''): boolean => {
+  const technique = /^techniques\[(\d+)\]/.exec(path)?.[1];
+  return technique === undefined || [left, right].includes(Number(technique));
+};
+
+/** What forbids the techniques shown at sizes other than the one looked at, each named. */
+const elsewhere = ({ others, draft, left, right }: DeskModel): Finding[] => {
+  const shown = [left, right].map((index) => (index === null ? null : draft.case.techniques[index].name));
+  return others.flatMap(({ evaluations }) =>
+    evaluations
+      .filter(({ technique }) => shown.includes(technique))
+      .flatMap(({ findings, size }) =>
+        findings
+          .filter(({ severity }) => severity === 'limit')
+          .map((finding) => ({ ...finding, message: `At size ${size}: ${finding.message}` })),
+      ),
+  );
+};
+
 /** The sections of the working paper that are built, in their order. */
 export const sections = [
   { id: 'room', name: 'Room' },
@@ -90,7 +110,8 @@ export class DeskPage extends LitElement {
       ...(comparisonOf(model)?.rows ?? [])
         .filter(({ holdConstant }) => marginColumns.some(([hold]) => hold === holdConstant))
         .flatMap((row) => row.findings),
-      ...(model.weighing?.findings ?? []),
+      ...(model.weighing?.findings ?? []).filter(({ path }) => concerns(model, path)),
+      ...elsewhere(model),
     ];
   }
 

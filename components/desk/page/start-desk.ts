@@ -1,4 +1,5 @@
 import type { Fault } from '../../../physics/case/index.js';
+import type { Size } from '../../../physics/case/schema.js';
 import type { HoldConstant } from '../../../physics/results.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { autosave } from '../../store/autosave.js';
@@ -28,12 +29,15 @@ export async function startDesk(page: DeskPage): Promise<void> {
 
   const ask = answering(startEvaluator(makeEvaluationWorker), {
     answer: (answer, { revision }) => {
-      page.model = { ...page.model, ...answer, stale: revision !== store.state().revision };
+      page.model = { ...page.model, ...answer, others: [], stale: revision !== store.state().revision };
       page.trouble = '';
     },
     curve: (scan) => {
       page.scan = scan;
       page.curveStale = false;
+    },
+    otherSize: (weighing) => {
+      page.model = { ...page.model, others: [...page.model.others, weighing] };
     },
     failed: (message) => {
       page.trouble = `This case could not be computed: ${message}`;
@@ -48,15 +52,16 @@ export async function startDesk(page: DeskPage): Promise<void> {
 
   let keeping: ReturnType<typeof setTimeout> | undefined;
   const show = ({ draft, canUndo, canRedo }: StoreState) => {
-    const sizes = sizesOf(draft.case.patient).map(({ name }) => name);
+    const sizes = sizesOf(draft.case.patient);
     const { techniques } = draft.case;
     const shown = page.model?.right ?? 1;
     page.model = {
       draft,
       weighing: page.model?.weighing ?? null,
       along: page.model?.along ?? [],
+      others: page.model?.others ?? [],
       stale: true,
-      sizeName: sizes.includes(page.model?.sizeName) ? page.model.sizeName : sizes[0],
+      sizeName: sizes.some(({ name }) => name === page.model?.sizeName) ? page.model.sizeName : usualSize(sizes),
       left: 0,
       right: techniques.length > 1 ? Math.min(Math.max(1, shown), techniques.length - 1) : null,
     };
@@ -134,6 +139,13 @@ export async function startDesk(page: DeskPage): Promise<void> {
   });
   listenForKeys(commands);
   listenForDrops(handed);
+}
+
+/** The size to look at first: of those with the greatest weight, the middle one. */
+function usualSize(sizes: readonly Size[]): string {
+  const most = Math.max(...sizes.map(({ weight }) => weight));
+  const heaviest = sizes.filter(({ weight }) => weight === most);
+  return heaviest[Math.floor((heaviest.length - 1) / 2)].name;
 }
 
 /** Ctrl (or Command) with Z, Shift+Z, Y, S and O, wherever the focus is. */

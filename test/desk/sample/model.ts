@@ -9,6 +9,7 @@ export const sampleModel: DeskModel = {
   draft: { document: sampleDocument as unknown as Json, files: {}, case: sampleCase, assumed: sampleWeighing.assumed, faults: [] },
   weighing: sampleWeighing,
   along: sampleAlong,
+  others: [],
   stale: false,
   sizeName: 'median',
   left: 0,

@@ -9,13 +9,19 @@ const darkest = 0.62;
 export function drawnAt(
   distance_mm: number,
   layout: SpineLayout,
-  { sourceToSkin_mm, thickness_mm, sourceToDetector_mm }: { sourceToSkin_mm: number; thickness_mm: number; sourceToDetector_mm: number },
+  {
+    sourceToSkin_mm,
+    thickness_mm,
+    sourceToDetector_mm,
+  }: { sourceToSkin_mm: number; thickness_mm: number; sourceToDetector_mm: number },
 ): number {
   const exit_mm = sourceToSkin_mm + thickness_mm;
   const between = (from_mm: number, to_mm: number, top: number, bottom: number) =>
     to_mm > from_mm ? top + ((distance_mm - from_mm) / (to_mm - from_mm)) * (bottom - top) : bottom;
-  if (distance_mm <= sourceToSkin_mm) return between(0, sourceToSkin_mm, layout.tube, layout.patient.top);
-  if (distance_mm <= exit_mm) return between(sourceToSkin_mm, exit_mm, layout.patient.top, layout.patient.bottom);
+  if (distance_mm <= sourceToSkin_mm)
+    return between(0, sourceToSkin_mm, layout.tube, layout.patient.top);
+  if (distance_mm <= exit_mm)
+    return between(sourceToSkin_mm, exit_mm, layout.patient.top, layout.patient.bottom);
   return between(exit_mm, sourceToDetector_mm, layout.patient.bottom, layout.detector.top);
 }
 

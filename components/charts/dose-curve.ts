@@ -1,6 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
-import { html, nothing, svg, type SVGTemplateResult, type TemplateResult } from 'lit';
+import { html, nothing, type SVGTemplateResult, svg, type TemplateResult } from 'lit';
 import { formatEntry, formatNumber } from './format.js';
 import { techniqueInk } from './inks.js';
 import { placeLabels, wordsWidth } from './label-places.js';
@@ -57,7 +57,8 @@ const margin = { top: 14, right: 12, bottom: 40, left: 34 };
 export function curveScales(data: DoseCurveData, { width, height }: CurveFrame) {
   const costs = data.marks.map((mark) => mark.dose);
   const all = data.lines.flatMap((entry) => entry.points);
-  const widest = costs.length > 0 ? 2 * Math.max(...costs) : Math.max(0, ...all.map((point) => point.dose));
+  const widest =
+    costs.length > 0 ? 2 * Math.max(...costs) : Math.max(0, ...all.map((point) => point.dose));
   const x = scaleLinear([0, widest || 1], [margin.left, width - margin.right]).nice(5);
   const shown = all.filter((point) => point.dose <= x.domain()[1]).map((point) => point.value);
   const marked = data.marks.map((mark) => mark.value);
@@ -71,7 +72,9 @@ export function curveScales(data: DoseCurveData, { width, height }: CurveFrame) 
 type Scales = ReturnType<typeof curveScales>;
 
 /** Runs of points that are all allowed or all forbidden by the same limit; neighbours share an end. */
-function runsOf(points: readonly CurvePoint[]): { forbidden: string | null; points: CurvePoint[] }[] {
+function runsOf(
+  points: readonly CurvePoint[],
+): { forbidden: string | null; points: CurvePoint[] }[] {
   const runs: { forbidden: string | null; points: CurvePoint[] }[] = [];
   for (const point of points) {
     const last = runs.at(-1);
@@ -85,10 +88,15 @@ function runsOf(points: readonly CurvePoint[]): { forbidden: string | null; poin
 }
 
 function lineOf(entry: CurveLine, { x, y }: Scales): SVGTemplateResult[] {
-  const ink = entry.ink === null ? { color: 'var(--soft)', dash: '1.5 2.5' } : techniqueInk(entry.ink);
-  const draw = line<CurvePoint>((p) => x(p.dose), (p) => y(p.value));
+  const ink =
+    entry.ink === null ? { color: 'var(--soft)', dash: '1.5 2.5' } : techniqueInk(entry.ink);
+  const draw = line<CurvePoint>(
+    (p) => x(p.dose),
+    (p) => y(p.value),
+  );
   return runsOf(entry.points).map(
-    (run) => svg`<path class=${run.forbidden ? 'line forbidden' : 'line'} d=${draw(run.points) ?? ''} stroke=${ink.color} stroke-dasharray=${ink.dash} />`,
+    (run) =>
+      svg`<path class=${run.forbidden ? 'line forbidden' : 'line'} d=${draw(run.points) ?? ''} stroke=${ink.color} stroke-dasharray=${ink.dash} />`,
   );
 }
 
@@ -108,9 +116,15 @@ function plotNames(data: DoseCurveData, { x, y }: Scales, frame: CurveFrame): SV
     const color = entry.ink === null ? 'var(--soft)' : techniqueInk(entry.ink).color;
     return [{ x: x(end.dose), y: y(end.value), words: lineName(entry), color }];
   });
-  const named = [...marks, ...ends].map((entry) => ({ ...entry, width: wordsWidth(entry.words), height: 13 }));
+  const named = [...marks, ...ends].map((entry) => ({
+    ...entry,
+    width: wordsWidth(entry.words),
+    height: 13,
+  }));
   const samples = data.lines.flatMap((entry) =>
-    entry.points.filter((point) => point.dose <= right).map((point) => ({ x: x(point.dose), y: y(point.value) })),
+    entry.points
+      .filter((point) => point.dose <= right)
+      .map((point) => ({ x: x(point.dose), y: y(point.value) })),
   );
   const rose = data.rose === null ? [] : [{ x: frame.width - 40, y: y(data.rose) - 5 }];
   const places = placeLabels(named, [...samples, ...marks, ...rose], {
@@ -120,7 +134,8 @@ function plotNames(data: DoseCurveData, { x, y }: Scales, frame: CurveFrame): SV
     bottom: frame.height - margin.bottom,
   });
   return named.map(
-    ({ words, color }, i) => svg`<text class="name" x=${places[i].x} y=${places[i].y + 4} fill=${color}>${words}</text>`,
+    ({ words, color }, i) =>
+      svg`<text class="name" x=${places[i].x} y=${places[i].y + 4} fill=${color}>${words}</text>`,
   );
 }
 
@@ -131,11 +146,17 @@ function lineName(entry: CurveLine): string {
   return limit && entry.points.every((point) => point.forbidden) ? `${name}, ${limit}` : name;
 }
 
-function axes(data: DoseCurveData, { x, y }: Scales, { width, height }: CurveFrame): SVGTemplateResult {
+function axes(
+  data: DoseCurveData,
+  { x, y }: Scales,
+  { width, height }: CurveFrame,
+): SVGTemplateResult {
   const base = height - margin.bottom;
   return svg`
     ${y.ticks(4).map(
-      (tick) => svg`<line class="gridline" x1=${margin.left} x2=${width - margin.right} y1=${y(tick)} y2=${y(tick)} />
+      (
+        tick,
+      ) => svg`<line class="gridline" x1=${margin.left} x2=${width - margin.right} y1=${y(tick)} y2=${y(tick)} />
         <text class="tick" text-anchor="end" x=${margin.left - 7} y=${y(tick) + 4}>${tick}</text>`,
     )}
     ${x.ticks(5).map((tick) => svg`<text class="tick" text-anchor="middle" x=${x(tick)} y=${base + 16}>${tick}</text>`)}
@@ -146,19 +167,33 @@ function axes(data: DoseCurveData, { x, y }: Scales, { width, height }: CurveFra
  * Contrast or SdNR against a named dose as potential varies, one line per filter. Portions a limit
  * forbids are thin; techniques are marked by their own sign; `cursor_kV` draws the reading points.
  */
-export function doseCurve(data: DoseCurveData, frame: CurveFrame, cursor_kV: number | null = null): TemplateResult {
+export function doseCurve(
+  data: DoseCurveData,
+  frame: CurveFrame,
+  cursor_kV: number | null = null,
+): TemplateResult {
   const scales = curveScales(data, frame);
   const { x, y } = scales;
   const clip = `curve-${frame.width}-${data.valueName.length}`;
   const label = `${data.valueName}, by ${data.doseName}, at ${data.holdConstant}, size ${data.size}. ${data.marks
-    .map((mark) => `${mark.name}: ${formatNumber(mark.potential_kV)} kV, ${formatNumber(mark.dose)} ${data.doseUnit}, ${formatNumber(mark.value)}`)
+    .map(
+      (mark) =>
+        `${mark.name}: ${formatNumber(mark.potential_kV)} kV, ${formatNumber(mark.dose)} ${data.doseUnit}, ${formatNumber(mark.value)}`,
+    )
     .join('; ')}. The figures are in the table below the plot.`;
-  const cursor = cursor_kV === null ? [] : pointsAt(data, cursor_kV).filter((reading) => reading.point.dose <= x.domain()[1]);
+  const cursor =
+    cursor_kV === null
+      ? []
+      : pointsAt(data, cursor_kV).filter((reading) => reading.point.dose <= x.domain()[1]);
   return html`<svg class="chart" viewBox="0 0 ${frame.width} ${frame.height}" width=${frame.width} height=${frame.height} role="img" aria-label=${label}>
     <clipPath id=${clip}><rect x=${margin.left} y="0" width=${frame.width - margin.left - margin.right} height=${frame.height - margin.bottom + 1} /></clipPath>
     ${axes(data, scales, frame)}
-    ${data.rose === null ? nothing : svg`<line class="rose" x1=${margin.left} x2=${frame.width - margin.right} y1=${y(data.rose)} y2=${y(data.rose)} />
-      <text class="tick" text-anchor="end" x=${frame.width - margin.right} y=${y(data.rose) - 5}>Rose, k = ${data.rose}</text>`}
+    ${
+      data.rose === null
+        ? nothing
+        : svg`<line class="rose" x1=${margin.left} x2=${frame.width - margin.right} y1=${y(data.rose)} y2=${y(data.rose)} />
+      <text class="tick" text-anchor="end" x=${frame.width - margin.right} y=${y(data.rose) - 5}>Rose, k = ${data.rose}</text>`
+    }
     <g clip-path="url(#${clip})">${data.lines.map((entry) => lineOf(entry, scales))}</g>
     ${plotNames(data, scales, frame)}
     ${cursor.map(({ point }) => svg`<circle class="cursor" cx=${x(point.dose)} cy=${y(point.value)} r="3" />`)}
@@ -168,9 +203,15 @@ export function doseCurve(data: DoseCurveData, frame: CurveFrame, cursor_kV: num
 }
 
 /** The point of every line at the potential nearest to `potential_kV`. */
-export const pointsAt = (data: DoseCurveData, potential_kV: number): { line: CurveLine; point: CurvePoint }[] =>
+export const pointsAt = (
+  data: DoseCurveData,
+  potential_kV: number,
+): { line: CurveLine; point: CurvePoint }[] =>
   data.lines.flatMap((entry) => {
     const distance = (point: CurvePoint) => Math.abs(point.potential_kV - potential_kV);
-    const point = entry.points.reduce<CurvePoint | null>((best, next) => (best && distance(best) <= distance(next) ? best : next), null);
+    const point = entry.points.reduce<CurvePoint | null>(
+      (best, next) => (best && distance(best) <= distance(next) ? best : next),
+      null,
+    );
     return point ? [{ line: entry, point }] : [];
   });

@@ -6,7 +6,9 @@
 
 const superscript = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const raised = (exponent: number): string =>
-  String(exponent).replace(/-/g, '⁻').replace(/\d/g, (digit) => superscript[Number(digit)]);
+  String(exponent)
+    .replace(/-/g, '⁻')
+    .replace(/\d/g, (digit) => superscript[Number(digit)]);
 
 /** `value` to `digits` significant digits: 1.42, 0.0713, 12 300, 4.1 × 10⁻⁵, –. */
 export function formatNumber(value: number | null | undefined, digits = 3): string {
@@ -26,7 +28,8 @@ export function formatNumber(value: number | null | undefined, digits = 3): stri
 /** A ratio about one: ×0.50, ×1.08, ×12.4, –. */
 export function formatRatio(ratio: number | null | undefined): string {
   if (ratio === null || ratio === undefined || !Number.isFinite(ratio)) return '–';
-  if (Math.abs(ratio) >= 0.095 && Math.abs(ratio) < 10) return `×${ratio.toFixed(2)}`.replace('-', '−');
+  if (Math.abs(ratio) >= 0.095 && Math.abs(ratio) < 10)
+    return `×${ratio.toFixed(2)}`.replace('-', '−');
   return `×${formatNumber(ratio)}`;
 }
 

@@ -18,6 +18,7 @@ export function techniqueInk(index: number): TechniqueInk {
   if (index === 0) return { color: 'var(--graphite)', dash: '', mark: 'disc' };
   const step = (index - 1) % proposedDashes.length;
   const share = 100 - 16 * step;
-  const color = step === 0 ? 'var(--madder)' : `color-mix(in oklab, var(--madder) ${share}%, var(--paper))`;
+  const color =
+    step === 0 ? 'var(--madder)' : `color-mix(in oklab, var(--madder) ${share}%, var(--paper))`;
   return { color, dash: proposedDashes[step], mark: 'diamond' };
 }

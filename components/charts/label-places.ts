@@ -50,12 +50,16 @@ export function placeLabels(
     const { x, y, width } = label;
     const sides = [x + 9, x - 9 - width];
     const heights = [12, -12, 0, 24, -24, 36, -36];
-    const candidates = heights.flatMap((dy) => sides.map((left): LabelPlace => ({ x: left, y: y + dy })));
+    const candidates = heights.flatMap((dy) =>
+      sides.map((left): LabelPlace => ({ x: left, y: y + dy })),
+    );
     const cost = (place: LabelPlace): number => {
       const box = boxAt(place, label);
       const outside =
-        Math.max(0, frame.left - box.left) + Math.max(0, box.right - frame.right) +
-        Math.max(0, frame.top - box.top) + Math.max(0, box.bottom - frame.bottom);
+        Math.max(0, frame.left - box.left) +
+        Math.max(0, box.right - frame.right) +
+        Math.max(0, frame.top - box.top) +
+        Math.max(0, box.bottom - frame.bottom);
       const covered = taken.reduce((sum, other) => sum + overlap(box, other), 0);
       const crossed = points.filter((point) => holds(box, point)).length;
       return outside * 50 + covered * 10 + crossed * 12 + Math.abs(place.y - y) * 0.2;

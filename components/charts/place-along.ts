@@ -31,7 +31,11 @@ export function placeAlong(wishes: readonly Wish[], from: number, to: number): n
   });
   wishes.forEach(({ anchor, height }, index) => {
     let block = within({ first: index, count: 1, height, top: anchor - height / 2 });
-    for (let above = blocks.at(-1); above && above.top + above.height > block.top; above = blocks.at(-1)) {
+    for (
+      let above = blocks.at(-1);
+      above && above.top + above.height > block.top;
+      above = blocks.at(-1)
+    ) {
       blocks.pop();
       block = within(merge(above, block));
     }

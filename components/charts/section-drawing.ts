@@ -1,4 +1,4 @@
-import { type SVGTemplateResult, nothing, svg } from 'lit';
+import { nothing, type SVGTemplateResult, svg } from 'lit';
 import type { MaterialFamily } from '../../materials/material.js';
 import { hatchDefinitions, hatchFill } from './hatches.js';
 import { techniqueInk } from './inks.js';
@@ -23,7 +23,11 @@ export interface SectionInput {
   readonly support: boolean;
   readonly grid: boolean;
   /** Breadth and height of the detail along the beam, in mm. */
-  readonly detail: { readonly breadth_mm: number; readonly height_mm: number; readonly round: boolean } | null;
+  readonly detail: {
+    readonly breadth_mm: number;
+    readonly height_mm: number;
+    readonly round: boolean;
+  } | null;
   readonly halves: readonly [BeamHalf, BeamHalf | null];
   /** Keeps the ids of two drawings on one page apart. */
   readonly idPrefix: string;
@@ -42,13 +46,20 @@ function obliqueFaces(layout: SpineLayout): SVGTemplateResult {
   return svg`
     <path class="face" d=${path([left, top], [left + recede.x, top - recede.y], [right + recede.x, top - recede.y], [right, top])} />
     <path class="face side" d=${path([right, top], [right + recede.x, top - recede.y], [right + recede.x, patient.bottom - recede.y], [right, patient.bottom])} />
-    ${layout.layers.slice(1).map(
-      (band) => svg`<path class="edge" d="M${right},${band.top} l${recede.x},${-recede.y}" />`,
-    )}`;
+    ${layout.layers
+      .slice(1)
+      .map(
+        (band) => svg`<path class="edge" d="M${right},${band.top} l${recede.x},${-recede.y}" />`,
+      )}`;
 }
 
 /** One half of the fan, from the focal spot to the detector, shaded by primary photons. */
-function beamHalf(layout: SpineLayout, half: BeamHalf, side: -1 | 1, prefix: string): SVGTemplateResult {
+function beamHalf(
+  layout: SpineLayout,
+  half: BeamHalf,
+  side: -1 | 1,
+  prefix: string,
+): SVGTemplateResult {
   const { axis, tube, detector } = layout;
   const bends = [layout.patient.top, layout.patient.bottom, detector.top];
   const edge = bends.map((y) => [axis + side * layout.halfWidth(y), y] as const);
@@ -78,7 +89,11 @@ function filterHalf(layout: SpineLayout, half: BeamHalf, side: -1 | 1): SVGTempl
 }
 
 /** Grid strips of one half, toward the focal spot; only the strips of a technique that uses it. */
-function gridHalf(layout: SpineLayout, half: BeamHalf, side: -1 | 1): SVGTemplateResult | typeof nothing {
+function gridHalf(
+  layout: SpineLayout,
+  half: BeamHalf,
+  side: -1 | 1,
+): SVGTemplateResult | typeof nothing {
   const { axis, grid, tube } = layout;
   const reach = (layout.right - layout.left) / 2;
   const strips = Array.from({ length: Math.floor(reach / 5) }, (_, i) => 2.5 + 5 * i);
@@ -96,7 +111,10 @@ function airBreak({ axis, airBreak: y }: SpineLayout): SVGTemplateResult | typeo
   return svg`<path class="gap" d=${d} /><path class="break" d=${d} />`;
 }
 
-function detailMark(layout: SpineLayout, detail: NonNullable<SectionInput['detail']>): SVGTemplateResult {
+function detailMark(
+  layout: SpineLayout,
+  detail: NonNullable<SectionInput['detail']>,
+): SVGTemplateResult {
   const height = Math.max(5, detail.height_mm * layout.px_per_mm);
   const breadth = Math.max(detail.round ? height : 12, detail.breadth_mm * layout.px_per_mm);
   const y = layout.detail ?? 0;

@@ -1,6 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { area, curveStepAfter, line } from 'd3-shape';
-import { html, nothing, svg, type SVGTemplateResult, type TemplateResult } from 'lit';
+import { html, nothing, type SVGTemplateResult, svg, type TemplateResult } from 'lit';
 import type { AlongBeam } from '../../physics/along-beam.js';
 import { formatNumber } from './format.js';
 import { techniqueInk } from './inks.js';
@@ -28,7 +28,11 @@ const lineWidth_keV = 1;
 type Sample = readonly [energy_keV: number, fluence: number];
 
 /** The continuum with the characteristic lines laid on it, as steps of the drawn outline. */
-function outline({ energies_keV, fluence_per_mm2_per_keV, lines }: AlongBeam['atDetail']): Sample[] {
+function outline({
+  energies_keV,
+  fluence_per_mm2_per_keV,
+  lines,
+}: AlongBeam['atDetail']): Sample[] {
   return energies_keV.map((energy, i) => {
     const on = lines.filter((entry) => Math.abs(entry.energy_keV - energy) <= lineWidth_keV / 2);
     const extra = on.reduce((sum, entry) => sum + entry.fluence_per_mm2 / lineWidth_keV, 0);
@@ -36,30 +40,57 @@ function outline({ energies_keV, fluence_per_mm2_per_keV, lines }: AlongBeam['at
   });
 }
 
-function edgeMarks(data: SpectrumData, x: (energy_keV: number) => number, base: number): SVGTemplateResult[] {
+function edgeMarks(
+  data: SpectrumData,
+  x: (energy_keV: number) => number,
+  base: number,
+): SVGTemplateResult[] {
   return data.kEdges.map(
-    ({ element, energy_keV }) => svg`<line class="edge" x1=${x(energy_keV)} x2=${x(energy_keV)} y1=${margin.top - 6} y2=${base} />
+    ({
+      element,
+      energy_keV,
+    }) => svg`<line class="edge" x1=${x(energy_keV)} x2=${x(energy_keV)} y1=${margin.top - 6} y2=${base} />
       <text class="name" x=${x(energy_keV) + 5} y=${margin.top + 2} fill="var(--ink)">${element} K edge ${formatNumber(energy_keV, 4)} keV</text>`,
   );
 }
 
 /** Spectra of the techniques at the detail, per frame, with the K edges of the agent. */
-export function spectrumChart(data: SpectrumData, { width, height }: { readonly width: number; readonly height: number }): TemplateResult {
+export function spectrumChart(
+  data: SpectrumData,
+  { width, height }: { readonly width: number; readonly height: number },
+): TemplateResult {
   const base = height - margin.bottom;
   const drawn = data.spectra.map((entry) => ({ ...entry, points: outline(entry.atDetail) }));
   const all = drawn.flatMap(({ points }) => points);
   const least = Math.min(10, ...data.kEdges.map((edge) => edge.energy_keV - 3));
-  const x = scaleLinear([least, Math.max(least + 1, ...all.map(([energy]) => energy))], [margin.left, width - margin.right]);
+  const x = scaleLinear(
+    [least, Math.max(least + 1, ...all.map(([energy]) => energy))],
+    [margin.left, width - margin.right],
+  );
   const most = Math.max(0, ...all.map(([, fluence]) => fluence));
   const y = scaleLinear([0, most || 1], [base, margin.top]).nice(4);
-  const path = line<Sample>(([energy]) => x(energy), ([, fluence]) => y(fluence)).curve(curveStepAfter);
-  const filled = area<Sample>(([energy]) => x(energy), base, ([, fluence]) => y(fluence)).curve(curveStepAfter);
+  const path = line<Sample>(
+    ([energy]) => x(energy),
+    ([, fluence]) => y(fluence),
+  ).curve(curveStepAfter);
+  const filled = area<Sample>(
+    ([energy]) => x(energy),
+    base,
+    ([, fluence]) => y(fluence),
+  ).curve(curveStepAfter);
   const label = `Spectrum of primary photons reaching the detail, per frame, size ${data.size}. ${drawn
-    .map(({ name, points }) => `${name}: most photons near ${formatNumber(points.reduce<Sample>((a, b) => (b[1] > a[1] ? b : a), [0, 0])[0])} keV`)
+    .map(
+      ({ name, points }) =>
+        `${name}: most photons near ${formatNumber(points.reduce<Sample>((a, b) => (b[1] > a[1] ? b : a), [0, 0])[0])} keV`,
+    )
     .join('; ')}.`;
   return html`<svg class="chart" viewBox="0 0 ${width} ${height}" width=${width} height=${height} role="img" aria-label=${label}>
-    ${y.ticks(4).map((tick) => svg`<line class="gridline" x1=${margin.left} x2=${width - margin.right} y1=${y(tick)} y2=${y(tick)} />
-      <text class="tick" text-anchor="end" x=${margin.left - 6} y=${y(tick) + 4}>${formatTick(tick)}</text>`)}
+    ${y.ticks(4).map(
+      (
+        tick,
+      ) => svg`<line class="gridline" x1=${margin.left} x2=${width - margin.right} y1=${y(tick)} y2=${y(tick)} />
+      <text class="tick" text-anchor="end" x=${margin.left - 6} y=${y(tick) + 4}>${formatTick(tick)}</text>`,
+    )}
     ${x.ticks(8).map((tick) => svg`<text class="tick" text-anchor="middle" x=${x(tick)} y=${base + 16}>${tick}</text>`)}
     <text class="axis-name" text-anchor="end" x=${width - margin.right} y=${base + 33}>photon energy, keV</text>
     <text class="axis-name" x="0" y="9">photons per mm², keV and frame</text>

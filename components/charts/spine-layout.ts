@@ -43,7 +43,16 @@ export interface SpineLayout {
 }
 
 /** Shares of the drawing's height, from the focal spot down. */
-const at = { tube: 0.03, filter: 0.12, airBreak: 0.19, support: 0.255, skin: 0.285, exit: 0.8, grid: 0.885, detector: 0.925 };
+const at = {
+  tube: 0.03,
+  filter: 0.12,
+  airBreak: 0.19,
+  support: 0.255,
+  skin: 0.285,
+  exit: 0.8,
+  grid: 0.885,
+  detector: 0.925,
+};
 
 export function spineLayout({ height, width, layers_mm, detailDepth_mm }: SpineInput): SpineLayout {
   const recede = { x: Math.round(width * 0.11), y: Math.round(width * 0.05) };

@@ -14,21 +14,33 @@ const isTable = (file: File): boolean => file.name.toLowerCase().endsWith('.csv'
 /** Reads files that were chosen or dropped: one case, and CSV tables it may name. */
 export async function readHanded(files: readonly File[]): Promise<Handed> {
   const tables = Object.fromEntries(
-    await Promise.all(files.filter(isTable).map(async (file) => [file.name, await file.text()] as const)),
+    await Promise.all(
+      files.filter(isTable).map(async (file) => [file.name, await file.text()] as const),
+    ),
   );
   const cases = files.filter((file) => !isTable(file));
   if (cases.length === 0) return { kind: 'tables', files: tables };
   const [file] = cases;
-  const refuse = (faults: readonly Fault[]): Handed => ({ kind: 'faults', fileName: file.name, faults });
+  const refuse = (faults: readonly Fault[]): Handed => ({
+    kind: 'faults',
+    fileName: file.name,
+    faults,
+  });
   if (cases.length > 1) {
     const rule = 'must be one case at a time';
-    return refuse([{ path: 'files', value: `${cases.length} files`, rule, remedy: 'choose one case file' }]);
+    return refuse([
+      { path: 'files', value: `${cases.length} files`, rule, remedy: 'choose one case file' },
+    ]);
   }
   // Bytes bound characters, so a hopelessly long file is not even read.
   const text = file.size > 4 * longestCase ? ' '.repeat(longestCase + 1) : await file.text();
   const read = readCaseText(text);
   if ('fault' in read) return refuse([read.fault]);
-  return { kind: 'case', fileName: file.name, sheet: { document: read.value as Json, files: tables } };
+  return {
+    kind: 'case',
+    fileName: file.name,
+    sheet: { document: read.value as Json, files: tables },
+  };
 }
 
 /** Asks for files through the browser; null when the person thinks better of it. */
@@ -47,7 +59,11 @@ export async function chooseFiles(): Promise<File[] | null> {
 
 /** `Aortography, abdomen` → `aortography-abdomen.case.json`. */
 export function fileNameFor(title: string): string {
-  const plain = title.normalize('NFKD').replace(/[^\w\s-]/g, '').trim().toLowerCase();
+  const plain = title
+    .normalize('NFKD')
+    .replace(/[^\w\s-]/g, '')
+    .trim()
+    .toLowerCase();
   return `${plain.replace(/[\s_]+/g, '-').slice(0, 60) || 'untitled'}.case.json`;
 }
 

@@ -73,7 +73,8 @@ export function createCaseStore(first: Sheet, now_ms: () => number): CaseStore {
     },
     setAt: (path, value) => put(path, withValueAt(history.present.document, path, value)),
     change: (change, joins) => put(joins ?? null, change(history.present.document)),
-    addFiles: (files) => put(null, history.present.document, { ...history.present.files, ...files }),
+    addFiles: (files) =>
+      put(null, history.present.document, { ...history.present.files, ...files }),
     undo: () => go(undo(history)),
     redo: () => go(redo(history)),
     open: (sheet) => {
@@ -86,7 +87,10 @@ export function createCaseStore(first: Sheet, now_ms: () => number): CaseStore {
 }
 
 /** A draft of a sheet; faulty values are shown, and those last good stand in for them. */
-function draftOf(sheet: Sheet, before: Draft | null): { draft: Draft | null; faults: readonly Fault[] } {
+function draftOf(
+  sheet: Sheet,
+  before: Draft | null,
+): { draft: Draft | null; faults: readonly Fault[] } {
   const reading = readDocument(sheet.document, sheet.files, before?.case ?? null);
   if ('unreadable' in reading) return { draft: null, faults: reading.unreadable };
   return { draft: { ...sheet, ...reading }, faults: reading.faults };

@@ -24,9 +24,12 @@ export const shownAt = (draft: Draft, path: string): Json | undefined => {
 /** The fault standing at a path or below it. */
 export const faultAt = (draft: Draft, path: string): Fault | undefined =>
   draft.faults.find((fault) => fault.path === path) ??
-  draft.faults.find((fault) => fault.path.startsWith(`${path}.`) || fault.path.startsWith(`${path}[`));
+  draft.faults.find(
+    (fault) => fault.path.startsWith(`${path}.`) || fault.path.startsWith(`${path}[`),
+  );
 
 /** Whether the value at a path is assumed, because the case is silent there. */
 export const isAssumed = (draft: Draft, path: string): boolean =>
-  draft.assumed.some((entry) => entry === path || path.startsWith(`${entry}.`) || path.startsWith(`${entry}[`)) &&
-  valueAtPath(draft.document, path) === undefined;
+  draft.assumed.some(
+    (entry) => entry === path || path.startsWith(`${entry}.`) || path.startsWith(`${entry}[`),
+  ) && valueAtPath(draft.document, path) === undefined;

@@ -23,7 +23,12 @@ export const historyOf = <T>(present: T): History<T> => ({
  * `present` replaced by `next`; what was undone before is given up. A step without a key (null)
  * stands by itself.
  */
-export function record<T>(history: History<T>, next: T, key: string | null, now_ms: number): History<T> {
+export function record<T>(
+  history: History<T>,
+  next: T,
+  key: string | null,
+  now_ms: number,
+): History<T> {
   const soon = now_ms - history.lastTime_ms < together_ms && history.past.length > 0;
   const joins = key !== null && history.lastKey === key && soon;
   return {

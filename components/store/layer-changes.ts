@@ -50,7 +50,10 @@ function sharedOut(layers: readonly Json[], share: number): readonly Json[] {
 export const setLayerThickness =
   (index: number, value: Json): Change =>
   (document) =>
-    withLayers(document, layersOf(withValueAt(document, `patient.layers[${index}].thickness_mm`, value)));
+    withLayers(
+      document,
+      layersOf(withValueAt(document, `patient.layers[${index}].thickness_mm`, value)),
+    );
 
 /** Layer `index` one place up or down; at the end of the stack nothing changes. */
 export const moveLayer =
@@ -82,7 +85,12 @@ export const addLayer =
     const wanted = ['layer', ...Array.from({ length: 999 }, (_, i) => `layer ${i + 2}`)];
     const name = wanted.find((candidate) => !names.includes(candidate)) ?? 'layer';
     const shared = layers.some((layer) => numberAt(layer, 'growthShare') !== null);
-    const added: Json = { name, material: 'soft tissue', thickness_mm: 10, ...(shared ? { growthShare: 0 } : {}) };
+    const added: Json = {
+      name,
+      material: 'soft tissue',
+      thickness_mm: 10,
+      ...(shared ? { growthShare: 0 } : {}),
+    };
     return withLayers(document, [...layers.slice(0, below + 1), added, ...layers.slice(below + 1)]);
   };
 

@@ -15,7 +15,13 @@ export const removeItem =
   (path: string, index: number, known: readonly Json[] = []): Change =>
   (document) => {
     const list = valueAtPath(document, path) ?? known;
-    return Array.isArray(list) ? withValueAt(document, path, list.filter((_, i) => i !== index)) : document;
+    return Array.isArray(list)
+      ? withValueAt(
+          document,
+          path,
+          list.filter((_, i) => i !== index),
+        )
+      : document;
   };
 
 /** A filter of the room under another name; techniques and readings that use it follow. */

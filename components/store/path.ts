@@ -1,5 +1,11 @@
 /** Any JSON value. */
-export type Json = null | boolean | number | string | readonly Json[] | { readonly [key: string]: Json };
+export type Json =
+  | null
+  | boolean
+  | number
+  | string
+  | readonly Json[]
+  | { readonly [key: string]: Json };
 
 type Step = string | number;
 

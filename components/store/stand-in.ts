@@ -1,4 +1,9 @@
-import { type CaseFiles, type Fault, type ParsedCase, parseCase } from '../../physics/case/index.js';
+import {
+  type CaseFiles,
+  type Fault,
+  type ParsedCase,
+  parseCase,
+} from '../../physics/case/index.js';
 import type { Case } from '../../physics/case/schema.js';
 import { type Json, valueAtPath, withValueAt } from './path.js';
 

@@ -36,7 +36,10 @@ export const addTechnique =
     const names = techniques.map((entry) => valueAtPath(entry, 'name'));
     const wanted = ['Proposed', ...Array.from({ length: 99 }, (_, i) => `Proposed ${i + 2}`)];
     const name = wanted.find((candidate) => !names.includes(candidate)) ?? 'Proposed';
-    return withValueAt(document, 'techniques', [...techniques, withValueAt(techniques[from], 'name', name)]);
+    return withValueAt(document, 'techniques', [
+      ...techniques,
+      withValueAt(techniques[from], 'name', name),
+    ]);
   };
 
 /** The techniques without number `index`; the last one stays. */
@@ -45,5 +48,9 @@ export const removeTechnique =
   (document) => {
     const techniques = valueAtPath(document, 'techniques');
     if (!Array.isArray(techniques) || techniques.length < 2) return document;
-    return withValueAt(document, 'techniques', techniques.filter((_, i) => i !== index));
+    return withValueAt(
+      document,
+      'techniques',
+      techniques.filter((_, i) => i !== index),
+    );
   };

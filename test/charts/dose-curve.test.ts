@@ -6,7 +6,12 @@ import { ratioPosition } from '../../components/charts/ratio-bar.js';
 const line = (filter: string, scale: number) => ({
   filter,
   ink: null,
-  points: [60, 70, 80].map((potential_kV) => ({ potential_kV, dose: (scale * 100) / potential_kV, value: 1000 / potential_kV, forbidden: null })),
+  points: [60, 70, 80].map((potential_kV) => ({
+    potential_kV,
+    dose: (scale * 100) / potential_kV,
+    value: 1000 / potential_kV,
+    forbidden: null,
+  })),
 });
 const data: DoseCurveData = {
   valueName: 'SdNR of the vessel',
@@ -29,17 +34,37 @@ describe('the contrast-versus-dose curve', () => {
   });
 
   test('shows the Rose threshold even where every value is below it', () => {
-    const { y } = curveScales({ ...data, lines: [], marks: [], rose: 5 }, { width: 360, height: 250 });
+    const { y } = curveScales(
+      { ...data, lines: [], marks: [], rose: 5 },
+      { width: 360, height: 250 },
+    );
     expect(y.domain()[1]).toBeGreaterThanOrEqual(5);
   });
 
   test('shows contrasts below zero for an agent more transparent than what it replaces', () => {
-    const negative = { ...data, rose: null, lines: [{ ...line('none', 1), points: [{ potential_kV: 60, dose: 1, value: -0.3, forbidden: null }] }], marks: [] };
-    expect(curveScales(negative, { width: 360, height: 250 }).y.domain()[0]).toBeLessThanOrEqual(-0.3);
+    const negative = {
+      ...data,
+      rose: null,
+      lines: [
+        {
+          ...line('none', 1),
+          points: [{ potential_kV: 60, dose: 1, value: -0.3, forbidden: null }],
+        },
+      ],
+      marks: [],
+    };
+    expect(curveScales(negative, { width: 360, height: 250 }).y.domain()[0]).toBeLessThanOrEqual(
+      -0.3,
+    );
   });
 
   test('reads every line at the potential nearest to the cursor', () => {
-    expect(pointsAt(data, 72).map(({ line: { filter }, point }) => [filter, point.potential_kV])).toEqual([['none', 70], ['0.2 Cu', 70]]);
+    expect(
+      pointsAt(data, 72).map(({ line: { filter }, point }) => [filter, point.potential_kV]),
+    ).toEqual([
+      ['none', 70],
+      ['0.2 Cu', 70],
+    ]);
   });
 });
 

@@ -1,5 +1,10 @@
 import { describe, expect, test } from 'vitest';
-import { formatEntry, formatNumber, formatPercent, formatRatio } from '../../components/charts/format.js';
+import {
+  formatEntry,
+  formatNumber,
+  formatPercent,
+  formatRatio,
+} from '../../components/charts/format.js';
 
 describe('numbers on paper', () => {
   test.each([

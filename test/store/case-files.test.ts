@@ -6,13 +6,19 @@ const file = (name: string, text: string) => new File([text], name);
 
 describe('files handed in', () => {
   test('a case comes with the tables beside it', async () => {
-    const got = await readHanded([file('a.case.json', JSON.stringify(sampleDocument)), file('control.csv', 'x,y\n')]);
+    const got = await readHanded([
+      file('a.case.json', JSON.stringify(sampleDocument)),
+      file('control.csv', 'x,y\n'),
+    ]);
     expect(got.kind === 'case' && got.sheet.document).toEqual(sampleDocument);
     expect(got.kind === 'case' && Object.keys(got.sheet.files)).toEqual(['control.csv']);
   });
 
   test('tables alone are tables', async () => {
-    expect(await readHanded([file('sizes.CSV', 'a\n')])).toEqual({ kind: 'tables', files: { 'sizes.CSV': 'a\n' } });
+    expect(await readHanded([file('sizes.CSV', 'a\n')])).toEqual({
+      kind: 'tables',
+      files: { 'sizes.CSV': 'a\n' },
+    });
   });
 
   test('what is not JSON is refused with line and column', async () => {
@@ -21,7 +27,11 @@ describe('files handed in', () => {
   });
 
   test('a file far too long is refused without being read', async () => {
-    const huge = { name: 'a.case.json', size: 1e9, text: () => Promise.reject(new Error('must not be read')) };
+    const huge = {
+      name: 'a.case.json',
+      size: 1e9,
+      text: () => Promise.reject(new Error('must not be read')),
+    };
     const got = await readHanded([huge as unknown as File]);
     expect(got.kind === 'faults' && got.faults[0].rule).toContain('million characters');
   });

@@ -45,7 +45,9 @@ describe('the case on the desk', () => {
     store.setAt('techniques[0].potential_kV', -1);
     store.setAt('techniques[1].potential_kV', 66);
     store.change(removeLayer(0));
-    expect(store.state().draft.case.techniques.map((entry) => entry.potential_kV)).toEqual([80, 66]);
+    expect(store.state().draft.case.techniques.map((entry) => entry.potential_kV)).toEqual([
+      80, 66,
+    ]);
     expect(store.state().draft.case.patient.layers).toHaveLength(2);
     store.setAt('techniques[0].potential_kV', 81);
     expect(store.state().draft.faults).toEqual([]);
@@ -60,15 +62,27 @@ describe('the case on the desk', () => {
 
   test('a document with faults opens with the faults shown where something sound can stand in', () => {
     const store = newStore();
-    const broken = { ...sampleDocument, room: { ...sampleDocument.room, tube: { anodeAngle_deg: 95 } } } as unknown as Json;
+    const broken = {
+      ...sampleDocument,
+      room: { ...sampleDocument.room, tube: { anodeAngle_deg: 95 } },
+    } as unknown as Json;
     expect(store.open({ document: broken, files: {} })).toEqual([]);
-    expect(store.state().draft.faults.map(({ path }) => path)).toEqual(['room.tube.anodeAngle_deg']);
+    expect(store.state().draft.faults.map(({ path }) => path)).toEqual([
+      'room.tube.anodeAngle_deg',
+    ]);
   });
 
   test('a document that leaves nothing to show is refused with its faults, and the case stays', () => {
     const store = newStore();
     const before = store.state().draft;
-    for (const bad of [null, 3, [], {}, { format: 'other' }, { format: 'stratabeam.case', version: 1 }] as Json[]) {
+    for (const bad of [
+      null,
+      3,
+      [],
+      {},
+      { format: 'other' },
+      { format: 'stratabeam.case', version: 1 },
+    ] as Json[]) {
       expect(store.open({ document: bad, files: {} }).length).toBeGreaterThan(0);
       expect(store.state().draft).toBe(before);
     }
@@ -76,7 +90,10 @@ describe('the case on the desk', () => {
 
   test('opening another case can be undone', () => {
     const store = newStore();
-    store.open({ document: { ...(sampleDocument as object), title: 'Another' } as Json, files: {} });
+    store.open({
+      document: { ...(sampleDocument as object), title: 'Another' } as Json,
+      files: {},
+    });
     expect(store.state().draft.case.title).toBe('Another');
     store.undo();
     expect(store.state().draft.case.title).toBe(sampleDocument.title);

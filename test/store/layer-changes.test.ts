@@ -1,14 +1,27 @@
 import { describe, expect, test } from 'vitest';
-import { parseCase } from '../../physics/case/index.js';
-import { addLayer, moveLayer, removeLayer, renameLayer, setLayerThickness } from '../../components/store/layer-changes.js';
+import {
+  addLayer,
+  moveLayer,
+  removeLayer,
+  renameLayer,
+  setLayerThickness,
+} from '../../components/store/layer-changes.js';
 import { type Json, valueAtPath } from '../../components/store/path.js';
+import { parseCase } from '../../physics/case/index.js';
 import { sampleDocument } from '../desk/sample/case.js';
 
 const document = sampleDocument as unknown as Json;
-const names = (json: Json) => (valueAtPath(json, 'patient.layers') as { name: string }[]).map(({ name }) => name);
-const sizes = (json: Json) => (valueAtPath(json, 'patient.sizes') as { thickness_mm: number }[]).map((size) => size.thickness_mm);
+const names = (json: Json) =>
+  (valueAtPath(json, 'patient.layers') as { name: string }[]).map(({ name }) => name);
+const sizes = (json: Json) =>
+  (valueAtPath(json, 'patient.sizes') as { thickness_mm: number }[]).map(
+    (size) => size.thickness_mm,
+  );
 const shareSum = (json: Json) =>
-  (valueAtPath(json, 'patient.layers') as { growthShare: number }[]).reduce((sum, layer) => sum + layer.growthShare, 0);
+  (valueAtPath(json, 'patient.layers') as { growthShare: number }[]).reduce(
+    (sum, layer) => sum + layer.growthShare,
+    0,
+  );
 const isSound = (json: Json) => !('faults' in parseCase(json));
 
 describe('changing the layers', () => {

@@ -1,7 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import { type Json, valueAtPath, withValueAt } from '../../components/store/path.js';
 
-const document: Json = { patient: { layers: [{ name: 'a', thickness_mm: 1 }, { name: 'b' }] }, title: 't' };
+const document: Json = {
+  patient: { layers: [{ name: 'a', thickness_mm: 1 }, { name: 'b' }] },
+  title: 't',
+};
 
 describe('values at paths', () => {
   test('are found through objects and lists', () => {
@@ -39,7 +42,9 @@ describe('values at paths', () => {
 
   test('taken away leave neither key nor hole', () => {
     expect(withValueAt(document, 'title', undefined)).toEqual({ patient: document.patient });
-    expect(valueAtPath(withValueAt(document, 'patient.layers[0]', undefined), 'patient.layers')).toEqual([{ name: 'b' }]);
+    expect(
+      valueAtPath(withValueAt(document, 'patient.layers[0]', undefined), 'patient.layers'),
+    ).toEqual([{ name: 'b' }]);
   });
 
   test('a key called __proto__ is written as an ordinary key', () => {

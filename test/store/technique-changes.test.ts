@@ -1,12 +1,19 @@
 import { describe, expect, test } from 'vitest';
-import { parseCase } from '../../physics/case/index.js';
 import { addItem, removeItem, renameFilter } from '../../components/store/list-changes.js';
 import { type Json, valueAtPath } from '../../components/store/path.js';
-import { addTechnique, controlOfKind, fixedOfKind, removeTechnique, renameTechnique } from '../../components/store/technique-changes.js';
+import {
+  addTechnique,
+  controlOfKind,
+  fixedOfKind,
+  removeTechnique,
+  renameTechnique,
+} from '../../components/store/technique-changes.js';
+import { parseCase } from '../../physics/case/index.js';
 import { sampleDocument } from '../desk/sample/case.js';
 
 const document = sampleDocument as unknown as Json;
-const names = (json: Json) => (valueAtPath(json, 'techniques') as { name: string }[]).map(({ name }) => name);
+const names = (json: Json) =>
+  (valueAtPath(json, 'techniques') as { name: string }[]).map(({ name }) => name);
 const isSound = (json: Json) => !('faults' in parseCase(json));
 
 describe('changing techniques and lists', () => {
@@ -24,8 +31,14 @@ describe('changing techniques and lists', () => {
   });
 
   test('measured checks follow a renamed technique', () => {
-    const checks = [{ quantity: 'sdnr', technique: 'Proposed', values: [9] }, { quantity: 'sdnr', technique: 'Current', values: [9] }];
-    const changed = renameTechnique(1, 'Softer')({ ...(document as object), measuredChecks: checks } as Json);
+    const checks = [
+      { quantity: 'sdnr', technique: 'Proposed', values: [9] },
+      { quantity: 'sdnr', technique: 'Current', values: [9] },
+    ];
+    const changed = renameTechnique(
+      1,
+      'Softer',
+    )({ ...(document as object), measuredChecks: checks } as Json);
     expect(valueAtPath(changed, 'measuredChecks[0].technique')).toBe('Softer');
     expect(valueAtPath(changed, 'measuredChecks[1].technique')).toBe('Current');
   });
@@ -39,9 +52,18 @@ describe('changing techniques and lists', () => {
 
   test('a list the case is silent about starts from what it assumes there', () => {
     const assumed = [{ material: 'aluminium', thickness_mm: 2.5 }];
-    const changed = addItem('room.tube.inherentFilter', { material: 'copper', thickness_mm: 0.1 }, assumed)(document);
+    const changed = addItem(
+      'room.tube.inherentFilter',
+      { material: 'copper', thickness_mm: 0.1 },
+      assumed,
+    )(document);
     expect(valueAtPath(changed, 'room.tube.inherentFilter')).toHaveLength(2);
-    expect(valueAtPath(removeItem('room.tube.inherentFilter', 0, assumed)(document), 'room.tube.inherentFilter')).toEqual([]);
+    expect(
+      valueAtPath(
+        removeItem('room.tube.inherentFilter', 0, assumed)(document),
+        'room.tube.inherentFilter',
+      ),
+    ).toEqual([]);
   });
 
   test('control and split of tube load are written as the case file has them', () => {

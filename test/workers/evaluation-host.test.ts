@@ -14,7 +14,10 @@ describe('what the evaluation worker answers', () => {
     const host = evaluationHost();
     host.load(parsed());
     const { evaluations } = host.weigh('median');
-    expect(evaluations.map(({ technique, size }) => `${technique} ${size}`)).toEqual(['Current median', 'Proposed median']);
+    expect(evaluations.map(({ technique, size }) => `${technique} ${size}`)).toEqual([
+      'Current median',
+      'Proposed median',
+    ]);
   });
 
   test('answers clone to the page', () => {
@@ -48,8 +51,8 @@ describe('what the evaluation worker answers', () => {
       hold: 'sdnr',
     });
     const current = host
-      .weigh()
-      .evaluations.find(({ technique, size }) => technique === 'Current' && size === 'median');
+      .weigh('median')
+      .evaluations.find(({ technique }) => technique === 'Current');
     expect(point.values?.incidentAirKerma_mGy).toBeCloseTo(
       current?.dose.incidentAirKerma_mGy ?? Number.NaN,
       9,

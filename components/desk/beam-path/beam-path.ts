@@ -1,13 +1,13 @@
-import { LitElement, html, nothing } from 'lit';
+import { html, LitElement, nothing } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
-import { placeAlong } from '../../charts/place-along.js';
-import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
 import type { PlacedDetail } from '../../../physics/stack/place-detail.js';
 import type { Stack } from '../../../physics/stack/stack.js';
 import type { StackAnchors } from '../../../scenes/stack-anchors.js';
+import { placeAlong } from '../../charts/place-along.js';
+import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
+import { type DeskModel, placed, sizeShown } from '../model/desk-model.js';
 import { spineOfScene } from '../stack-view/spine-of-scene.js';
 import { stackSceneOf } from '../stack-view/stack-scene.js';
-import { placed, sizeShown, type DeskModel } from '../model/desk-model.js';
 import { beamPathSheet } from './beam-path-sheet.js';
 import { leaderPath } from './leader-path.js';
 import { spineLabels } from './spine-labels.js';
@@ -39,7 +39,12 @@ export class BeamPath extends LitElement {
 
   static override styles = beamPathSheet;
 
-  private readonly watcher = new ResizeObserver(() => this.measure());
+  private waiting = 0;
+  private readonly watcher = new ResizeObserver(() => {
+    // Arranging changes what is observed, so it waits for the next frame, and is done once in it.
+    cancelAnimationFrame(this.waiting);
+    this.waiting = requestAnimationFrame(() => this.measure());
+  });
 
   override connectedCallback() {
     super.connectedCallback();
@@ -49,6 +54,7 @@ export class BeamPath extends LitElement {
   override disconnectedCallback() {
     super.disconnectedCallback();
     this.watcher.disconnect();
+    cancelAnimationFrame(this.waiting);
   }
 
   protected override updated() {
@@ -61,7 +67,11 @@ export class BeamPath extends LitElement {
     const layers_mm = stack
       ? stack.layers.map((layer) => layer.thickness_mm)
       : this.model.draft.case.patient.layers.map((layer) => layer.thickness_mm);
-    return spineLayout({ ...this.spine, layers_mm, detailDepth_mm: detail?.centreDepth_mm ?? null });
+    return spineLayout({
+      ...this.spine,
+      layers_mm,
+      detailDepth_mm: detail?.centreDepth_mm ?? null,
+    });
   }
 
   /** Takes the size the page gives the spine; drawing and rows follow. */
@@ -82,7 +92,9 @@ export class BeamPath extends LitElement {
     if (!spine) return;
     const { stack, detail } = placed(this.model);
     const layout = this.layout(stack, detail);
-    const rowsOf = (id: string) => [...root.querySelectorAll<HTMLElement>(`.row[data-station="${id}"]`)];
+    const rowsOf = (id: string) => [
+      ...root.querySelectorAll<HTMLElement>(`.row[data-station="${id}"]`),
+    ];
     const used = stations.filter(({ id }) => rowsOf(id).some((row) => row.offsetHeight > 8));
     const heights = used.map(({ id }) => Math.max(...rowsOf(id).map((row) => row.offsetHeight)));
     const tops = placeAlong(
@@ -119,7 +131,9 @@ export class BeamPath extends LitElement {
         <svg class="leaders" aria-hidden="true"><path /></svg>
         ${this.side(model.left, 'left')}
         <section class="spine" aria-label="Beam path">
-          <stack-view .scene=${stackSceneOf(model)} labels="turned" @stack-anchors=${(event: CustomEvent<StackAnchors>) => {
+          <stack-view .scene=${stackSceneOf(model)} labels="turned" @stack-anchors=${(
+            event: CustomEvent<StackAnchors>,
+          ) => {
             this.anchors = event.detail;
           }} @view-turned=${(event: CustomEvent<boolean>) => {
             this.turned = event.detail;

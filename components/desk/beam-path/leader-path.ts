@@ -4,7 +4,12 @@ import type { SpineLayout } from '../../charts/spine-layout.js';
  * A thin line from a row at the side to the place on the spine it speaks of, with one elbow where
  * the row had to move. SVG path data in the coordinates of the whole beam path.
  */
-export function leaderPath(row: HTMLElement, spine: HTMLElement, layout: SpineLayout, anchor: number): string {
+export function leaderPath(
+  row: HTMLElement,
+  spine: HTMLElement,
+  layout: SpineLayout,
+  anchor: number,
+): string {
   const side = row.parentElement as HTMLElement;
   const onLeft = side.offsetLeft < spine.offsetLeft;
   const y = row.offsetTop + row.offsetHeight - 13;

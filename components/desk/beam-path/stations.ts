@@ -1,11 +1,16 @@
 import { html, nothing, type TemplateResult } from 'lit';
-import type { SpineLayout } from '../../charts/spine-layout.js';
-import { quantity } from '../../charts/quantities.js';
 import type { Evaluation } from '../../../physics/results.js';
-import { evaluationOf, type DeskModel } from '../model/desk-model.js';
+import { quantity } from '../../charts/quantities.js';
+import type { SpineLayout } from '../../charts/spine-layout.js';
+import { type DeskModel, evaluationOf } from '../model/desk-model.js';
 import { acquisitionFields } from '../technique-fields/acquisition-fields.js';
 import { controlFields } from '../technique-fields/control-fields.js';
-import { filterField, gridField, potentialField, techniqueName } from '../technique-fields/setting-fields.js';
+import {
+  filterField,
+  gridField,
+  potentialField,
+  techniqueName,
+} from '../technique-fields/setting-fields.js';
 
 /** One thing set or read at a place along the beam, once for each side. */
 export interface Station {
@@ -26,7 +31,8 @@ function figure(id: string, name?: string, unit: string | null = null) {
     };
     const value = read(technique);
     const before = read(model.left);
-    const compared = technique !== model.left && value !== null && before ? value / before : undefined;
+    const compared =
+      technique !== model.left && value !== null && before ? value / before : undefined;
     const per = entry.per ? `, ${entry.per}` : '';
     return html`<span class="name">${name ?? entry.name}${per}</span
       ><figure-value quantity=${id} .value=${value} .ratio=${compared} .unit=${unit} ?stale=${model.stale}
@@ -58,7 +64,8 @@ const scatterStation: Station['content'] = (model, technique) => {
 const loadStation: Station['content'] = (model, technique) => {
   const exposure = evaluationOf(model, technique)?.exposure;
   const name = model.draft.case.techniques[technique].name;
-  const part = (id: string) => html`<figure-value small quantity=${id} .value=${exposure ? quantity(id).of(evaluationOf(model, technique) as Evaluation) : null} ?stale=${model.stale} technique=${name}></figure-value>`;
+  const part = (id: string) =>
+    html`<figure-value small quantity=${id} .value=${exposure ? quantity(id).of(evaluationOf(model, technique) as Evaluation) : null} ?stale=${model.stale} technique=${name}></figure-value>`;
   return html`${figure('tubeLoad')(model, technique)}
     <span class="also">${part('tubeCurrent')} · ${part('exposureTime')} · ${part('power')}</span>`;
 };
@@ -69,9 +76,24 @@ export const stations: readonly Station[] = [
   { id: 'potential', anchor: (l) => l.tube, leader: true, content: potentialField },
   { id: 'load', anchor: (l) => l.tube + 44, leader: false, content: loadStation },
   { id: 'filter', anchor: (l) => l.filter, leader: true, content: filterField },
-  { id: 'incident', anchor: (l) => l.patient.top, leader: true, content: figure('incidentAirKerma') },
-  { id: 'imparted', anchor: (l) => l.patient.top + 60, leader: false, content: figureIfKnown('energyImparted') },
-  { id: 'subject', anchor: (l) => l.detail ?? (l.patient.top + l.patient.bottom) / 2, leader: true, content: figure('subjectContrast') },
+  {
+    id: 'incident',
+    anchor: (l) => l.patient.top,
+    leader: true,
+    content: figure('incidentAirKerma'),
+  },
+  {
+    id: 'imparted',
+    anchor: (l) => l.patient.top + 60,
+    leader: false,
+    content: figureIfKnown('energyImparted'),
+  },
+  {
+    id: 'subject',
+    anchor: (l) => l.detail ?? (l.patient.top + l.patient.bottom) / 2,
+    leader: true,
+    content: figure('subjectContrast'),
+  },
   { id: 'scatter', anchor: (l) => l.patient.bottom, leader: true, content: scatterStation },
   { id: 'grid', anchor: (l) => l.grid, leader: true, content: gridField },
   { id: 'detector', anchor: (l) => l.detector.top, leader: true, content: controlFields },

@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { ComparisonRow, HoldConstant, Ratios } from '../../../physics/results.js';
 import { formatRatio } from '../../charts/format.js';
@@ -15,7 +15,14 @@ export const marginColumns: readonly (readonly [HoldConstant, string])[] = [
 ];
 
 /** What the margin has room for, besides the dose the case leads with; Balance shows all. */
-const inMargin: readonly (keyof Ratios)[] = ['incidentAirKerma', 'energyImparted', 'tubeLoad', 'power', 'detectedContrast', 'sdnr'];
+const inMargin: readonly (keyof Ratios)[] = [
+  'incidentAirKerma',
+  'energyImparted',
+  'tubeLoad',
+  'power',
+  'detectedContrast',
+  'sdnr',
+];
 
 /**
  * Proposed over Current under every equality, one column each.
@@ -60,15 +67,18 @@ export class ComparisonTable extends LitElement {
       comparison.rows.find((row) => row.holdConstant === hold);
     const { primaryDose } = this.model.draft.case.compare;
     const known = ratioNames.filter(
-      ([key]) => (inMargin.includes(key) || key === primaryDose) && comparison.rows.some((row) => row.ratio[key] !== null),
+      ([key]) =>
+        (inMargin.includes(key) || key === primaryDose) &&
+        comparison.rows.some((row) => row.ratio[key] !== null),
     );
     return html`<table class=${this.model.stale ? 'stale' : ''}>
       <caption class="unseen">Ratios of ${comparison.to} to ${comparison.from}, size ${comparison.size}</caption>
       <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${marginColumns.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>
       <tbody>${known.map(
-        ([key, name]) => html`<tr><th scope="row">${name}</th>${marginColumns.map(
-          ([hold]) => html`<td>${formatRatio(rowOf(hold)?.ratio[key]).replace('×', '')}</td>`,
-        )}</tr>`,
+        ([key, name]) =>
+          html`<tr><th scope="row">${name}</th>${marginColumns.map(
+            ([hold]) => html`<td>${formatRatio(rowOf(hold)?.ratio[key]).replace('×', '')}</td>`,
+          )}</tr>`,
       )}</tbody>
     </table>`;
   }

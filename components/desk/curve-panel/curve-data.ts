@@ -5,12 +5,14 @@ import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import type { DoseCurveData } from '../../charts/dose-curve.js';
 import { limitName } from '../../charts/limit-names.js';
 import { type Quantity, quantity } from '../../charts/quantities.js';
-import { evaluationOf, sizeShown, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, evaluationOf, sizeShown } from '../model/desk-model.js';
 
 /** The words for an agent that is not in clinical use; null for one that is, or none. */
 export const investigationalWords = (c: Case): string | null => {
   const name = c.task.detail.agent?.name;
-  return name && agent(name)?.investigational ? `${name}: investigational agent, not in clinical use` : null;
+  return name && agent(name)?.investigational
+    ? `${name}: investigational agent, not in clinical use`
+    : null;
 };
 
 /** The quantities on the two axes, as the case chooses them. */
@@ -20,11 +22,16 @@ export const curveAxes = ({ compare }: Case): { value: Quantity; dose: Quantity 
 });
 
 /** What the curve shows, from the scan and the techniques as set. */
-export function curveData(model: DeskModel, scan: readonly SweepSetting[], holdConstant: string): DoseCurveData {
+export function curveData(
+  model: DeskModel,
+  scan: readonly SweepSetting[],
+  holdConstant: string,
+): DoseCurveData {
   const { case: c } = model.draft;
   const { value, dose } = curveAxes(c);
   const shown = [model.left, ...(model.right === null ? [] : [model.right])];
-  const inkOf = (filter: string): number | null => shown.find((i) => c.techniques[i].filter === filter) ?? null;
+  const inkOf = (filter: string): number | null =>
+    shown.find((i) => c.techniques[i].filter === filter) ?? null;
   const lines = c.room.filters.map(({ name }) => ({
     filter: name,
     ink: inkOf(name),
@@ -43,7 +50,15 @@ export function curveData(model: DeskModel, scan: readonly SweepSetting[], holdC
     const cost = evaluation && dose.of(evaluation);
     const shows = evaluation && value.of(evaluation);
     return evaluation && cost !== null && shows !== null
-      ? [{ ink: index, name: c.techniques[index].name, potential_kV: evaluation.setting.potential_kV, dose: cost, value: shows }]
+      ? [
+          {
+            ink: index,
+            name: c.techniques[index].name,
+            potential_kV: evaluation.setting.potential_kV,
+            dose: cost,
+            value: shows,
+          },
+        ]
       : [];
   });
   return {

@@ -1,10 +1,10 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { type DoseCurveData, doseCurve, pointsAt } from '../../charts/dose-curve.js';
 import { doseCurveTable } from '../../charts/dose-curve-table.js';
 import { formatNumber } from '../../charts/format.js';
-import { sizeShown, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, sizeShown } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { curveAxes, curveData } from './curve-data.js';
 import '../fields/choice-field.js';
@@ -124,18 +124,21 @@ export class CurvePanel extends LitElement {
       </h2>
       <p class="condition">each line: potential ${from ? `${from}–${to} kV` : ''} at equal
         <label class="bare"><span class="unseen">Held constant</span><select @change=${choose}>${holds.map(
-          (entry) => html`<option value=${entry.value} ?selected=${entry.value === this.hold}>${entry.words}</option>`,
+          (entry) =>
+            html`<option value=${entry.value} ?selected=${entry.value === this.hold}>${entry.words}</option>`,
         )}</select></label>, size ${sizeShown(model).name}</p>
-      ${scan === null
-        ? html`<p class="waiting" style="height:${this.height}px">computing …</p>`
-        : html`<div class=${this.stale ? 'stale' : ''}>${doseCurve(data, { width: this.width, height: this.height }, this.cursor_kV)}</div>
+      ${
+        scan === null
+          ? html`<p class="waiting" style="height:${this.height}px">computing …</p>`
+          : html`<div class=${this.stale ? 'stale' : ''}>${doseCurve(data, { width: this.width, height: this.height }, this.cursor_kV)}</div>
             <label class="reader"><span>read at</span>
               <input type="range" min=${from} max=${to} step="1" .value=${String(this.cursor_kV ?? model.draft.case.techniques[model.left].potential_kV)}
                 aria-valuetext="${this.cursor_kV ?? ''} kV" @input=${(event: Event) => {
                   this.cursor_kV = Number((event.target as HTMLInputElement).value);
                 }} /><span>${this.cursor_kV === null ? '' : `${this.cursor_kV} kV`}</span></label>
             <output>${this.reading(data)}</output>
-            <details><summary>The same as a table</summary>${doseCurveTable(data)}</details>`}
+            <details><summary>The same as a table</summary>${doseCurveTable(data)}</details>`
+      }
       ${data.marks.length === 0 && scan !== null ? html`<p class="condition">This dose is not computed yet.</p>` : nothing}
     </section>`;
   }

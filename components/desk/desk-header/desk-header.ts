@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { formatEntry } from '../../charts/format.js';
@@ -178,7 +178,8 @@ export class DeskHeader extends LitElement {
         ${this.command('undo', 'Undo', this.canUndo, 'Ctrl+Z')} ${this.command('redo', 'Redo', this.canRedo, 'Ctrl+Shift+Z')}
         <span class="status" role="status">${this.status}</span>
         <label>size <select @change=${this.chosen('choose-size')}>${sizesOf(draft.case.patient).map(
-          ({ name, thickness_mm }) => html`<option value=${name} ?selected=${name === sizeName} .selected=${name === sizeName}>${name}, ${formatEntry(thickness_mm)} mm</option>`,
+          ({ name, thickness_mm }) =>
+            html`<option value=${name} ?selected=${name === sizeName} .selected=${name === sizeName}>${name}, ${formatEntry(thickness_mm)} mm</option>`,
         )}</select></label>
         ${this.command('paper', `paper: ${this.paper}`)}
       </div>

@@ -1,7 +1,7 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
-import { amountUnits, agentChoices, detailShapes } from '../task-fields/detail-choices.js';
 import type { DeskModel } from '../model/desk-model.js';
+import { agentChoices, amountUnits, detailShapes } from '../task-fields/detail-choices.js';
 import '../fields/choice-field.js';
 import '../fields/number-field.js';
 
@@ -35,13 +35,15 @@ export class DetailLabel extends LitElement {
         <number-field inline .draft=${draft} path="${path}.size_mm" label="Size of the detail" unit="mm"></number-field>
         <choice-field inline .draft=${draft} path="${path}.shape" label="Shape of the detail" .choices=${detailShapes}></choice-field>
       </div>
-      ${detail.agent
-        ? html`<div>
-            <number-field inline .draft=${draft} path="${path}.agent.amount.value" label="Amount of agent" unit=${detail.agent.amount.unit} .unitShown=${""} step="5"></number-field>
+      ${
+        detail.agent
+          ? html`<div>
+            <number-field inline .draft=${draft} path="${path}.agent.amount.value" label="Amount of agent" unit=${detail.agent.amount.unit} .unitShown=${''} step="5"></number-field>
             <choice-field inline .draft=${draft} path="${path}.agent.amount.unit" label="Unit of the amount" .choices=${amountUnits}></choice-field>
           </div>
           <div><choice-field inline .draft=${draft} path="${path}.agent.name" label="Agent" .choices=${agentChoices}></choice-field></div>`
-        : nothing}`;
+          : nothing
+      }`;
   }
 }
 

@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, state } from 'lit/decorators.js';
 import { formatNumber } from '../../charts/format.js';
 import { quantity } from '../../charts/quantities.js';
@@ -64,7 +64,8 @@ export class ExplainCard extends LitElement {
     const back = (event: Event) => {
       if ((event as ToggleEvent).newState !== 'closed') return;
       this.removeEventListener('toggle', back);
-      if (this.matches(':focus') || document.activeElement === document.body) from.focus({ preventScroll: true });
+      if (this.matches(':focus') || document.activeElement === document.body)
+        from.focus({ preventScroll: true });
     };
     this.addEventListener('toggle', back);
   }

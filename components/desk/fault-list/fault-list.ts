@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { Fault } from '../../../physics/case/index.js';
 
@@ -65,7 +65,8 @@ export class FaultList extends LitElement {
       ${this.closable ? html`<button type="button" @click=${close}>close</button>` : nothing}
       <h2>${this.heading}</h2>
       <ol tabindex="0" aria-label="Faults">${this.faults.map(
-        ({ path, value, rule, remedy }) => html`<li><code>${path}</code>: ${value}: ${rule}; ${remedy}</li>`,
+        ({ path, value, rule, remedy }) =>
+          html`<li><code>${path}</code>: ${value}: ${rule}; ${remedy}</li>`,
       )}</ol>
     </section>`;
   }

@@ -10,7 +10,9 @@ export type CaseEdit =
 
 /** Sends an edit up to the desk, through shadow roots. */
 export const requestEdit = (from: EventTarget, detail: CaseEdit): boolean =>
-  from.dispatchEvent(new CustomEvent<CaseEdit>('case-edit', { detail, bubbles: true, composed: true }));
+  from.dispatchEvent(
+    new CustomEvent<CaseEdit>('case-edit', { detail, bubbles: true, composed: true }),
+  );
 
 declare global {
   interface HTMLElementEventMap {

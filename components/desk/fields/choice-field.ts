@@ -1,4 +1,4 @@
-import { LitElement, html, nothing } from 'lit';
+import { html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { Draft } from '../../store/draft.js';
 import { faultAt, isAssumed, shownAt } from '../../store/draft.js';
@@ -48,7 +48,9 @@ export class ChoiceField extends LitElement {
     const assumed = isAssumed(this.draft, this.path);
     const chosen = this.chosen;
     const listed = this.choices.some((choice) => choice.value === chosen);
-    const choices = listed ? this.choices : [...this.choices, { value: chosen, words: chosen || '–' }];
+    const choices = listed
+      ? this.choices
+      : [...this.choices, { value: chosen, words: chosen || '–' }];
     return html`<label class=${`${assumed ? 'assumed' : ''} ${fault ? 'faulty' : ''}`} title=${assumed ? 'assumed: the case is silent here' : nothing}
         ><span class="name">${this.label}</span>
         <span class="choice"

@@ -7,12 +7,31 @@ import './text-field.js';
 
 /** One field of the case, described: where it is, what it is called, how it is entered. */
 export type FieldSpec =
-  | { readonly kind: 'number'; readonly path: string; readonly label: string; readonly unit: string; readonly step: number; readonly empty: string | null }
-  | { readonly kind: 'choice'; readonly path: string; readonly label: string; readonly choices: readonly Choice[]; readonly numeric: boolean }
+  | {
+      readonly kind: 'number';
+      readonly path: string;
+      readonly label: string;
+      readonly unit: string;
+      readonly step: number;
+      readonly empty: string | null;
+    }
+  | {
+      readonly kind: 'choice';
+      readonly path: string;
+      readonly label: string;
+      readonly choices: readonly Choice[];
+      readonly numeric: boolean;
+    }
   | { readonly kind: 'text'; readonly path: string; readonly label: string };
 
 /** A number; `empty` is what an empty field stands for, where it may be empty. */
-export const numberSpec = (path: string, label: string, unit: string, step = 1, empty: string | null = null): FieldSpec => ({
+export const numberSpec = (
+  path: string,
+  label: string,
+  unit: string,
+  step = 1,
+  empty: string | null = null,
+): FieldSpec => ({
   kind: 'number',
   path,
   label,
@@ -22,12 +41,19 @@ export const numberSpec = (path: string, label: string, unit: string, step = 1, 
 });
 
 /** A choice; `numeric` where the case holds the chosen figure as a number. */
-export const choiceSpec = (path: string, label: string, choices: readonly (string | Choice)[], numeric = false): FieldSpec => ({
+export const choiceSpec = (
+  path: string,
+  label: string,
+  choices: readonly (string | Choice)[],
+  numeric = false,
+): FieldSpec => ({
   kind: 'choice',
   numeric,
   path,
   label,
-  choices: choices.map((choice) => (typeof choice === 'string' ? { value: choice, words: choice } : choice)),
+  choices: choices.map((choice) =>
+    typeof choice === 'string' ? { value: choice, words: choice } : choice,
+  ),
 });
 
 export const textSpec = (path: string, label: string): FieldSpec => ({ kind: 'text', path, label });

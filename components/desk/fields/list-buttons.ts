@@ -1,6 +1,6 @@
 import { html, type TemplateResult } from 'lit';
-import { addItem, removeItem } from '../../store/list-changes.js';
 import type { Draft } from '../../store/draft.js';
+import { addItem, removeItem } from '../../store/list-changes.js';
 import { type Json, valueAtPath } from '../../store/path.js';
 import { requestEdit } from './case-edit.js';
 
@@ -12,9 +12,21 @@ const known = (draft: Draft, path: string): readonly Json[] => {
 /** Adds an item to a list of the case; `what` names it: `a filter`. */
 export const addButton = (draft: Draft, path: string, item: Json, what: string): TemplateResult =>
   html`<button class="plain" type="button" @click=${(event: Event) =>
-    requestEdit(event.target as HTMLElement, { change: addItem(path, item, known(draft, path)) })}>add ${what}</button>`;
+    requestEdit(event.target as HTMLElement, {
+      change: addItem(path, item, known(draft, path)),
+    })}>add ${what}</button>`;
 
 /** Takes item `index` out of a list of the case; `what` names it for screen readers. */
-export const removeButton = (draft: Draft, path: string, index: number, what: string, enabled = true): TemplateResult =>
-  html`<button class="plain" type="button" aria-label="Remove ${what}" ?disabled=${!enabled} @click=${(event: Event) =>
-    requestEdit(event.target as HTMLElement, { change: removeItem(path, index, known(draft, path)) })}>remove</button>`;
+export const removeButton = (
+  draft: Draft,
+  path: string,
+  index: number,
+  what: string,
+  enabled = true,
+): TemplateResult =>
+  html`<button class="plain" type="button" aria-label="Remove ${what}" ?disabled=${!enabled} @click=${(
+    event: Event,
+  ) =>
+    requestEdit(event.target as HTMLElement, {
+      change: removeItem(path, index, known(draft, path)),
+    })}>remove</button>`;

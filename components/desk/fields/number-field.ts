@@ -1,10 +1,10 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { formatEntry } from '../../charts/format.js';
 import type { Draft } from '../../store/draft.js';
 import { faultAt, isAssumed, shownAt } from '../../store/draft.js';
-import { fieldSheet } from '../sheets/field-sheet.js';
 import type { Json } from '../../store/path.js';
+import { fieldSheet } from '../sheets/field-sheet.js';
 import { type CaseEdit, requestEdit } from './case-edit.js';
 import { faultNote } from './fault-note.js';
 import { readNumber } from './read-number.js';
@@ -72,7 +72,10 @@ export class NumberField extends LitElement {
   }
 
   private resize(input: HTMLInputElement) {
-    input.style.setProperty('--chars', String(Math.max(1, input.value.length || (this.empty ?? '').length)));
+    input.style.setProperty(
+      '--chars',
+      String(Math.max(1, input.value.length || (this.empty ?? '').length)),
+    );
   }
 
   override render() {

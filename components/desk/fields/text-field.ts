@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { Draft } from '../../store/draft.js';
 import { faultAt, shownAt } from '../../store/draft.js';

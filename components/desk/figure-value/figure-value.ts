@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { formatNumber } from '../../charts/format.js';
 import { quantity } from '../../charts/quantities.js';
@@ -78,15 +78,21 @@ export class FigureValue extends LitElement {
       :host([small]) .unit {
         font-size: inherit;
       }
-      :host([stale]) button,
-      :host([stale]) .ratio {
+      :host([stale]) button {
+        color: var(--soft);
+      }
+      :host([stale]) .ratio svg {
         opacity: 0.45;
       }
     `,
   ];
 
   private explain() {
-    const detail: ExplainRequest = { quantity: this.quantity, value: this.value, technique: this.technique };
+    const detail: ExplainRequest = {
+      quantity: this.quantity,
+      value: this.value,
+      technique: this.technique,
+    };
     this.dispatchEvent(new CustomEvent('explain', { detail, bubbles: true, composed: true }));
   }
 

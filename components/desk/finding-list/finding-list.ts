@@ -1,4 +1,4 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { Finding, Severity } from '../../../physics/results.js';
 
@@ -23,7 +23,7 @@ export class FindingList extends LitElement {
       line-height: 1.45;
     }
     :host([stale]) {
-      opacity: 0.45;
+      color: var(--soft);
     }
     ul {
       list-style: none;

@@ -6,7 +6,10 @@ import type { CaseEdit } from '../fields/case-edit.js';
 export const layerEdits = {
   thickness:
     (index: number) =>
-    (value: Json): CaseEdit => ({ joins: `layer ${index} thickness`, change: setLayerThickness(index, value) }),
+    (value: Json): CaseEdit => ({
+      joins: `layer ${index} thickness`,
+      change: setLayerThickness(index, value),
+    }),
   move: (index: number, by: -1 | 1): CaseEdit => ({ change: moveLayer(index, by) }),
   remove: (index: number): CaseEdit => ({ change: removeLayer(index) }),
   add: (below: number): CaseEdit => ({ change: addLayer(below) }),

@@ -1,4 +1,4 @@
-import { LitElement } from 'lit';
+import type { LitElement } from 'lit';
 import { type CaseEdit, requestEdit } from '../fields/case-edit.js';
 import { layerEdits } from './layer-edits.js';
 
@@ -25,7 +25,8 @@ export function layerKeys(from: LitElement, event: KeyboardEvent, index: number)
   setTimeout(() => {
     const all = [...(parent?.querySelectorAll<LitElement>(from.localName) ?? [])];
     const target = all[Math.min(all.length - 1, Math.max(0, index + step.to))];
-    const same = target?.renderRoot.querySelectorAll<LitElement>('[data-field]')[Math.max(0, field)];
+    const same =
+      target?.renderRoot.querySelectorAll<LitElement>('[data-field]')[Math.max(0, field)];
     same?.renderRoot.querySelector<HTMLElement>('input, select')?.focus();
   });
 }

@@ -1,10 +1,10 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { formatEntry } from '../../charts/format.js';
-import type { DeskModel } from '../model/desk-model.js';
 import { layerEdits } from '../layer-fields/layer-edits.js';
 import { layerKeys } from '../layer-fields/layer-keys.js';
 import { materialChoices } from '../layer-fields/material-choices.js';
+import type { DeskModel } from '../model/desk-model.js';
 import '../fields/choice-field.js';
 import '../fields/number-field.js';
 

@@ -1,5 +1,5 @@
-import type { ParsedCase } from '../../../physics/case/index.js';
 import type { AlongBeam } from '../../../physics/along-beam.js';
+import type { ParsedCase } from '../../../physics/case/index.js';
 import type { HoldConstant, Weighing } from '../../../physics/results.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
@@ -39,7 +39,10 @@ export function answering(evaluator: Evaluator, sink: AnswerSink): (question: Qu
 
   const weigh = latestWins(async (question: Question) => {
     await evaluator.load(question.parsed);
-    const [weighing, along] = await Promise.all([evaluator.weigh(question.size), evaluator.along(question.size)]);
+    const [weighing, along] = await Promise.all([
+      evaluator.weigh(question.size),
+      evaluator.along(question.size),
+    ]);
     return { weighing, along };
   });
   const scan = async (question: Question) => {

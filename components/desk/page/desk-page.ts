@@ -1,15 +1,15 @@
-import { LitElement, html, nothing } from 'lit';
+import { html, LitElement, nothing } from 'lit';
 import { customElement, property, query } from 'lit/decorators.js';
 import type { Fault } from '../../../physics/case/index.js';
-import type { Finding } from '../../../physics/results.js';
+import type { Evaluation, Finding } from '../../../physics/results.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
+import { marginColumns } from '../comparison-table/comparison-table.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
 import type { ExplainCard } from '../explain-card/explain-card.js';
 import type { ExplainRequest } from '../figure-value/figure-value.js';
-import { comparisonOf, evaluationOf, type DeskModel } from '../model/desk-model.js';
+import { comparisonOf, type DeskModel, evaluationOf } from '../model/desk-model.js';
 import type { Paper } from './paper.js';
 import { sectionInView } from './section-in-view.js';
-import { marginColumns } from '../comparison-table/comparison-table.js';
 import '../balance-section/balance-section.js';
 import '../beam-path/beam-path.js';
 import '../caution-footer/caution-footer.js';
@@ -30,18 +30,30 @@ const concerns = ({ left, right }: DeskModel, path = ''): boolean => {
   return technique === undefined || [left, right].includes(Number(technique));
 };
 
-/** What forbids the techniques shown at sizes other than the one looked at, each named. */
-const elsewhere = ({ others, draft, left, right }: DeskModel): Finding[] => {
-  const shown = [left, right].map((index) => (index === null ? null : draft.case.techniques[index].name));
-  return others.flatMap(({ evaluations }) =>
-    evaluations
-      .filter(({ technique }) => shown.includes(technique))
-      .flatMap(({ findings, size }) =>
-        findings
-          .filter(({ severity }) => severity === 'limit')
-          .map((finding) => ({ ...finding, message: `At size ${size}: ${finding.message}` })),
-      ),
+/** Findings of an evaluation, each saying whose it is; at another size than that looked at, also where. */
+const named = ({ technique, size, findings }: Evaluation, here: boolean): Finding[] =>
+  findings.map((finding) =>
+    here && finding.message.includes(technique)
+      ? finding
+      : {
+          ...finding,
+          message: `${technique}${here ? '' : `, size ${size}`}: ${lowerFirst(finding.message)}`,
+        },
   );
+
+const lowerFirst = (text: string): string =>
+  /^[A-Z][a-z]/.test(text) ? text[0].toLowerCase() + text.slice(1) : text;
+
+/** What forbids the techniques shown at sizes other than the one looked at. */
+const elsewhere = ({ others, draft, left, right }: DeskModel): Finding[] => {
+  const shown = [left, right].map((index) =>
+    index === null ? null : draft.case.techniques[index].name,
+  );
+  return others
+    .flatMap(({ evaluations }) => evaluations)
+    .filter(({ technique }) => shown.includes(technique))
+    .flatMap((evaluation) => named(evaluation, false))
+    .filter(({ severity }) => severity === 'limit');
 };
 
 /** The sections of the working paper that are built, in their order. */
@@ -73,7 +85,8 @@ export class DeskPage extends LitElement {
   @property({ type: Boolean }) canRedo = false;
   @property() status = '';
   @property() paper: Paper = 'auto';
-  @property({ attribute: false }) refused: { heading: string; faults: readonly Fault[] } | null = null;
+  @property({ attribute: false }) refused: { heading: string; faults: readonly Fault[] } | null =
+    null;
   @property() trouble = '';
   @property() here = '';
   @query('explain-card') private card!: ExplainCard;
@@ -105,8 +118,10 @@ export class DeskPage extends LitElement {
   private findings(): Finding[] {
     const { model } = this;
     return [
-      ...(evaluationOf(model, model.left)?.findings ?? []),
-      ...(evaluationOf(model, model.right)?.findings ?? []),
+      ...[model.left, model.right].flatMap((index) => {
+        const evaluation = evaluationOf(model, index);
+        return evaluation ? named(evaluation, true) : [];
+      }),
       ...(comparisonOf(model)?.rows ?? [])
         .filter(({ holdConstant }) => marginColumns.some(([hold]) => hold === holdConstant))
         .flatMap((row) => row.findings),
@@ -121,11 +136,13 @@ export class DeskPage extends LitElement {
     return html`<div class="head">
       <desk-header .model=${this.model} .sections=${sections} .here=${this.here} .examples=${this.examples}
         .canUndo=${this.canUndo} .canRedo=${this.canRedo} .status=${this.status} .paper=${this.paper}></desk-header>
-      ${this.refused
-        ? html`<fault-list closable .heading=${this.refused.heading} .faults=${this.refused.faults} @close=${() => {
-            this.refused = null;
-          }}></fault-list>`
-        : nothing}
+      ${
+        this.refused
+          ? html`<fault-list closable .heading=${this.refused.heading} .faults=${this.refused.faults} @close=${() => {
+              this.refused = null;
+            }}></fault-list>`
+          : nothing
+      }
       <fault-list .heading="${count}; results use the last good values in their place" .faults=${faults}></fault-list>
       ${this.trouble ? html`<p class="trouble" role="alert">${this.trouble}</p>` : nothing}
     </div>`;

@@ -8,12 +8,18 @@ export interface Example {
   readonly document: Json;
 }
 
-const found = import.meta.glob<Json>('../../examples/*.case.json', { eager: true, import: 'default' });
+const found = import.meta.glob<Json>('../../examples/*.case.json', {
+  eager: true,
+  import: 'default',
+});
 
 /** The worked cases in order of their file names, then a new case. */
 export const examples: readonly Example[] = [
   ...Object.entries(found)
     .sort(([a], [b]) => a.localeCompare(b))
-    .map(([path, document]) => ({ name: String(valueAtPath(document, 'title') || path), document })),
+    .map(([path, document]) => ({
+      name: String(valueAtPath(document, 'title') || path),
+      document,
+    })),
   { name: 'New case', document: newCase },
 ];

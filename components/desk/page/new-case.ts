@@ -24,6 +24,11 @@ export const newCase: Json = {
   },
   techniques: [
     { name: 'Current', potential_kV: 80, control: { detectorAirKerma_uGy: 2.5 } },
-    { name: 'Proposed', potential_kV: 70, filter: '0.2 Cu', control: { detectorAirKerma_uGy: 2.5 } },
+    {
+      name: 'Proposed',
+      potential_kV: 70,
+      filter: '0.2 Cu',
+      control: { detectorAirKerma_uGy: 2.5 },
+    },
   ],
 };

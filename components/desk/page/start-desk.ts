@@ -29,7 +29,12 @@ export async function startDesk(page: DeskPage): Promise<void> {
 
   const ask = answering(startEvaluator(makeEvaluationWorker), {
     answer: (answer, { revision }) => {
-      page.model = { ...page.model, ...answer, others: [], stale: revision !== store.state().revision };
+      page.model = {
+        ...page.model,
+        ...answer,
+        others: [],
+        stale: revision !== store.state().revision,
+      };
       page.trouble = '';
     },
     curve: (scan) => {
@@ -61,7 +66,9 @@ export async function startDesk(page: DeskPage): Promise<void> {
       along: page.model?.along ?? [],
       others: page.model?.others ?? [],
       stale: true,
-      sizeName: sizes.some(({ name }) => name === page.model?.sizeName) ? page.model.sizeName : usualSize(sizes),
+      sizeName: sizes.some(({ name }) => name === page.model?.sizeName)
+        ? page.model.sizeName
+        : usualSize(sizes),
       left: 0,
       right: techniques.length > 1 ? Math.min(Math.max(1, shown), techniques.length - 1) : null,
     };
@@ -69,7 +76,10 @@ export async function startDesk(page: DeskPage): Promise<void> {
     page.canRedo = canRedo;
     document.title = `${draft.case.title || 'Untitled case'} · Stratabeam`;
     clearTimeout(keeping);
-    keeping = setTimeout(() => autosave.keep({ document: draft.document, files: draft.files, fileName }), keepAfter_ms);
+    keeping = setTimeout(
+      () => autosave.keep({ document: draft.document, files: draft.files, fileName }),
+      keepAfter_ms,
+    );
     askAgain();
   };
   show(store.state());
@@ -88,7 +98,8 @@ export async function startDesk(page: DeskPage): Promise<void> {
   };
   const handed = async (files: readonly File[]) => {
     const got = await readHanded(files);
-    if (got.kind === 'case') openSheet({ document: got.sheet.document, files: { ...got.sheet.files } }, got.fileName);
+    if (got.kind === 'case')
+      openSheet({ document: got.sheet.document, files: { ...got.sheet.files } }, got.fileName);
     if (got.kind === 'tables') store.addFiles(got.files);
     if (got.kind === 'faults') refused(got.faults, got.fileName);
   };
@@ -153,7 +164,9 @@ function listenForKeys(commands: Record<DeskCommand, () => void | Promise<void>>
   addEventListener('keydown', (event) => {
     if (!(event.ctrlKey || event.metaKey) || event.altKey) return;
     const key = event.key.toLowerCase();
-    const name = { z: event.shiftKey ? 'redo' : 'undo', y: 'redo', s: 'save', o: 'open' }[key] as DeskCommand | undefined;
+    const name = { z: event.shiftKey ? 'redo' : 'undo', y: 'redo', s: 'save', o: 'open' }[key] as
+      | DeskCommand
+      | undefined;
     if (!name) return;
     event.preventDefault();
     void commands[name]();

@@ -1,4 +1,4 @@
-import { LitElement, css, html } from 'lit';
+import { css, html, LitElement } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { formatEntry } from '../../charts/format.js';
 import { renameLayer } from '../../store/layer-changes.js';
@@ -63,7 +63,7 @@ export class LayerRow extends LitElement {
       <span role="cell"><number-field data-field inline .draft=${draft} path="${path}.thickness_mm" label="Thickness of layer ${name}" unit="mm"
         .edit=${layerEdits.thickness(this.index)}></number-field></span>
       <span role="cell"><number-field data-field inline .draft=${draft} path="${path}.growthShare" label="Growth share of layer ${name}" unit="" step="0.1" empty="by thickness"></number-field></span>
-      <span role="cell">${formatEntry(Number((this.thickness_mm).toFixed(1)))} mm</span>
+      <span role="cell">${formatEntry(Number(this.thickness_mm.toFixed(1)))} mm</span>
       <span role="cell"><button class="plain" type="button" aria-label="Remove layer ${name}" ?disabled=${layers.length < 2}
         @click=${() => requestEdit(this, layerEdits.remove(this.index))}>remove</button></span>`;
   }

@@ -1,12 +1,12 @@
-import { LitElement, css, html, nothing } from 'lit';
+import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { formatEntry, formatPercent } from '../../charts/format.js';
+import { requestEdit } from '../fields/case-edit.js';
 import { fieldOf, numberSpec, textSpec } from '../fields/field-specs.js';
 import { addButton, removeButton } from '../fields/list-buttons.js';
-import { requestEdit } from '../fields/case-edit.js';
 import { layerEdits } from '../layer-fields/layer-edits.js';
-import { placed, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, placed } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import './layer-row.js';
 
@@ -54,18 +54,30 @@ export class PatientSection extends LitElement {
     const total = layers.reduce((sum, layer) => sum + layer.thickness_mm, 0);
     return html`<div class="wide">
       <h3>Layers, entrance to exit</h3>
-      <p class="note">${formatEntry(Number((total).toFixed(1)))} mm as drawn${stack ? html`, ${formatEntry(Number((stack.thickness_mm).toFixed(1)))} mm at size ${stack.sizeName}` : nothing}.
+      <p class="note">${formatEntry(Number(total.toFixed(1)))} mm as drawn${stack ? html`, ${formatEntry(Number(stack.thickness_mm.toFixed(1)))} mm at size ${stack.sizeName}` : nothing}.
         Alt with the up and down arrows moves a layer, Alt+Insert adds one below, Alt+Delete removes it.</p>
       <div class="scroll" tabindex="0" role="region" aria-label="Layers"><div class="rows" role="table" aria-label="Layers">
-        <div class="head" role="row">${['order', 'name', 'material', 'thickness', 'growth share', 'at this size', ''].map(
+        <div class="head" role="row">${[
+          'order',
+          'name',
+          'material',
+          'thickness',
+          'growth share',
+          'at this size',
+          '',
+        ].map(
           (heading) => html`<span role=${heading ? 'columnheader' : 'cell'}>${heading}</span>`,
         )}</div>
         ${layers.map(
-          (layer, i) => html`<layer-row role="row" .model=${this.model} .index=${i} .thickness_mm=${stack?.layers[i]?.thickness_mm ?? layer.thickness_mm}></layer-row>`,
+          (layer, i) =>
+            html`<layer-row role="row" .model=${this.model} .index=${i} .thickness_mm=${stack?.layers[i]?.thickness_mm ?? layer.thickness_mm}></layer-row>`,
         )}
       </div></div>
       <p class="after"><button class="plain" type="button" @click=${(event: Event) =>
-        requestEdit(event.target as HTMLElement, layerEdits.add(layers.length - 1))}>add a layer</button></p>
+        requestEdit(
+          event.target as HTMLElement,
+          layerEdits.add(layers.length - 1),
+        )}>add a layer</button></p>
     </div>`;
   }
 
@@ -74,13 +86,18 @@ export class PatientSection extends LitElement {
     const { sizes } = draft.case.patient;
     const shown = sizesOf(draft.case.patient);
     const total = shown.reduce((sum, size) => sum + size.weight, 0);
-    const fresh = { name: `size ${shown.length + 1}`, thickness_mm: Math.round((shown.at(-1)?.thickness_mm ?? 200) + 20), weight: 1 };
+    const fresh = {
+      name: `size ${shown.length + 1}`,
+      thickness_mm: Math.round((shown.at(-1)?.thickness_mm ?? 200) + 20),
+      weight: 1,
+    };
     const start = 'file' in sizes || sizes.length > 0 ? [] : [{ ...shown[0] }];
     return html`<div class="wide">
       <h3>Size mix</h3>
-      ${'file' in sizes || sizes.length === 0
-        ? html`<p class="note">One size: the layers as drawn.</p>`
-        : html`<table>
+      ${
+        'file' in sizes || sizes.length === 0
+          ? html`<p class="note">One size: the layers as drawn.</p>`
+          : html`<table>
             <thead><tr><th scope="col">name</th><th scope="col">thickness</th><th scope="col">weight</th><th scope="col">share</th><td></td></tr></thead>
             <tbody>${sizes.map((size, i) => {
               const at = `patient.sizes[${i}]`;
@@ -92,7 +109,8 @@ export class PatientSection extends LitElement {
                 <td><span class="bar" style="width:${(share * 8).toFixed(2)}rem"></span> ${formatPercent(share)}</td>
                 <td>${removeButton(draft, 'patient.sizes', i, `size ${size.name}`)}</td>
               </tr>`;
-            })}</tbody></table>`}
+            })}</tbody></table>`
+      }
       <p class="after">${addButton({ ...draft, case: { ...draft.case, patient: { ...draft.case.patient, sizes: start } } }, 'patient.sizes', fresh, 'a size')}</p>
     </div>`;
   }

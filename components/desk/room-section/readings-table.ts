@@ -5,7 +5,8 @@ import { choiceSpec, fieldOf, numberSpec } from '../fields/field-specs.js';
 import { addButton, removeButton } from '../fields/list-buttons.js';
 import type { DeskModel } from '../model/desk-model.js';
 
-const signed = (percent: number): string => `${percent > 0 ? '+' : ''}${formatNumber(percent, 2)} %`;
+const signed = (percent: number): string =>
+  `${percent > 0 ? '+' : ''}${formatNumber(percent, 2)} %`;
 
 /** The user's own measurements, which calibrate the model, each with what the model makes of it. */
 export function readingsTable({ draft, weighing }: DeskModel): TemplateResult {
@@ -13,7 +14,9 @@ export function readingsTable({ draft, weighing }: DeskModel): TemplateResult {
   const names = filters.map(({ name }) => name);
   const residual = (i: number, quantity: Residual['quantity']) => {
     const found = weighing?.calibration?.residuals.find(
-      (entry) => entry.quantity === quantity && (entry.path === `room.readings[${i}]` || entry.path.startsWith(`room.readings[${i}].`)),
+      (entry) =>
+        entry.quantity === quantity &&
+        (entry.path === `room.readings[${i}]` || entry.path.startsWith(`room.readings[${i}].`)),
     );
     return found ? `${formatNumber(found.model)} (${signed(found.relative_percent)})` : '–';
   };
@@ -32,12 +35,21 @@ export function readingsTable({ draft, weighing }: DeskModel): TemplateResult {
       <td>${removeButton(draft, 'room.readings', i, `reading ${i + 1}`)}</td>
     </tr>`;
   };
-  return html`${readings.length > 0
+  return html`${
+    readings.length > 0
       ? html`<div class="scroll" tabindex="0" role="region" aria-label="Readings"><table>
-          <thead><tr>${['potential', 'filter', 'half-value layer', 'model', 'air kerma', 'model', 'distance', 'uncertainty'].map(
-            (heading) => html`<th scope="col">${heading}</th>`,
-          )}<td></td></tr></thead>
+          <thead><tr>${[
+            'potential',
+            'filter',
+            'half-value layer',
+            'model',
+            'air kerma',
+            'model',
+            'distance',
+            'uncertainty',
+          ].map((heading) => html`<th scope="col">${heading}</th>`)}<td></td></tr></thead>
           <tbody>${readings.map((_, i) => row(i))}</tbody></table></div>`
-      : html`<p class="note">None entered: the tube is not calibrated to this room, and its output may be off by a third.</p>`}
+      : html`<p class="note">None entered: the tube is not calibrated to this room, and its output may be off by a third.</p>`
+  }
     <p class="after">${addButton(draft, 'room.readings', { potential_kV: 80, filter: names[0] ?? 'none', halfValueLayer_mmAl: null, airKerma_uGy_per_mAs: null }, 'a reading')}</p>`;
 }

@@ -1,4 +1,4 @@
-import { LitElement, html, nothing } from 'lit';
+import { html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { formatNumber } from '../../charts/format.js';
 import { requestEdit } from '../fields/case-edit.js';
@@ -7,7 +7,13 @@ import type { DeskModel } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import { filtersTable } from './filters-table.js';
 import { readingsTable } from './readings-table.js';
-import { detectorGroup, type FieldGroup, geometryGroup, gridGroup, tubeGroup } from './room-specs.js';
+import {
+  detectorGroup,
+  type FieldGroup,
+  geometryGroup,
+  gridGroup,
+  tubeGroup,
+} from './room-specs.js';
 import { rulesTable } from './rules-table.js';
 import { slabsTable } from './slabs-table.js';
 
@@ -32,16 +38,16 @@ export class RoomSection extends LitElement {
 
   private gridGroup() {
     const { draft } = this.model;
-    const fit = (value: null | { ratio: number; strips_per_cm: number }) => (event: Event) =>
+    const setGrid = (value: null | { ratio: number; strips_per_cm: number }) => (event: Event) =>
       requestEdit(event.target as HTMLElement, { path: 'room.grid', value });
     if (!draft.case.room.grid) {
       return html`<div><h3>Grid</h3><p class="note">No grid is fitted.</p>
-        <button class="plain" type="button" @click=${fit({ ratio: 10, strips_per_cm: 40 })}>fit a grid</button></div>`;
+        <button class="plain" type="button" @click=${setGrid({ ratio: 10, strips_per_cm: 40 })}>fit a grid</button></div>`;
     }
     return html`<div>
       <h3>Grid</h3>
       <div class="fields">${gridGroup.fields.map((spec) => fieldOf(draft, spec))}</div>
-      <p class="after"><button class="plain" type="button" @click=${fit(null)}>take the grid out of the room</button></p>
+      <p class="after"><button class="plain" type="button" @click=${setGrid(null)}>take the grid out of the room</button></p>
     </div>`;
   }
 

@@ -6,7 +6,12 @@ import { choiceSpec, fieldOf, numberSpec } from '../fields/field-specs.js';
 import { addButton, removeButton } from '../fields/list-buttons.js';
 
 /** A list of slabs, material and thickness, with rows to add and remove; `sided` adds the side. */
-export function slabsTable(draft: Draft, path: string, caption: string, sided = false): TemplateResult {
+export function slabsTable(
+  draft: Draft,
+  path: string,
+  caption: string,
+  sided = false,
+): TemplateResult {
   const slabs = valueAtPath(draft.case, path);
   const rows = Array.isArray(slabs) ? slabs : [];
   const row = (i: number) => {
@@ -19,9 +24,11 @@ export function slabsTable(draft: Draft, path: string, caption: string, sided = 
       <td>${removeButton(draft, path, i, what)}</td>
     </tr>`;
   };
-  return html`${rows.length > 0
+  return html`${
+    rows.length > 0
       ? html`<table><thead><tr><th scope="col">material</th><th scope="col">thickness</th>${sided ? html`<th scope="col">side</th>` : null}<td></td></tr></thead>
           <tbody>${rows.map((_, i) => row(i))}</tbody></table>`
-      : html`<p class="note">None.</p>`}
+      : html`<p class="note">None.</p>`
+  }
     <p class="after">${addButton(draft, path, { material: 'aluminium', thickness_mm: 1 }, 'a slab')}</p>`;
 }

@@ -49,8 +49,10 @@ export const chartSheet = css`
     fill: var(--ink);
     stroke: var(--paper);
   }
-  .stale,
-  .waiting {
+  .stale {
+    color: var(--soft);
+  }
+  .stale svg {
     opacity: 0.45;
   }
   .waiting {

@@ -1,11 +1,11 @@
-import { LitElement, html, nothing } from 'lit';
+import { html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { materialNames } from '../../../materials/index.js';
+import { formatNumber } from '../../charts/format.js';
 import type { Json } from '../../store/path.js';
 import { requestEdit } from '../fields/case-edit.js';
-import { choiceSpec, fieldOf, type FieldSpec, numberSpec } from '../fields/field-specs.js';
-import { formatNumber } from '../../charts/format.js';
-import { placed, type DeskModel } from '../model/desk-model.js';
+import { choiceSpec, type FieldSpec, fieldOf, numberSpec } from '../fields/field-specs.js';
+import { type DeskModel, placed } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import { agentChoices, amountUnits, detailShapes } from '../task-fields/detail-choices.js';
 
@@ -30,21 +30,42 @@ export class TaskSection extends LitElement {
     return [
       choiceSpec(`${detail}.shape`, 'Shape', detailShapes),
       choiceSpec(`${detail}.inLayer`, 'In layer', layers),
-      numberSpec(`${detail}.depthInLayer_mm`, 'Depth of its centre in the layer', 'mm', 5, 'middle'),
-      numberSpec(`${detail}.size_mm`, isVessel ? 'Diameter' : shape === 'coat' ? 'Thickness per wall' : 'Thickness along the beam', 'mm'),
+      numberSpec(
+        `${detail}.depthInLayer_mm`,
+        'Depth of its centre in the layer',
+        'mm',
+        5,
+        'middle',
+      ),
+      numberSpec(
+        `${detail}.size_mm`,
+        isVessel
+          ? 'Diameter'
+          : shape === 'coat'
+            ? 'Thickness per wall'
+            : 'Thickness along the beam',
+        'mm',
+      ),
       numberSpec(`${detail}.length_mm`, isVessel ? 'Length seen' : 'Length', 'mm'),
       ...(isVessel ? [] : [numberSpec(`${detail}.width_mm`, 'Width', 'mm', 1, 'as length')]),
-      ...(shape === 'coat' ? [choiceSpec(`${detail}.walls`, 'Walls coated', ['1', '2'], true)] : []),
-      ...(shape === 'insert' ? [choiceSpec(`${detail}.material`, 'Material of the insert', materialNames)] : []),
+      ...(shape === 'coat'
+        ? [choiceSpec(`${detail}.walls`, 'Walls coated', ['1', '2'], true)]
+        : []),
+      ...(shape === 'insert'
+        ? [choiceSpec(`${detail}.material`, 'Material of the insert', materialNames)]
+        : []),
       choiceSpec(`${detail}.reference`, 'Seen against', ['layer', ...materialNames]),
-      ...(isVessel ? [numberSpec(`${detail}.fillingFraction`, 'Filled share of the lumen', '', 0.05)] : []),
+      ...(isVessel
+        ? [numberSpec(`${detail}.fillingFraction`, 'Filled share of the lumen', '', 0.05)]
+        : []),
     ];
   }
 
   private agent() {
     const { draft } = this.model;
     const { agent } = draft.case.task.detail;
-    const set = (value: Json) => (event: Event) => requestEdit(event.target as HTMLElement, { path: `${detail}.agent`, value });
+    const set = (value: Json) => (event: Event) =>
+      requestEdit(event.target as HTMLElement, { path: `${detail}.agent`, value });
     if (!agent) {
       const iodine = { name: 'iodine', amount: { value: 100, unit: 'mg element/mL' } };
       return html`<div><h3>Agent</h3><p class="note">None: the detail is made of a material.</p>
@@ -59,10 +80,15 @@ export class TaskSection extends LitElement {
         ${fieldOf(draft, choiceSpec(`${detail}.agent.amount.unit`, 'Unit of the amount', amountUnits))}
         ${fieldOf(draft, choiceSpec(`${detail}.agent.carrier`, 'Carrier', materialNames))}
       </div>
-      ${found
-        ? html`<p class="note after">${formatNumber(found.elementConcentration_mg_per_mL)} mg ${found.element}/mL, areal density ${formatNumber(found.arealDensity_mg_per_cm2)} mg/cm² along the central path${
-            found.isInvestigational ? html`. <b>Investigational agent, not in clinical use.</b>` : nothing}</p>`
-        : nothing}
+      ${
+        found
+          ? html`<p class="note after">${formatNumber(found.elementConcentration_mg_per_mL)} mg ${found.element}/mL, areal density ${formatNumber(found.arealDensity_mg_per_cm2)} mg/cm² along the central path${
+              found.isInvestigational
+                ? html`. <b>Investigational agent, not in clinical use.</b>`
+                : nothing
+            }</p>`
+          : nothing
+      }
       <p class="after"><button class="plain" type="button" @click=${set(null)}>take the agent out</button></p>
     </div>`;
   }

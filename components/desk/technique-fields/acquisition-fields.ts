@@ -1,9 +1,12 @@
 import { html, nothing, type TemplateResult } from 'lit';
 import type { Acquisition } from '../../../physics/case/schema.js';
 import { fixedOfKind } from '../../store/technique-changes.js';
-import { evaluationOf, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, evaluationOf } from '../model/desk-model.js';
 
-const modes = ['radiography', 'fluoroscopy', 'subtraction'].map((mode) => ({ value: mode, words: mode }));
+const modes = ['radiography', 'fluoroscopy', 'subtraction'].map((mode) => ({
+  value: mode,
+  words: mode,
+}));
 const splits = [
   { value: 'shortest', words: 'shortest time' },
   { value: 'exposureTime_ms', words: 'time' },
@@ -11,7 +14,11 @@ const splits = [
 ];
 
 const splitOf = (fixed: Acquisition['fixed']): string =>
-  fixed === 'shortest' ? 'shortest' : 'exposureTime_ms' in fixed ? 'exposureTime_ms' : 'tubeCurrent_mA';
+  fixed === 'shortest'
+    ? 'shortest'
+    : 'exposureTime_ms' in fixed
+      ? 'exposureTime_ms'
+      : 'tubeCurrent_mA';
 
 /**
  * Mode, frames, rate, mask, and which of current and time is fixed, as one sentence with fields.
@@ -31,11 +38,15 @@ export function acquisitionFields(model: DeskModel, technique: number): Template
   return html`<span class="name">Acquisition</span>
     <span class="sentence"
       ><choice-field inline .draft=${draft} path="${path}.mode" label="Mode" .choices=${modes}></choice-field>,
-      ${field('frames', 'Frames')} ${acquisition.frames === 1 ? 'frame' : 'frames'}${acquisition.mode === 'radiography'
-        ? nothing
-        : html` at ${field('frameRate_per_s', 'Frame rate', '/s')}`}${acquisition.mode === 'subtraction'
-        ? html`, ${field('maskFrames', 'Mask frames')} mask`
-        : nothing};
+      ${field('frames', 'Frames')} ${acquisition.frames === 1 ? 'frame' : 'frames'}${
+        acquisition.mode === 'radiography'
+          ? nothing
+          : html` at ${field('frameRate_per_s', 'Frame rate', '/s')}`
+      }${
+        acquisition.mode === 'subtraction'
+          ? html`, ${field('maskFrames', 'Mask frames')} mask`
+          : nothing
+      };
       fixed
       <choice-field inline .draft=${draft} path="${path}.fixed" label="Fixed" .value=${split} .choices=${splits}
         .toJson=${(chosen: string) => fixedOfKind(chosen, start[chosen] ?? 1)}></choice-field>

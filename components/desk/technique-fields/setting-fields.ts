@@ -1,7 +1,7 @@
 import { html, type TemplateResult } from 'lit';
 import { quantity } from '../../charts/quantities.js';
 import { renameTechnique } from '../../store/technique-changes.js';
-import { evaluationOf, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, evaluationOf } from '../model/desk-model.js';
 
 const number = (model: DeskModel, technique: number, id: string): TemplateResult => {
   const evaluation = evaluationOf(model, technique);
@@ -15,16 +15,23 @@ export function techniqueName(model: DeskModel, technique: number): TemplateResu
   const choosable = technique !== model.left && techniques.length > 2;
   const choose = (event: Event) => {
     const detail = Number((event.target as HTMLSelectElement).value);
-    event.target?.dispatchEvent(new CustomEvent('show-technique', { detail, bubbles: true, composed: true }));
+    event.target?.dispatchEvent(
+      new CustomEvent('show-technique', { detail, bubbles: true, composed: true }),
+    );
   };
   return html`<h2 class="technique">
       <text-field inline .draft=${model.draft} path="techniques[${technique}].name" label="Name of technique ${technique + 1}"
         .edit=${(name: string) => ({ change: renameTechnique(technique, name) })}></text-field>
     </h2>
-    ${choosable
-      ? html`<label class="switch">shown <select @change=${choose}>${techniques.map((entry, i) =>
-          i === model.left ? null : html`<option value=${i} ?selected=${i === technique}>${entry.name}</option>`)}</select></label>`
-      : null}`;
+    ${
+      choosable
+        ? html`<label class="switch">shown <select @change=${choose}>${techniques.map((entry, i) =>
+            i === model.left
+              ? null
+              : html`<option value=${i} ?selected=${i === technique}>${entry.name}</option>`,
+          )}</select></label>`
+        : null
+    }`;
 }
 
 /** Potential, typed in place. */

@@ -1,15 +1,25 @@
-import { LitElement, css, html } from 'lit';
+import { css, html, LitElement } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { formatRatio } from '../../charts/format.js';
 import { techniqueInk } from '../../charts/inks.js';
-import { quantities, type Quantity, type QuantityGroup, quantityGroups } from '../../charts/quantities.js';
+import {
+  type Quantity,
+  type QuantityGroup,
+  quantities,
+  quantityGroups,
+} from '../../charts/quantities.js';
 import { addTechnique, removeTechnique } from '../../store/technique-changes.js';
 import { requestEdit } from '../fields/case-edit.js';
-import { evaluationOf, sizeShown, type DeskModel } from '../model/desk-model.js';
+import { type DeskModel, evaluationOf, sizeShown } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import { acquisitionFields } from '../technique-fields/acquisition-fields.js';
 import { controlFields } from '../technique-fields/control-fields.js';
-import { gridField, potentialField, filterField, techniqueName } from '../technique-fields/setting-fields.js';
+import {
+  filterField,
+  gridField,
+  potentialField,
+  techniqueName,
+} from '../technique-fields/setting-fields.js';
 import '../figure-value/figure-value.js';
 
 /**
@@ -66,7 +76,8 @@ export class TechniquesSection extends LitElement {
 
   private setRow(label: string, content: (model: DeskModel, technique: number) => unknown) {
     return html`<tr><th scope="row">${label}</th>${this.model.draft.case.techniques.map(
-      (_, i) => html`<td class="set" style="--field-ink:${techniqueInk(i).color}">${content(this.model, i)}</td>`,
+      (_, i) =>
+        html`<td class="set" style="--field-ink:${techniqueInk(i).color}">${content(this.model, i)}</td>`,
     )}</tr>`;
   }
 
@@ -79,14 +90,22 @@ export class TechniquesSection extends LitElement {
     if (values.every((value) => value === null)) return null;
     const [base] = values;
     return html`<tr><th scope="row">${entry.name}${entry.per ? `, ${entry.per}` : ''}</th>${values.map(
-      (value, i) => html`<td style="--field-ink:${techniqueInk(i).color}"><figure-value small quantity=${entry.id} .value=${value} ?stale=${model.stale}
+      (
+        value,
+        i,
+      ) => html`<td style="--field-ink:${techniqueInk(i).color}"><figure-value small quantity=${entry.id} .value=${value} ?stale=${model.stale}
           technique=${model.draft.case.techniques[i].name}></figure-value>${
-            i > 0 && base && value !== null ? html`<span class="ratio">${formatRatio(value / base)}</span>` : null}</td>`,
+            i > 0 && base && value !== null
+              ? html`<span class="ratio">${formatRatio(value / base)}</span>`
+              : null
+          }</td>`,
     )}</tr>`;
   }
 
   private results(group: QuantityGroup) {
-    const rows = quantities.filter((entry) => entry.group === group).map((entry) => this.quantityRow(entry));
+    const rows = quantities
+      .filter((entry) => entry.group === group)
+      .map((entry) => this.quantityRow(entry));
     if (rows.every((row) => row === null)) return null;
     return html`<table>
       <thead><tr><th scope="col">${group}</th>${this.model.draft.case.techniques.map(
@@ -98,7 +117,8 @@ export class TechniquesSection extends LitElement {
 
   override render() {
     const { techniques } = this.model.draft.case;
-    const ask = (change: ReturnType<typeof addTechnique>) => (event: Event) => requestEdit(event.target as HTMLElement, { change });
+    const ask = (change: ReturnType<typeof addTechnique>) => (event: Event) =>
+      requestEdit(event.target as HTMLElement, { change });
     return html`<section aria-labelledby="heading">
       <h2 id="heading">Techniques</h2>
       <div>
@@ -109,9 +129,11 @@ export class TechniquesSection extends LitElement {
             ${this.setRow('Potential', potentialField)} ${this.setRow('Filter, half-value layer', filterField)}
             ${this.setRow('Grid, Bucky factor', gridField)} ${this.setRow('Control holds, per frame', controlFields)}
             ${this.setRow('Acquisition', acquisitionFields)}
-            <tr><td></td>${techniques.map((technique, i) => html`<td>
+            <tr><td></td>${techniques.map(
+              (technique, i) => html`<td>
               <button class="plain" type="button" @click=${ask(addTechnique(i))} aria-label="Copy ${technique.name} as a new technique">copy</button>
-              <button class="plain" type="button" ?disabled=${techniques.length < 2} @click=${ask(removeTechnique(i))} aria-label="Remove ${technique.name}">remove</button></td>`)}</tr>
+              <button class="plain" type="button" ?disabled=${techniques.length < 2} @click=${ask(removeTechnique(i))} aria-label="Remove ${technique.name}">remove</button></td>`,
+            )}</tr>
           </tbody>
         </table></div>
         <div class="results">${quantityGroups.map((group) => this.results(group))}</div>

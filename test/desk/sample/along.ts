@@ -8,10 +8,14 @@ const along = (technique: string, photons: number, peak_keV: number): AlongBeam 
     technique,
     size: 'median',
     distances_mm,
-    primaryFluence_per_mm2: distances_mm.map((d) => photons * (848 / d) ** 2 * Math.exp(-0.022 * Math.min(202, d - 848))),
+    primaryFluence_per_mm2: distances_mm.map(
+      (d) => photons * (848 / d) ** 2 * Math.exp(-0.022 * Math.min(202, d - 848)),
+    ),
     atDetail: {
       energies_keV,
-      fluence_per_mm2_per_keV: energies_keV.map((e) => (photons / 300) * Math.exp(-(((e - peak_keV) / 12) ** 2))),
+      fluence_per_mm2_per_keV: energies_keV.map(
+        (e) => (photons / 300) * Math.exp(-(((e - peak_keV) / 12) ** 2)),
+      ),
       lines: [{ energy_keV: 59.3, fluence_per_mm2: photons / 90 }],
     },
     kEdges: [{ element: 'I', energy_keV: 33.17 }],

@@ -27,7 +27,9 @@ const setting = (potential_kV: number, filter: string, hardness: number): SweepS
       halfValueLayer_mmAl: 3,
       elementMass_g: 0.03,
     },
-    findings: isBeyond ? [{ code: 'power', severity: 'limit', message: 'Invented: beyond the tube.' }] : [],
+    findings: isBeyond
+      ? [{ code: 'power', severity: 'limit', message: 'Invented: beyond the tube.' }]
+      : [],
   };
 };
 

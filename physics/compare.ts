@@ -109,6 +109,9 @@ const compareRow = (
   return { holdConstant, ratio: ratiosOf(value, base), findings: [] };
 };
 
+/** Conditions under which a lower dose is reported as a saving. */
+const claimsSaving: readonly HoldConstant[] = ['asSet', 'detectorAirKerma', 'detectorSignal'];
+
 /**
  * A dose that falls as set while SdNR falls too has not been shown to be a saving: the equalities
  * disagree on who wins, and the row says so.
@@ -122,7 +125,9 @@ const withDisagreement = (
     rows.find((row) => row.holdConstant === 'sdnr')?.ratio.incidentAirKerma ?? null;
   return rows.map((row) => {
     const { incidentAirKerma, sdnr } = row.ratio;
-    if (row.holdConstant === 'sdnr' || incidentAirKerma === null || sdnr === null) return row;
+    if (!claimsSaving.includes(row.holdConstant) || incidentAirKerma === null || sdnr === null) {
+      return row;
+    }
     const findings: Finding[] = [];
     if (incidentAirKerma < 1 && (atEqualSdnr === null || atEqualSdnr > 1)) {
       const otherwise =

@@ -97,36 +97,47 @@ function rightWishes(scene: StackScene, layout: StackLayout): Wish[] {
   ];
 }
 
+const isBeside = (a: PlacedLabel, b: PlacedLabel): boolean =>
+  a.left + width_px(a.words) <= b.left || b.left + width_px(b.words) <= a.left;
+
+/** Moves a label down past all it would stand on. */
+function clear(label: PlacedLabel, others: readonly PlacedLabel[]): PlacedLabel {
+  const inTheWay = others.filter((other) => !isBeside(label, other)).sort((a, b) => a.top - b.top);
+  let { top } = label;
+  for (const other of inTheWay) {
+    if (top < other.top + labelHeight_px && other.top < top + labelHeight_px) {
+      top = other.top + labelHeight_px;
+    }
+  }
+  return top === label.top ? label : { ...label, top, leads: true };
+}
+
 /** All labels of a view, none on another; those far from what they name lead there by a line. */
 export function stackLabels(scene: StackScene, layout: StackLayout, view: View): PlacedLabel[] {
   const tilt = Math.cos((view.elevation_deg * Math.PI) / 180);
   if (tilt < leastTilt) return [];
   const p = projection(view, layout);
-  return [leftWishes(scene, layout, tilt, view.zoom), rightWishes(scene, layout)].flatMap(
-    (column) => {
-      const placed = column
-        .map((wish) => ({ ...wish, anchor: onPage(p, wish.at) }))
-        .filter(
-          ({ anchor: [x, y] }) =>
-            x > -200 && x < layout.width_px && y > -20 && y < layout.height_px + 20,
-        )
-        .sort((a, b) => a.anchor[1] + a.dy - b.anchor[1] - b.dy);
-      const tops = placeAlong(
-        placed.map(({ anchor, dy }) => ({ anchor: anchor[1] + dy, height: labelHeight_px })),
-        0,
-        layout.height_px,
-      );
-      return placed.map(({ id, words, anchor, dx, dy }, i): PlacedLabel => {
-        const moved = Math.abs(tops[i] + labelHeight_px / 2 - anchor[1] - dy) > own_px;
-        return {
-          id,
-          words,
-          anchor,
-          left: Math.max(2, Math.min(anchor[0] + dx, layout.width_px - width_px(words))),
-          top: tops[i],
-          leads: moved || id === 'detail',
-        };
-      });
-    },
-  );
+  const onColumn = (wishes: readonly Wish[]): PlacedLabel[] => {
+    const placed = wishes
+      .map((wish) => ({ ...wish, anchor: onPage(p, wish.at) }))
+      .filter(
+        ({ anchor: [x, y] }) =>
+          x > -layout.width_px / 2 && x < layout.width_px && y > 0 && y < layout.height_px,
+      )
+      .sort((a, b) => a.anchor[1] + a.dy - b.anchor[1] - b.dy);
+    const tops = placeAlong(
+      placed.map(({ anchor, dy }) => ({ anchor: anchor[1] + dy, height: labelHeight_px })),
+      0,
+      layout.height_px,
+    );
+    return placed.map(({ id, words, anchor, dx, dy }, i) => {
+      const moved = Math.abs(tops[i] + labelHeight_px / 2 - anchor[1] - dy) > own_px;
+      const widest = layout.width_px - width_px(words);
+      const left = Math.max(2, Math.min(anchor[0] + dx, widest));
+      return { id, words, anchor, left, top: tops[i], leads: moved || id === 'detail' };
+    });
+  };
+  const labels = onColumn(leftWishes(scene, layout, tilt, view.zoom));
+  for (const label of onColumn(rightWishes(scene, layout))) labels.push(clear(label, labels));
+  return labels;
 }

@@ -24,16 +24,21 @@ const ramp = (id: string, color: string, y: number, ink: InkScale) => svg`
   </linearGradient>
   <rect x="0" y=${y} width=${width} height=${bar} fill="url(#${id})" />`;
 
+/** What is not to scale: `to scale; free air shortened 5.6 times above, 1.5 below`. */
+export function scaleWords({ shortened, skin }: StackLayout): string {
+  if (shortened.length === 0) return 'to scale';
+  const parts = shortened.map(({ at, factor }, i) => {
+    const times = `${formatNumber(factor, 2)}${i === 0 ? ' times' : ''}`;
+    return `${times} ${at < skin ? 'above' : 'below'}`;
+  });
+  return `to scale; free air shortened ${parts.join(', ')}`;
+}
+
 /** What the ink means: the quantity, its unit, the scale of both techniques, and what is not to scale. */
-export function stackLegend(scene: StackScene, layout: StackLayout): TemplateResult {
+export function stackLegend(scene: StackScene, layout: StackLayout | null): TemplateResult {
   const shading = shownShading(scene);
   const ink = inkScale(shading);
   const text = ink.scale === 'log' ? raisedPower : (value: number) => formatNumber(value, 2);
-  const air = layout.shortened.find(({ at }) => at < layout.skin);
-  const notes = [
-    ink.scale === 'log' ? 'log scale' : 'linear scale',
-    air ? `to scale but for air, shortened ${formatNumber(air.factor, 2)} times` : 'to scale',
-  ];
   return html`<div class="legend" part="legend">
     ${
       ink.most > 0
@@ -47,6 +52,7 @@ export function stackLegend(scene: StackScene, layout: StackLayout): TemplateRes
         </svg>`
         : nothing
     }
-    <span>ink: ${[shading.quantity, shading.unit].filter(Boolean).join(', ')} · ${notes.join(' · ')}</span>
-  </div>`;
+    <span>ink: ${[shading.quantity, shading.unit].filter(Boolean).join(', ')}, ${ink.scale} scale</span>
+  </div>
+  <div class="scale">${layout ? scaleWords(layout) : 'to scale'}</div>`;
 }

@@ -1,5 +1,6 @@
 import { namedMaterial } from '../../../materials/index.js';
 import type { AlongBeam } from '../../../physics/along-beam.js';
+import type { Detail } from '../../../physics/case/schema.js';
 import type { Stack, StackLayer } from '../../../physics/stack/stack.js';
 import type {
   DepthProfile,
@@ -43,6 +44,14 @@ function techniqueOf({ draft }: DeskModel, index: number): SceneTechnique {
   const { name, filter, grid } = draft.case.techniques[index];
   const layers = draft.case.room.filters.find((entry) => entry.name === filter)?.layers ?? [];
   return { name, filter: layers.length > 0 ? { label: filter } : null, isGridIn: grid === 'in' };
+}
+
+/** `6 mm vessel, iodine 120 mg element/mL`. */
+function detailLabel({ shape, agent }: Detail, height_mm: number): string {
+  const filled = agent
+    ? `, ${agent.name} ${formatEntry(agent.amount.value)} ${agent.amount.unit}`
+    : '';
+  return `${formatEntry(Number(height_mm.toPrecision(4)))} mm ${shape}${filled}`;
 }
 
 const made = new WeakMap<DeskModel, StackScene | null>();
@@ -89,7 +98,7 @@ function sceneOf(model: DeskModel): StackScene | null {
           ? task.detail.length_mm
           : (task.detail.width_mm ?? task.detail.length_mm),
       isAbsence: detail.shape === 'defect',
-      label: task.detail.shape,
+      label: detailLabel(task.detail, detail.central.displaced_mm),
     },
     grid: room.grid && { label: `grid ${formatEntry(room.grid.ratio)}:1` },
     detector: { label: namedMaterial(room.detector.material)?.name ?? room.detector.material },

@@ -1,10 +1,14 @@
 import { html, nothing, type TemplateResult } from 'lit';
 import type { Shading, StackScene } from '../../../scenes/stack-scene-data.js';
-import { formatNumber } from '../../charts/format.js';
+import { formatEntry, formatNumber } from '../../charts/format.js';
 import { stackRows } from './stack-rows.js';
 import { trackWords } from './track-words.js';
 
 const unitOf = ({ unit }: Shading): string => (unit ? `, ${unit}` : '');
+
+/** A length as it is written, to a tenth of a percent at most: 170, 2, −2. */
+const length = (value_mm: number | null): string =>
+  value_mm === null ? '–' : formatEntry(Number(value_mm.toPrecision(4))).replace('-', '−');
 
 /** The drawing in numbers: layer, material, thickness, depth, and what reaches it. */
 export function stackTable(scene: StackScene): TemplateResult {
@@ -20,7 +24,7 @@ export function stackTable(scene: StackScene): TemplateResult {
       <caption>
         From the focal spot down. ${settings}. Skin at ${formatNumber(scene.sourceToSkin_mm)} mm, detector
         at ${formatNumber(scene.sourceToDetector_mm)} mm from the focal spot. Depths are of the entrance
-        face below the skin, of the centre for the detail.
+        face below the skin, of the centre for the detail. Filter, support, grid and detector are drawn thicker than they are.
       </caption>
       <thead>
         <tr>
@@ -41,8 +45,8 @@ export function stackTable(scene: StackScene): TemplateResult {
           (row) => html`<tr>
             <th scope="row">${row.name}</th>
             <td class="words">${row.material}</td>
-            <td>${formatNumber(row.thickness_mm)}</td>
-            <td>${formatNumber(row.depth_mm)}</td>
+            <td>${length(row.thickness_mm)}</td>
+            <td>${length(row.depth_mm)}</td>
             ${[...row.primary, ...row.chosen].map((value) => html`<td>${formatNumber(value)}</td>`)}
           </tr>`,
         )}

@@ -26,7 +26,7 @@ export const stackViewSheet = css`
   .stage:focus-visible,
   button:focus-visible,
   summary:focus-visible {
-    outline: 2px solid var(--ink);
+    outline: 2px solid var(--soft);
     outline-offset: -2px;
   }
   .place,
@@ -86,6 +86,11 @@ export const stackViewSheet = css`
     flex: 1 1 100%;
     align-items: flex-start;
     gap: 0.7rem;
+    min-height: 2.6em;
+  }
+  .scale {
+    flex: 1 1 100%;
+    white-space: nowrap;
   }
   .legend svg {
     flex: none;

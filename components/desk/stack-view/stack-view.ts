@@ -67,7 +67,8 @@ export class StackView extends LitElement {
   private listening = new AbortController();
   private move = 0;
   private pause = 0;
-  private readonly watcher = new ResizeObserver(() => this.measure());
+  // A frame later: the words below, drawn in answer, may change the stage's size once more.
+  private readonly watcher = new ResizeObserver(() => requestAnimationFrame(() => this.measure()));
 
   /** Frames the 3D drawing has taken so far; it takes none at rest. */
   get frames(): number {
@@ -243,7 +244,7 @@ export class StackView extends LitElement {
       ${labels.map(this.label)}`;
   }
 
-  private foot(scene: StackScene, layout: StackLayout) {
+  private foot(scene: StackScene, layout: StackLayout | null) {
     return html`<div class="foot">
       ${stackLegend(scene, layout)}
       <div class="views" part="views" role="group" aria-label="Views">
@@ -268,7 +269,7 @@ export class StackView extends LitElement {
       </div>
       <p class="unseen" id="keys">${keyWords}</p>
       <p class="unseen" role="status">${this.announced}</p>
-      ${scene && layout ? this.foot(scene, layout) : nothing}`;
+      ${scene ? this.foot(scene, layout) : nothing}`;
   }
 }
 

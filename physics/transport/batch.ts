@@ -37,6 +37,7 @@ export function transportBatch(
     absorbed_keV: scores.subarray(layout.absorbed, layout.escaped),
     escaped_keV: scores.subarray(layout.escaped, layout.escaped + escapeCount),
     crossings,
+    everyEnd: false,
     collisions,
   });
   drain(crossings);

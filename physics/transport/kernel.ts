@@ -33,7 +33,10 @@ export interface KernelOutput {
   readonly absorbed_keV: Float64Array;
   /** Energy that ended at each face (`faces` order), scattered photons, and unscattered last, keV. */
   readonly escaped_keV: Float64Array;
+  /** Scattered photons at the detector and backwards through the skin. */
   readonly crossings: EventBuffer;
+  /** Report the end of every photon that leaves, at whatever face, scattered or not. */
+  readonly everyEnd: boolean;
   readonly collisions: EventBuffer | null;
 }
 
@@ -62,7 +65,7 @@ export function flyPhotons(
   const { attenuation_per_cm, comptonShare, scatterShare } = matter;
   const { comptonCosines, rayleighCosines, fluorescence } = matter;
   const { firstEmitter } = fluorescence;
-  const { absorbed_keV, escaped_keV, crossings, collisions } = output;
+  const { absorbed_keV, escaped_keV, crossings, collisions, everyEnd } = output;
   const lastSlab = slabMatter.length - 1;
   const photon = new Float64Array(flightLength);
   const where = new Int32Array(placeLength);
@@ -151,8 +154,10 @@ export function flyPhotons(
       }
 
       if (ended !== face.none) {
-        setFlight(photon, x, y, z, u, v, w, energy, lastZ);
-        recordCrossing(crossings, photon, ended, past, number);
+        if (everyEnd || (ended === face.detector && past !== history.primary)) {
+          setFlight(photon, x, y, z, u, v, w, energy, lastZ);
+          recordCrossing(crossings, photon, ended, past, number);
+        }
         escaped_keV[past === history.primary ? unscattered : ended] += energy;
         break;
       }

@@ -1,5 +1,5 @@
 import { airKermaAt } from './air-kerma.js';
-import { crossing, crossingLength, type EventBuffer, face, history } from './events.js';
+import { crossing, crossingLength, type EventBuffer, face } from './events.js';
 import { flightLength } from './flight.js';
 import { fluenceWeight, quantityCount, type ResponseTable, respond } from './response-table.js';
 import { componentCount, type ScoreLayout, scatterAt } from './score-layout.js';
@@ -35,7 +35,6 @@ export function displacementScorer(
   return (values, end) => {
     for (let at = 0; at < end; at += crossingLength) {
       const past = values[at + crossing.history];
-      if (past === history.primary) continue;
       const x = values[at + crossing.x];
       const y = values[at + crossing.y];
       const w = values[at + crossing.w];

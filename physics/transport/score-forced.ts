@@ -149,7 +149,6 @@ export function nearScorer(target: ForcedTarget): EventBuffer['take'] {
   return (values, end) => {
     for (let at = 0; at < end; at += crossingLength) {
       const past = values[at + crossing.history];
-      if (past === history.primary) continue;
       const which = values[at + crossing.face];
       const w = values[at + crossing.w];
       const energy_keV = values[at + crossing.energy];

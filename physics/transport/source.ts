@@ -72,9 +72,12 @@ export function startPhoton(
     startFromPoint(source, firstPlane_cm, stream, photon);
     return;
   }
-  const [halfX, halfY] = source.kind === 'pencil' ? [0, 0] : source.halfField_cm;
-  photon[flight.x] = halfX * (2 * nextUniform(stream) - 1);
-  photon[flight.y] = halfY * (2 * nextUniform(stream) - 1);
+  photon[flight.x] = 0;
+  photon[flight.y] = 0;
+  if (source.kind === 'parallel') {
+    photon[flight.x] = source.halfField_cm[0] * (2 * nextUniform(stream) - 1);
+    photon[flight.y] = source.halfField_cm[1] * (2 * nextUniform(stream) - 1);
+  }
   photon[flight.z] = firstPlane_cm;
   photon[flight.u] = 0;
   photon[flight.v] = 0;

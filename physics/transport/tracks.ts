@@ -77,6 +77,7 @@ export function recordTracks(input: TransportInput, count: number): Track[] {
     absorbed_keV: new Float64Array(regionCount(input.geometry)),
     escaped_keV: new Float64Array(escapeCount),
     crossings,
+    everyEnd: true,
     collisions,
   });
   drain(crossings);

@@ -55,7 +55,7 @@ export function flyScatterRows(
     const widths_mm = group.map(({ field_cm }) => field_cm * 10);
     const slab = named(material);
     const depth = slab.density_g_per_cm3 * thickness_cm * massAttenuation(slab, energy_keV);
-    const more = Math.max(1, Math.exp(depth - 4));
+    const more = Math.max(1, Math.exp(1.4 * (depth - 4)));
     const run = { photons: Math.round(photons * more), seed: seed + i };
     const stack = slabStack([[slab, thickness_cm]]);
     const { input, scores } = flyThrough(stack, energy_keV, run, { fieldWidths_mm: widths_mm });

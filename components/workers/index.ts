@@ -4,4 +4,7 @@ export { type EvaluationHost, evaluationHost } from './evaluation-host.js';
 export { type Evaluator, startEvaluator, WorkerLost } from './evaluator.js';
 export { latestWins, superseded } from './latest-wins.js';
 export { makeEvaluationWorker } from './make-evaluation-worker.js';
+export { makeTransportWorker } from './make-transport-worker.js';
 export { type ScanRequest, scanSlice } from './scan-slice.js';
+export type { TransportWorker } from './transport-messages.js';
+export { type TransportPool, type TransportProgress, transportPool } from './transport-pool.js';

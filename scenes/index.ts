@@ -10,5 +10,6 @@ export * from './stack-anchors.js';
 export * from './stack-layout.js';
 export * from './stack-picture.js';
 export * from './stack-scene-data.js';
+export * from './step-profile.js';
 export * from './view.js';
 export * from './view-presets.js';

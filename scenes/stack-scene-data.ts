@@ -45,8 +45,11 @@ export interface Shading {
   readonly perTechnique: readonly (DepthProfile | null)[];
 }
 
-/** What happened to the photon at the start of a piece of its path; `absorbed` marks a point. */
-export const trackKinds = ['primary', 'compton', 'rayleigh', 'absorbed'] as const;
+/**
+ * What happened to the photon at the start of a piece of its path: nothing yet, scatter, or that it
+ * was born by fluorescence. `absorbed` marks a point.
+ */
+export const trackKinds = ['primary', 'compton', 'rayleigh', 'absorbed', 'fluorescence'] as const;
 export type TrackKind = (typeof trackKinds)[number];
 
 /** Photon paths of one technique as straight pieces. */

@@ -9,6 +9,7 @@ export const trackPens: Record<TrackKind, Omit<Pen, 'ink'>> = {
   primary: { width_px: 0.7, opacity: 0.4, over: true },
   compton: { width_px: 1, opacity: 0.6, over: true },
   rayleigh: { width_px: 1.1, opacity: 0.7, dash: [1.5, 2.5], over: true },
+  fluorescence: { width_px: 1, opacity: 0.7, dash: [5, 3], over: true },
   absorbed: { width_px: 3.6, opacity: 1, over: true },
 };
 

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { trackStrokes } from '../../scenes/drawing/track-strokes.js';
+import { trackPens, trackStrokes } from '../../scenes/drawing/track-strokes.js';
 import { rgbOf, type Shading, stackDrawing, stackLayout, trackKinds } from '../../scenes/index.js';
 import { sampleScene, sampleTracks } from './sample.js';
 
@@ -122,7 +122,9 @@ describe('photon tracks', () => {
   });
 
   test('kinds differ in weight or dash, and an absorption is a point', () => {
-    const looks = strokes.map(({ pen }) => `${pen.width_px} ${pen.dash ?? ''}`);
+    const looks = trackKinds.map(
+      (kind) => `${trackPens[kind].width_px} ${trackPens[kind].dash ?? ''}`,
+    );
     expect(new Set(looks).size).toBe(trackKinds.length);
     const absorbed = strokes.at(-1);
     expect(absorbed?.from).toEqual(absorbed?.to);

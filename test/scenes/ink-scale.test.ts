@@ -7,6 +7,7 @@ import {
   inkTicks,
   type Shading,
   stackLayout,
+  stepProfile,
   valueAt,
 } from '../../scenes/index.js';
 import { sampleScene } from './sample.js';
@@ -88,6 +89,14 @@ describe('a value between two depths', () => {
 
   test('runs straight to a zero', () => {
     expect(valueAt({ depths_mm: [0, 10], values: [8, 0] }, 5)).toBe(4);
+  });
+});
+
+describe('a quantity of whole layers', () => {
+  test('keeps its value through each layer and steps at their faces', () => {
+    const profile = stepProfile([0, 20, 190, 200], [3, 1, 8]);
+    expect([5, 100, 195].map((depth) => valueAt(profile, depth))).toEqual([3, 1, 8]);
+    expect(valueAt(profile, 200.5)).toBeNull();
   });
 });
 

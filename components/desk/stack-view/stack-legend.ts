@@ -2,7 +2,7 @@ import { html, nothing, svg, type TemplateResult } from 'lit';
 import { shownShading } from '../../../scenes/drawing/stack-drawing.js';
 import { type InkScale, inkScale, inkTicks } from '../../../scenes/ink-scale.js';
 import type { StackLayout } from '../../../scenes/stack-layout.js';
-import type { StackScene } from '../../../scenes/stack-scene-data.js';
+import type { Shading, StackScene } from '../../../scenes/stack-scene-data.js';
 import { formatNumber } from '../../charts/format.js';
 import { raisedPower } from './tick-text.js';
 
@@ -34,25 +34,50 @@ export function scaleWords({ shortened, skin }: StackLayout): string {
   return `to scale; free air shortened ${parts.join(', ')}`;
 }
 
-/** What the ink means: the quantity, its unit, the scale of both techniques, and what is not to scale. */
-export function stackLegend(scene: StackScene, layout: StackLayout | null): TemplateResult {
-  const shading = shownShading(scene);
-  const ink = inkScale(shading);
+const inkWords = ({ quantity, unit, scale }: Shading): string =>
+  `${[quantity, unit].filter(Boolean).join(', ')}, ${scale} scale`;
+
+/** The quantity shown, or a choice between several. */
+function inkChoice(
+  shown: Shading,
+  choices: readonly Shading[],
+  choose: (quantity: string) => void,
+) {
+  if (choices.length < 2) return html`<span>ink: ${inkWords(shown)}</span>`;
+  return html`<label
+    >ink: <select @change=${(event: Event) => choose((event.target as HTMLSelectElement).value)}>
+      ${choices.map(
+        (each) =>
+          html`<option value=${each.quantity} ?selected=${each.quantity === shown.quantity}>${inkWords(each)}</option>`,
+      )}
+    </select></label
+  >`;
+}
+
+/** The ramps of both techniques with marks at round values. */
+function ramps(scene: StackScene, ink: InkScale) {
   const text = ink.scale === 'log' ? raisedPower : (value: number) => formatNumber(value, 2);
+  return html`<svg width=${width + 16} height="26" viewBox="-8 0 ${width + 16} 26" aria-hidden="true">
+    ${ramp('current-ramp', 'var(--graphite)', 0, ink)}
+    ${scene.techniques.length > 1 ? ramp('proposed-ramp', 'var(--madder)', bar + 1, ink) : nothing}
+    ${inkTicks(ink).map((tick) => {
+      const x = rampPosition(ink, tick);
+      return svg`<path d="M${x},0 v${2 * bar + 3}" /><text x=${x} y="24" text-anchor="middle">${text(tick)}</text>`;
+    })}
+  </svg>`;
+}
+
+/** What the ink means: the quantity, its unit, the scale of both techniques, and what is not to scale. */
+export function stackLegend(
+  scene: StackScene,
+  layout: StackLayout | null,
+  choices: readonly Shading[],
+  choose: (quantity: string) => void,
+): TemplateResult {
+  const shown = shownShading(scene);
+  const ink = inkScale(shown);
   return html`<div class="legend" part="legend">
-    ${
-      ink.most > 0
-        ? html`<svg width=${width + 16} height="26" viewBox="-8 0 ${width + 16} 26" aria-hidden="true">
-          ${ramp('current-ramp', 'var(--graphite)', 0, ink)}
-          ${scene.techniques.length > 1 ? ramp('proposed-ramp', 'var(--madder)', bar + 1, ink) : nothing}
-          ${inkTicks(ink).map((tick) => {
-            const x = rampPosition(ink, tick);
-            return svg`<path d="M${x},0 v${2 * bar + 3}" /><text x=${x} y="24" text-anchor="middle">${text(tick)}</text>`;
-          })}
-        </svg>`
-        : nothing
-    }
-    <span>ink: ${[shading.quantity, shading.unit].filter(Boolean).join(', ')}, ${ink.scale} scale</span>
-  </div>
-  <div class="scale">${layout ? scaleWords(layout) : 'to scale'}</div>`;
+      ${ink.most > 0 ? ramps(scene, ink) : nothing} ${inkChoice(shown, choices, choose)}
+    </div>
+    <div class="scale">${layout ? scaleWords(layout) : 'to scale'}</div>`;
 }

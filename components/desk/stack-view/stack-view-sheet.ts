@@ -25,6 +25,7 @@ export const stackViewSheet = css`
   }
   .stage:focus-visible,
   button:focus-visible,
+  select:focus-visible,
   summary:focus-visible {
     outline: 2px solid var(--soft);
     outline-offset: -2px;
@@ -108,6 +109,19 @@ export const stackViewSheet = css`
     display: flex;
     flex-wrap: wrap;
     gap: 0 0.8rem;
+  }
+  select {
+    font: inherit;
+    color: var(--ink);
+    background: transparent;
+    border: 0;
+    border-block-end: 1px dotted var(--soft);
+    padding: 0;
+    max-width: 100%;
+  }
+  option {
+    color: var(--ink);
+    background: var(--paper);
   }
   button {
     font: inherit;

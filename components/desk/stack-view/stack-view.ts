@@ -1,41 +1,34 @@
-import { html, LitElement, nothing, type PropertyValues, svg } from 'lit';
+import { html, LitElement, nothing, type PropertyValues } from 'lit';
 import { customElement, property, query, state } from 'lit/decorators.js';
 import type { StackInks } from '../../../scenes/inks.js';
 import { pivotOnPage } from '../../../scenes/projection.js';
 import { type StackAnchors, stackAnchors } from '../../../scenes/stack-anchors.js';
 import { type StackLayout, stackLayout } from '../../../scenes/stack-layout.js';
-import type { StackScene } from '../../../scenes/stack-scene-data.js';
-import {
-  isSectionView,
-  sectionView,
-  type View,
-  viewBetween,
-  viewWords,
-} from '../../../scenes/view.js';
+import type { Shading, StackScene } from '../../../scenes/stack-scene-data.js';
+import { isSectionView, type View, viewWords } from '../../../scenes/view.js';
 import { type PresetName, presetNames, presetView } from '../../../scenes/view-presets.js';
 import { drawingSheet } from '../sheets/drawing-sheet.js';
-import { onPaperChange, pageInks } from './page-inks.js';
-import { type HostedPicture, hostPicture } from './picture-host.js';
+import { pageInks } from './page-inks.js';
+import { PictureController } from './picture-controller.js';
 import { sectionFallback } from './section-fallback.js';
-import { type PlacedLabel, stackLabels } from './stack-labels.js';
 import { stackLegend } from './stack-legend.js';
+import { stackOverlay } from './stack-overlay.js';
 import { stackTable } from './stack-table.js';
 import { stackViewSheet } from './stack-view-sheet.js';
 import { keyWords, stackWords } from './stack-words.js';
+import { ViewController } from './view-controller.js';
 import { keyAnswer } from './view-keys.js';
 import { followPointer } from './view-pointer.js';
-
-const moves_ms = 260;
-const announced_ms = 350;
 
 /**
  * The stack in the beam in three dimensions, cut open along the axis, in true proportion.
  *
  * Shows: focal spot, filters, support, layers, detail, grid, detector; the beam split between
- * Current (left) and Proposed (right), inked by primary photons or by the scene's `shading`; photon
- * tracks. Until WebGL2 is there, without it and in print, the same as a flat section.
- * Properties: `scene`; `palette` (null: the page's custom properties); `view`, one of the named
- * views; `labels`, `all`, `turned` (own labels only when turned away from the section), `none`.
+ * Current (left) and Proposed (right), inked by primary photons or another quantity; photon tracks.
+ * Until WebGL2 is there, without it and in print, the same as a flat section.
+ * Properties: `scene`; `shadings`, further quantities the ink can be chosen to show; `palette`
+ * (null: the page's custom properties); `view`, one of the named views; `labels`, `all`, `turned`
+ * (own labels only when turned away from the section), `none`.
  * Events: `stack-anchors` with StackAnchors, the places in the section view, whenever they change;
  * `view-turned` with true while labels beside the section do not fit the view. Both bubble.
  * Keyboard: arrows turn, Shift and arrows shift, + and − zoom, 1–6 named views, 0 or Home resets.
@@ -45,137 +38,75 @@ const announced_ms = 350;
 @customElement('stack-view')
 export class StackView extends LitElement {
   @property({ attribute: false }) scene: StackScene | null = null;
+  @property({ attribute: false }) shadings: readonly Shading[] = [];
   @property({ attribute: false }) palette: StackInks | null = null;
   @property() view: PresetName = 'section';
   @property() labels: 'all' | 'turned' | 'none' = 'all';
 
-  @state() private looking: View = sectionView;
   @state() private size: readonly [number, number] = [0, 0];
-  @state() private isSolid = false;
-  @state() private announced = '';
+  /** Quantity the ink shows; empty for the scene's own. */
+  @state() private chosen = '';
   @query('.stage') private stage!: HTMLElement;
-  @query('.place') private place!: HTMLElement;
+  @query('.place') private place!: HTMLElement | null;
 
   static override styles = [drawingSheet, stackViewSheet];
 
+  /** The scene with the chosen ink, and where it stands. */
+  private shown: StackScene | null = null;
   private layout: StackLayout | null = null;
   private anchors: StackAnchors | null = null;
   private told = '';
-  /** The named view looked from; null once it has been turned by hand. */
-  private preset: PresetName | null = 'section';
-  private hosted: HostedPicture | null = null;
   private listening = new AbortController();
-  private move = 0;
-  private pause = 0;
+  private readonly picture = new PictureController(
+    this,
+    () => this.place,
+    () => this.palette ?? pageInks(this),
+  );
+  private readonly looking = new ViewController(this, (view, isSection, isNews) => {
+    this.picture.look(view);
+    if (isNews) this.tell('view-turned', !isSection);
+  });
   // A frame later: the words below, drawn in answer, may change the stage's size once more.
   private readonly watcher = new ResizeObserver(() => requestAnimationFrame(() => this.measure()));
 
   /** Frames the 3D drawing has taken so far; it takes none at rest. */
   get frames(): number {
-    return this.hosted?.picture.frames() ?? 0;
+    return this.picture.frames;
   }
 
   override connectedCallback() {
     super.connectedCallback();
-    if (this.hasUpdated) this.start();
+    if (this.hasUpdated) this.listen();
   }
 
   protected override firstUpdated() {
-    this.start();
+    this.listen();
   }
 
   override disconnectedCallback() {
     super.disconnectedCallback();
     this.listening.abort();
     this.watcher.disconnect();
-    cancelAnimationFrame(this.move);
-    clearTimeout(this.pause);
-    this.release();
   }
 
-  private start() {
+  private listen() {
     this.listening = new AbortController();
-    const { signal } = this.listening;
     this.watcher.observe(this.stage);
     followPointer(
       {
         stage: this.stage,
-        view: () => this.looking,
-        change: (view) => this.turn(view, null),
+        view: () => this.looking.view,
+        change: (view) => this.looking.go(view, null),
         pivot: () => (this.layout ? pivotOnPage(this.layout) : [0, 0]),
       },
-      signal,
+      this.listening.signal,
     );
-    signal.addEventListener(
-      'abort',
-      onPaperChange(() => this.requestUpdate('palette')),
-    );
-    void this.solidify(signal);
   }
-
-  /** Exchanges the flat section for the 3D drawing as soon as that can be had. */
-  private async solidify(signal: AbortSignal) {
-    const hosted = await hostPicture(this.place, this.inks(), (happened) => {
-      if (happened === 'lost') this.isSolid = false;
-      else {
-        this.release();
-        void this.solidify(signal);
-      }
-    });
-    if (signal.aborted) hosted?.remove();
-    else if (hosted) {
-      this.hosted = hosted;
-      this.isSolid = true;
-      if (this.scene && this.layout) hosted.picture.show(this.scene, this.layout);
-      hosted.picture.look(this.looking);
-    }
-  }
-
-  private release() {
-    this.hosted?.remove();
-    this.hosted = null;
-    this.isSolid = false;
-  }
-
-  private inks = (): StackInks => this.palette ?? pageInks(this);
 
   private measure() {
     const { clientWidth, clientHeight } = this.stage;
-    if (clientWidth !== this.size[0] || clientHeight !== this.size[1]) {
-      this.size = [clientWidth, clientHeight];
-    }
-  }
-
-  /** Looks at the stack from somewhere else; named views are gone to in a short movement. */
-  private turn(view: View, preset: PresetName | null) {
-    cancelAnimationFrame(this.move);
-    this.preset = preset;
-    const isCalm = matchMedia('(prefers-reduced-motion: reduce)').matches;
-    if (preset === null || isCalm || !this.isSolid) this.look(view);
-    else this.moveTo(view);
-    clearTimeout(this.pause);
-    this.pause = window.setTimeout(() => {
-      this.announced = `Seen ${viewWords(view)}.`;
-    }, announced_ms);
-  }
-
-  private moveTo(view: View) {
-    const from = this.looking;
-    let begun = 0;
-    const step = (now: number) => {
-      begun ||= now;
-      const share = Math.min(1, (now - begun) / moves_ms);
-      this.look(viewBetween(from, view, share * share * (3 - 2 * share)));
-      if (share < 1) this.move = requestAnimationFrame(step);
-    };
-    this.move = requestAnimationFrame(step);
-  }
-
-  private look(view: View) {
-    const before = isSectionView(this.looking);
-    this.looking = view;
-    const isSection = isSectionView(view);
-    if (isSection !== before) this.tell('view-turned', !isSection);
+    const [width, height] = this.size;
+    if (clientWidth !== width || clientHeight !== height) this.size = [clientWidth, clientHeight];
   }
 
   private tell(name: string, detail: unknown) {
@@ -197,60 +128,61 @@ export class StackView extends LitElement {
 
   private go(name: PresetName) {
     this.view = name;
-    this.preset = name;
-    if (this.layout) this.turn(this.named(name, this.layout), name);
+    this.looking.preset = name;
+    if (this.layout) this.looking.go(this.named(name, this.layout), name);
   }
 
   private onKey(event: KeyboardEvent) {
-    const answer = keyAnswer(event, this.looking);
+    const answer = keyAnswer(event, this.looking.view);
     if (!answer) return;
     event.preventDefault();
     if ('preset' in answer) this.go(answer.preset);
-    else this.turn(answer.view, null);
+    else this.looking.go(answer.view, null);
   }
 
+  /** True where something else has to be drawn than before. */
+  private isNew = (changed: PropertyValues) =>
+    ['scene', 'shadings', 'chosen', 'size'].some((name) => changed.has(name));
+
   protected override willUpdate(changed: PropertyValues) {
-    if (changed.has('view') && this.view !== this.preset) this.go(this.view);
-    if (!changed.has('scene') && !changed.has('size')) return;
-    const [width, height] = this.size;
+    if (changed.has('view') && this.view !== this.looking.preset) this.go(this.view);
+    if (!this.isNew(changed)) return;
     const { scene } = this;
+    const [width, height] = this.size;
+    const shading = this.shadings.find(({ quantity }) => quantity === this.chosen);
+    this.shown = scene && shading ? { ...scene, shading } : scene;
     this.layout = scene && width > 0 && height > 0 ? stackLayout(scene, width, height) : null;
     this.anchors = this.layout && stackAnchors(this.layout);
-    if (this.layout && this.preset) this.looking = this.named(this.preset, this.layout);
+    const { preset } = this.looking;
+    if (this.layout && preset) this.looking.set(this.named(preset, this.layout));
   }
 
   protected override updated(changed: PropertyValues) {
-    const picture = this.hosted?.picture;
-    if (changed.has('palette')) picture?.ink(this.inks());
-    if ((changed.has('scene') || changed.has('size')) && this.scene && this.layout) {
-      picture?.show(this.scene, this.layout);
-      this.tellAnchors();
-    }
-    if (changed.has('looking')) picture?.look(this.looking);
+    if (changed.has('palette')) this.picture.ink();
+    if (!this.isNew(changed) || !this.shown || !this.layout) return;
+    this.picture.show(this.shown, this.layout);
+    this.tellAnchors();
   }
-
-  private label = ({ id, words, left, top }: PlacedLabel) =>
-    html`<span class="label ${id.startsWith('layer') || id === 'detail' ? '' : 'soft'}" part="label"
-      style="left:${left.toFixed(1)}px;top:${top.toFixed(1)}px">${words}</span>`;
 
   private overlay(scene: StackScene, layout: StackLayout) {
-    const isTurned = !isSectionView(this.looking);
-    if (this.labels === 'none' || (this.labels === 'turned' && !isTurned)) return nothing;
-    const labels = stackLabels(scene, layout, this.looking);
-    const leaders = labels.filter(({ leads }) => leads);
-    return html`<svg class="leaders" aria-hidden="true">
-        ${leaders.map(({ anchor: [x, y], left, top }) => svg`<path d="M${x},${y} L${left - 1},${top + 8.5}" />`)}
-      </svg>
-      ${labels.map(this.label)}`;
+    const { view } = this.looking;
+    const isTurned = !isSectionView(view);
+    const hasLabels = this.labels === 'all' || (this.labels === 'turned' && isTurned);
+    return html`${hasLabels ? stackOverlay(scene, layout, view) : nothing}
+      ${isTurned ? html`<p class="from" aria-hidden="true">${viewWords(view)}</p>` : nothing}`;
   }
 
-  private foot(scene: StackScene, layout: StackLayout | null) {
+  private foot(scene: StackScene) {
+    const inks = [this.scene?.shading ?? scene.primary, ...this.shadings];
+    const choose = (quantity: string) => {
+      this.chosen = quantity;
+    };
     return html`<div class="foot">
-      ${stackLegend(scene, layout)}
+      ${stackLegend(scene, this.layout, inks, choose)}
       <div class="views" part="views" role="group" aria-label="Views">
         ${presetNames.map(
           (name) =>
-            html`<button type="button" aria-pressed=${this.preset === name} @click=${() => this.go(name)}>${name}</button>`,
+            html`<button type="button" aria-pressed=${this.looking.preset === name} @click=${() => this.go(name)}>${name}</button>`,
         )}
       </div>
       <details part="table"><summary>as a table</summary><div class="sheet">${stackTable(scene)}</div></details>
@@ -258,18 +190,16 @@ export class StackView extends LitElement {
   }
 
   override render() {
-    const { scene, layout, anchors, looking } = this;
-    return html`<div class="stage ${this.isSolid ? 'solid' : 'flat'}" part="stage" role="application" tabindex="0"
+    const { shown: scene, layout, anchors } = this;
+    return html`<div class="stage ${this.picture.isSolid ? 'solid' : 'flat'}" part="stage" role="application" tabindex="0"
         aria-label=${scene ? stackWords(scene) : 'No stack to show.'} aria-describedby="keys"
         aria-roledescription="layer view" @keydown=${this.onKey}>
         <div class="place"></div>
-        ${scene && layout && anchors ? sectionFallback(scene, layout, anchors) : nothing}
-        ${scene && layout ? this.overlay(scene, layout) : nothing}
-        ${isSectionView(looking) ? nothing : html`<p class="from" aria-hidden="true">${viewWords(looking)}</p>`}
+        ${scene && layout && anchors ? [sectionFallback(scene, layout, anchors), this.overlay(scene, layout)] : nothing}
       </div>
       <p class="unseen" id="keys">${keyWords}</p>
-      <p class="unseen" role="status">${this.announced}</p>
-      ${scene ? this.foot(scene, layout) : nothing}`;
+      <p class="unseen" role="status">${this.looking.announced}</p>
+      ${scene ? this.foot(scene) : nothing}`;
   }
 }
 

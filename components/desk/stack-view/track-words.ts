@@ -6,7 +6,8 @@ export const trackCounts = ({ kinds }: Tracks): number[] =>
 
 /** The tracks in words, for those who do not see them. */
 export function trackWords(scene: StackScene, tracks: Tracks): string {
-  const [primary, compton, rayleigh, absorbed] = trackCounts(tracks);
+  const [primary, compton, rayleigh, absorbed, fluorescence] = trackCounts(tracks);
   const name = scene.techniques[tracks.technique]?.name ?? '';
-  return `Photon paths of ${name}: ${primary} primary (thin line), ${compton} after Compton scatter (line), ${rayleigh} after Rayleigh scatter (dotted), ${absorbed} ends by absorption (dot).`;
+  const born = fluorescence > 0 ? `, ${fluorescence} of fluorescence (dashed)` : '';
+  return `Photon paths of ${name}: ${primary} primary (thin line), ${compton} after Compton scatter (line), ${rayleigh} after Rayleigh scatter (dotted)${born}, ${absorbed} ends by absorption (dot).`;
 }

@@ -234,6 +234,32 @@ describe('stack-view', () => {
     expect(inside('.label').textContent).to.equal('carbon fibre 2 mm');
   });
 
+  it('inks another quantity when it is chosen, and says so in the table', async () => {
+    const energy = {
+      quantity: 'energy absorbed per depth',
+      unit: 'mJ/cm',
+      scale: 'linear' as const,
+      extent: 'body' as const,
+      perTechnique: [{ depths_mm: [0, 200], values: [2, 1] }, null],
+    };
+    expect(inside('select')).to.equal(null);
+    element.shadings = [energy];
+    await element.updateComplete;
+    const choice = inside<HTMLSelectElement>('select');
+    expect([...choice.options].map((option) => option.text.trim())).to.deep.equal([
+      'primary photons, per mm² and frame, log scale',
+      'energy absorbed per depth, mJ/cm, linear scale',
+    ]);
+    const { frames } = element;
+    choice.value = energy.quantity;
+    choice.dispatchEvent(new Event('change'));
+    await until(() => element.frames > frames);
+    const [support, front] = element.shadowRoot?.querySelectorAll('tbody tr') ?? [];
+    expect(support.children[6].textContent).to.equal('–');
+    // 10 of 200 mm on the way from 2 to 1, in equal ratios: 2 · 2^(−1/20).
+    expect(front.children[6].textContent).to.equal('1.93');
+  });
+
   it('tells of photon tracks in words', async () => {
     element.scene = { ...sampleScene, tracks: sampleTracks };
     await element.updateComplete;

@@ -1,0 +1,60 @@
+import type { Estimated } from '../transport/index.js';
+
+/** How an estimate stands against transport. */
+export type Verdict = 'agrees' | 'differs' | 'undecided';
+
+export interface Judged {
+  /** Estimate less transport, in percent of transport. */
+  readonly difference_percent: number | null;
+  /** The same in standard errors. */
+  readonly z: number | null;
+  readonly verdict: Verdict;
+}
+
+/** The difference a number of standard errors cannot explain. */
+const sure = 2;
+
+/**
+ * Undecided while two standard errors do not fit into the tolerance. Then the estimate agrees
+ * inside the tolerance, and differs where the difference exceeds it by two standard errors; between
+ * the two more photons must decide.
+ */
+export const judge = (
+  estimate: number,
+  { value, standardError }: Estimated,
+  tolerance_percent: number,
+): Judged => {
+  const difference = estimate - value;
+  if (value === 0 || standardError === null) {
+    return { difference_percent: null, z: null, verdict: 'undecided' };
+  }
+  const allowed = (Math.abs(value) * tolerance_percent) / 100;
+  const error = sure * standardError;
+  const excess = Math.abs(difference) - allowed;
+  return {
+    difference_percent: (100 * difference) / value,
+    z: standardError > 0 ? difference / standardError : null,
+    verdict:
+      error > allowed
+        ? 'undecided'
+        : excess <= 0
+          ? 'agrees'
+          : excess > error
+            ? 'differs'
+            : 'undecided',
+  };
+};
+
+/**
+ * Photons after which two standard errors would fit into the tolerance, from the error so far
+ * (which falls with the square root); null while nothing is known.
+ */
+export const photonsToDecide = (
+  { value, standardError }: Estimated,
+  tolerance_percent: number,
+  photons: number,
+): number | null => {
+  if (value === 0 || standardError === null) return null;
+  const allowed = (Math.abs(value) * tolerance_percent) / 100;
+  return photons * ((sure * standardError) / allowed) ** 2;
+};

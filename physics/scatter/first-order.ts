@@ -1,25 +1,18 @@
 import { electronRestEnergy_keV } from '../../materials/index.js';
-import { kept } from '../../materials/kept.js';
 import {
-  type AngularShapes,
   angularNorms,
-  angularShapes,
   comptonShape,
   gridPlacePerRootHalfSine,
   rayleighShape,
   shapeAt,
 } from './angular.js';
 import type { EnergyNodes } from './energy-nodes.js';
-import { sublayerPoints, valuesPerPoint } from './first-order-points.js';
+import { type FirstOrderPart, firstOrderParts } from './first-order-parts.js';
+import { valuesPerPoint } from './first-order-points.js';
 import type { ScatterGeometry } from './geometry.js';
 import { locate, locatorOf } from './locate.js';
 import { airKermaScore, type ScoreTable, scoreAngles, scoreCount } from './scores.js';
-import {
-  joinEqualNeighbours,
-  linearCoefficients,
-  type Slab,
-  type SlabCoefficients,
-} from './slabs.js';
+import type { Slab } from './slabs.js';
 
 /** Scatter over primary of every score of a table (see `ScoreTable`), one array over the nodes each. */
 export interface FirstOrder {
@@ -27,10 +20,6 @@ export interface FirstOrder {
   readonly rayleigh: readonly Float64Array[];
 }
 
-/** Sublayers are at most this thick in mean free paths. */
-const sublayer_mfp = 1.5;
-/** Thicker slabs pass next to nothing; their sublayers grow beyond 1.5 mean free paths. */
-const mostSublayers = 24;
 /** Keeps e^x finite where an edge lets scatter pass that the primary cannot. */
 const greatestExponent = 500;
 
@@ -50,14 +39,14 @@ export function firstOrder(
   nodes: EnergyNodes,
   table: ScoreTable,
 ): FirstOrder {
-  const parts = prepare(joinEqualNeighbours(slabs), geometry, nodes.fine_keV);
+  const parts = firstOrderParts(slabs, geometry, nodes.fine_keV);
   const count = nodes.energies_keV.length;
   const compton = Array.from({ length: table.width }, () => new Float64Array(count));
   const rayleigh = Array.from({ length: table.width }, () => new Float64Array(count));
   const sums = new Float64Array(2 * table.width);
   for (let i = 0; i < count; i++) {
     sums.fill(0);
-    for (const part of parts) addSlab(part, geometry, nodes, i, table, sums);
+    for (const part of parts) addSlab(part, nodes, i, table, sums);
     const primary = nodes.fineIndex[i] * scoreAngles * table.width;
     for (let score = 0; score < table.width; score++) {
       const reference = table.values[primary + score];
@@ -68,44 +57,8 @@ export function firstOrder(
   return { compton, rayleigh };
 }
 
-/** One slab with what lies above and below it, on the fine energies. */
-interface Part {
-  readonly slab: Slab;
-  readonly shapes: AngularShapes;
-  readonly linear: SlabCoefficients;
-  /** Optical thickness of everything above and below. */
-  readonly above: Float64Array;
-  readonly below: Float64Array;
-  /** Distance from the slab's lower face to the detector. */
-  readonly height_cm: number;
-  /** Geometry of the quadrature points by number of sublayers. */
-  readonly points: Map<number, Float64Array>;
-}
-
-function prepare(slabs: readonly Slab[], geometry: ScatterGeometry, fine: Float64Array): Part[] {
-  const linear = slabs.map(({ material }) => linearCoefficients(material, fine));
-  const depthOf = (from: number, to: number) => {
-    const sum = new Float64Array(fine.length);
-    for (let k = from; k < to; k++) {
-      for (let j = 0; j < sum.length; j++)
-        sum[j] += linear[k].attenuation[j] * slabs[k].thickness_cm;
-    }
-    return sum;
-  };
-  return slabs.map((slab, k) => ({
-    slab,
-    shapes: angularShapes(slab.material),
-    linear: linear[k],
-    above: depthOf(0, k),
-    below: depthOf(k + 1, slabs.length),
-    height_cm: slabs.slice(k + 1).reduce((sum, s) => sum + s.thickness_cm, geometry.gap_cm),
-    points: new Map(),
-  }));
-}
-
 function addSlab(
-  part: Part,
-  geometry: ScatterGeometry,
+  part: FirstOrderPart,
   nodes: EnergyNodes,
   node: number,
   table: ScoreTable,
@@ -116,13 +69,7 @@ function addSlab(
   const here = nodes.fineIndex[node];
   const energy = fine[here];
   const mu = linear.attenuation[here];
-  const sublayers = Math.min(
-    mostSublayers,
-    Math.max(1, Math.ceil((mu * slab.thickness_cm) / sublayer_mfp)),
-  );
-  const points = kept(part.points, sublayers, () =>
-    sublayerPoints(geometry, slab.thickness_cm, part.height_cm, sublayers),
-  );
+  const points = part.pointsFor(mu);
   const norms = angularNorms(slab.material, energy);
   const comptonFactor = norms.compton > 0 ? linear.incoherent[here] / norms.compton : 0;
   const rayleighFactor = norms.rayleigh > 0 ? linear.coherent[here] / norms.rayleigh : 0;

@@ -66,6 +66,10 @@ export interface ScoreTable {
 /** Place of an angle β among the table's angles. */
 export const anglePlace = (beta: number): number => Math.sqrt(beta / halfPi) * (angleCount - 1);
 export const scoreAngles = angleCount;
+/** The table's angles, rad; the last stands at grazing incidence, where nothing leaves the stack. */
+export const scoreBetas_rad = Float64Array.from({ length: angleCount }, (_, j) =>
+  Math.min(Math.acos(grazingCosine), halfPi * (j / (angleCount - 1)) ** 2),
+);
 
 interface KeptTable {
   readonly nodes: EnergyNodes;
@@ -100,7 +104,7 @@ function tabulate(
   let at = 0;
   energies_keV.forEach((energy, i) => {
     for (let j = 0; j < angleCount; j++, at += width) {
-      const cosine = Math.max(grazingCosine, Math.cos(halfPi * (j / (angleCount - 1)) ** 2));
+      const cosine = Math.cos(scoreBetas_rad[j]);
       values.set(photonScores(detector, energy, cosine), at);
       values[at + airKermaScore] = airKerma[i];
       if (!grid) continue;

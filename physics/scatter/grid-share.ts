@@ -1,0 +1,61 @@
+import type { EnergyNodes } from './energy-nodes.js';
+import { firstOrderParts } from './first-order-parts.js';
+import { valuesPerPoint } from './first-order-points.js';
+import type { ScatterGeometry } from './geometry.js';
+import { type ScatterGrid, scoreAngles, scoreBetas_rad } from './scores.js';
+import type { Slab } from './slabs.js';
+
+/** Multiply scattered photons reach the grid with about this share of the incident energy. */
+const meanEnergyShare = 0.88;
+
+/** Share of isotropically scattered photons that a grid lets through, over the nodes. */
+export interface GridShare {
+  /** Of photons through the detector plane. */
+  readonly plane: Float64Array;
+  /** Of their fluence, weighted 1/cosβ. */
+  readonly fluence: Float64Array;
+}
+
+/**
+ * G = N/D, N = Σ∫dz∫sinβ dβ σ_s W e^{−τ_out(secβ − 1)} T̄(0.88 E, β), D the same without T̄. Over its
+ * value in an infinite field it tells how a finite field's multiple scatter passes the grid.
+ */
+export function gridShare(
+  slabs: readonly Slab[],
+  geometry: ScatterGeometry,
+  nodes: EnergyNodes,
+  grid: ScatterGrid,
+): GridShare {
+  const parts = firstOrderParts(slabs, geometry, nodes.fine_keV);
+  const transmission = new Float64Array(scoreAngles);
+  const plane = new Float64Array(nodes.energies_keV.length);
+  const fluence = new Float64Array(nodes.energies_keV.length);
+  nodes.energies_keV.forEach((energy, i) => {
+    const here = nodes.fineIndex[i];
+    for (let j = 0; j < scoreAngles; j++) {
+      transmission[j] = grid.lookup(meanEnergyShare * energy, Math.cos(scoreBetas_rad[j]));
+    }
+    const through = [0, 0];
+    const all = [0, 0];
+    for (const { below, linear, pointsFor } of parts) {
+      const mu = linear.attenuation[here];
+      const scatter = linear.incoherent[here] + linear.coherent[here];
+      const points = pointsFor(mu);
+      for (let at = 0; at < points.length; at += valuesPerPoint) {
+        const secant = points[at + 3];
+        const tauOut = below[here] + mu * points[at];
+        const amount = points[at + 1] * scatter * Math.exp(tauOut * (1 - secant));
+        const j = points[at + 6] | 0;
+        const share = points[at + 6] - j;
+        const passed = transmission[j] + share * (transmission[j + 1] - transmission[j]);
+        all[0] += amount;
+        all[1] += amount * secant;
+        through[0] += amount * passed;
+        through[1] += amount * secant * passed;
+      }
+    }
+    plane[i] = all[0] > 0 ? through[0] / all[0] : 1;
+    fluence[i] = all[1] > 0 ? through[1] / all[1] : 1;
+  });
+  return { plane, fluence };
+}

@@ -1,8 +1,8 @@
 import { html, LitElement, nothing } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
-import type { PlacedDetail } from '../../../physics/stack/place-detail.js';
-import type { Stack } from '../../../physics/stack/stack.js';
-import type { StackAnchors } from '../../../scenes/stack-anchors.js';
+import { type StackAnchors, stackAnchors } from '../../../scenes/stack-anchors.js';
+import { stackLayout } from '../../../scenes/stack-layout.js';
+import type { StackScene } from '../../../scenes/stack-scene-data.js';
 import { placeAlong } from '../../charts/place-along.js';
 import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
 import { type DeskModel, placed, sizeShown } from '../model/desk-model.js';
@@ -39,6 +39,9 @@ export class BeamPath extends LitElement {
 
   static override styles = beamPathSheet;
 
+  /** Made anew only when what it shows has changed, so that the drawing rests. */
+  private scene: StackScene | null = null;
+  private sceneParts: readonly unknown[] = [];
   private waiting = 0;
   private readonly watcher = new ResizeObserver(() => {
     // Arranging changes what is observed, so it waits for the next frame, and is done once in it.
@@ -62,16 +65,21 @@ export class BeamPath extends LitElement {
     this.arrange();
   }
 
-  private layout(stack: Stack | null, detail: PlacedDetail | null): SpineLayout {
-    if (stack && this.anchors) return spineOfScene(this.anchors);
-    const layers_mm = stack
-      ? stack.layers.map((layer) => layer.thickness_mm)
-      : this.model.draft.case.patient.layers.map((layer) => layer.thickness_mm);
-    return spineLayout({
-      ...this.spine,
-      layers_mm,
-      detailDepth_mm: detail?.centreDepth_mm ?? null,
-    });
+  protected override willUpdate() {
+    const { draft, along, left, right, sizeName } = this.model;
+    const parts = [draft.case, along, left, right, sizeName];
+    if (parts.every((part, i) => part === this.sceneParts[i])) return;
+    this.sceneParts = parts;
+    this.scene = stackSceneOf(this.model);
+  }
+
+  /** Where things stand now; what the layer view told last gives only the size of its drawing. */
+  private layout(): SpineLayout {
+    const { width, height } = this.anchors ?? this.spine;
+    if (this.scene) return spineOfScene(stackAnchors(stackLayout(this.scene, width, height)));
+    const { layers } = this.model.draft.case.patient;
+    const layers_mm = layers.map((layer) => layer.thickness_mm);
+    return spineLayout({ width, height, layers_mm, detailDepth_mm: null });
   }
 
   /** Takes the size the page gives the spine; drawing and rows follow. */
@@ -90,8 +98,7 @@ export class BeamPath extends LitElement {
     const root = this.renderRoot;
     const spine = root.querySelector<HTMLElement>('.spine');
     if (!spine) return;
-    const { stack, detail } = placed(this.model);
-    const layout = this.layout(stack, detail);
+    const layout = this.layout();
     const rowsOf = (id: string) => [
       ...root.querySelectorAll<HTMLElement>(`.row[data-station="${id}"]`),
     ];
@@ -125,13 +132,13 @@ export class BeamPath extends LitElement {
 
   override render() {
     const { model } = this;
-    const { stack, detail } = placed(model);
-    const layout = this.layout(stack, detail);
+    const { stack } = placed(model);
+    const layout = this.layout();
     return html`<div class="columns">
         <svg class="leaders" aria-hidden="true"><path /></svg>
         ${this.side(model.left, 'left')}
         <section class="spine" aria-label="Beam path">
-          <stack-view .scene=${stackSceneOf(model)} labels="turned" @stack-anchors=${(
+          <stack-view .scene=${this.scene} labels="turned" @stack-anchors=${(
             event: CustomEvent<StackAnchors>,
           ) => {
             this.anchors = event.detail;

@@ -75,7 +75,7 @@ describe('imports', () => {
     '%s imports no package but those it is allowed',
     (folder, allowed) => {
       const foreign = sourceFiles(folder)
-        .filter((file) => !file.startsWith('materials/generate/'))
+        .filter((file) => !file.includes('/generate/'))
         .flatMap((file) =>
           importsOf(readSource(file))
             .filter((specifier) => !specifier.startsWith('.'))
@@ -89,7 +89,7 @@ describe('imports', () => {
   test.each(['materials', 'physics'])('%s knows no clock and no unseeded randomness', (folder) => {
     const hosts = /\bMath\.random\b|\bDate\.now\b|\bnew Date\(\s*\)|\bperformance\.now\b/;
     const guilty = sourceFiles(folder)
-      .filter((file) => !file.startsWith('materials/generate/'))
+      .filter((file) => !file.includes('/generate/'))
       .filter((file) => hosts.test(readSource(file)));
     expect(guilty).toEqual([]);
   });

@@ -17,7 +17,7 @@ export function ledger(run: TableRun): string[] {
   return [
     '# Ledger of the scatter tables',
     '',
-    'Written by `npm run tables` (some minutes of one core). Unchanged inputs leave this folder unchanged.',
+    'Written by `npm run scatter-table` (some minutes of one core). Unchanged inputs leave this folder unchanged.',
     '',
     '## field-table.ts',
     '',

@@ -1,5 +1,5 @@
 /**
- * `npm run tables`: makes physics/scatter/tables/field-table.ts by photon transport in water, some
+ * `npm run scatter-table`: makes physics/scatter/tables/field-table.ts by photon transport in water, some
  * minutes of one core. Seeded: unchanged inputs leave a clean tree.
  */
 import { createHash } from 'node:crypto';

@@ -18,7 +18,7 @@ describe('the field table', () => {
   it('is the one its hash was taken of', () => {
     expect(createHash('sha256').update(fieldTable).digest('hex')).toBe(fieldTableSha256);
   });
-  it('was made with the cross sections in use: else run npm run tables', () => {
+  it('was made with the cross sections in use: else run npm run scatter-table', () => {
     expect(fieldTableElementsSha256).toBe(elementTableSha256);
   });
   it('holds a value for every node', () => {

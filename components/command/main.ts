@@ -11,4 +11,7 @@ process.exitCode = await run(process.argv.slice(2), {
   out: (text) => process.stdout.write(text),
   err: (text) => process.stderr.write(text),
   readFile: (path) => readFileSync(path, 'utf8'),
+  ...(process.stderr.isTTY
+    ? { progress: (line) => process.stderr.write(`\r\u001b[K${line}`) }
+    : {}),
 });

@@ -5,6 +5,7 @@ import { cautions } from './cautions.js';
 import { checksCommand } from './checks.js';
 import type { Io } from './io.js';
 import { matterCommand } from './matter.js';
+import { transportCommand } from './transport.js';
 import { weighCommand } from './weigh.js';
 
 /** The whole command line, writing through `io`. */
@@ -15,7 +16,13 @@ export const program = (io: Io): Command => {
     .helpOption('-h, --help', 'print this help')
     .helpCommand(false)
     .addHelpText('after', `\n${cautions}`);
-  for (const command of [weighCommand(io), beamCommand(io), matterCommand(io), checksCommand(io)]) {
+  for (const command of [
+    weighCommand(io),
+    transportCommand(io),
+    beamCommand(io),
+    matterCommand(io),
+    checksCommand(io),
+  ]) {
     root.addCommand(withAnswerForms(command));
   }
   return forAll(root, (command) =>

@@ -124,7 +124,7 @@ const times = ({ value, standardError }: Estimated, factor: number): Estimated =
   standardError: standardError === null ? null : standardError * factor,
 });
 
-const nothingToJudge = { difference_percent: null, z: null, verdict: 'undecided' } as const;
+const nothingToJudge = { difference_percent: null, z: null, verdict: null } as const;
 
 const stated: Partial<Record<CheckedQuantity, number>> = statedAccuracy_percent;
 

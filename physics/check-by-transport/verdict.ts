@@ -8,7 +8,8 @@ export interface Judged {
   readonly difference_percent: number | null;
   /** The same in standard errors. */
   readonly z: number | null;
-  readonly verdict: Verdict;
+  /** Null where there is no estimate to judge. */
+  readonly verdict: Verdict | null;
 }
 
 /** The difference a number of standard errors cannot explain. */

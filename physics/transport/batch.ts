@@ -7,8 +7,9 @@ import { type RandomStream, randomStream, splitmix32 } from './random.js';
 import { rayDepth } from './ray-depth.js';
 import { boxScorer } from './score-boxes.js';
 import { displacementScorer, nestFields } from './score-displacement.js';
-import { forcedScorer, nearScorer } from './score-forced.js';
+import { forcedScorer } from './score-forced.js';
 import { type ScoreLayout, scoreLayout } from './score-layout.js';
+import { nearScorer } from './score-near.js';
 
 /** Where the scores of a run's batches stand. */
 export function layoutOf(input: TransportInput): ScoreLayout {

@@ -122,12 +122,18 @@ function displacementScoring(
   };
 }
 
-/** Collisions nearer to the detector than this are not forced. */
-const near_cm = 5;
-/** Half side of the central square for those, where the field is large enough. */
-const halfRegion_cm = 5;
-/** The central square is at most this share of the field. */
-const regionShare = 1 / 3;
+/**
+ * Collisions nearer to the detector than this are not forced but followed into a square. Both are
+ * small enough that the square's mean lies within 0.3 % of the centre's scatter (a 10 × 10 cm square
+ * and 5 cm are 1 % low in a 30 cm field), and large enough not to waste photons.
+ */
+const near_cm = 3;
+const halfRegion_cm = 3;
+/** Greatest share of the field that the square spans. */
+const regionShare = 1 / 5;
+/** Backscatter changes little across a field: its square may be larger. */
+const halfSkinRegion_cm = 5;
+const skinRegionShare = 1 / 3;
 
 function forcedScoring(
   stack: Stack,
@@ -136,14 +142,13 @@ function forcedScoring(
   meanEnergy_keV: number,
 ): ForcedScoring {
   const halfField_cm = Math.min(...stack.field_mm) / 20;
-  const half = Math.min(halfRegion_cm, halfField_cm * regionShare);
   const atSkin = stack.beam === 'parallel' ? 1 : stack.sourceToSkin_mm / stack.sourceToDetector_mm;
   return {
     kind: 'forced',
     detector_cm: geometry.detector_cm,
     near_cm,
-    halfRegion_cm: half,
-    halfSkinRegion_cm: Math.min(halfRegion_cm, halfField_cm * atSkin * regionShare),
+    halfRegion_cm: Math.min(halfRegion_cm, halfField_cm * regionShare),
+    halfSkinRegion_cm: Math.min(halfSkinRegion_cm, halfField_cm * atSkin * skinRegionShare),
     densities: materials.map(angleDensity),
     worth: worthTable(geometry, materials, meanEnergy_keV),
   };

@@ -77,14 +77,12 @@ export function recordCrossing(
   number: number,
 ): void {
   const { values } = buffer;
-  if (buffer.end + crossingLength > values.length) drain(buffer);
-  const at = buffer.end;
+  const at = claim(buffer, crossingLength);
   values[at + crossing.face] = faceCode;
   values[at + crossing.history] = past;
   copyFlight(values, at + crossing.x, photon);
   values[at + crossing.lastZ] = photon[flight.lastZ];
   values[at + crossing.photon] = number;
-  buffer.end = at + crossingLength;
 }
 
 /** Notes an interaction; `photon` holds the state before it. */
@@ -98,15 +96,21 @@ export function recordCollision(
   matter: number,
 ): void {
   const { values } = buffer;
-  if (buffer.end + collisionLength > values.length) drain(buffer);
-  const at = buffer.end;
+  const at = claim(buffer, collisionLength);
   values[at + collision.kind] = kind;
   values[at + collision.history] = past;
   copyFlight(values, at + collision.x, photon);
   values[at + collision.energyAfter] = energyAfter_keV;
   values[at + collision.photon] = number;
   values[at + collision.matter] = matter;
-  buffer.end = at + collisionLength;
+}
+
+// The place of a new record; a full buffer is handed over first.
+function claim(buffer: EventBuffer, recordLength: number): number {
+  if (buffer.end + recordLength > buffer.values.length) drain(buffer);
+  const at = buffer.end;
+  buffer.end = at + recordLength;
+  return at;
 }
 
 // x, y, z, u, v, w, energy stand in this order in a flight and in both records.

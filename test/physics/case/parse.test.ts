@@ -34,7 +34,7 @@ describe('a broken case', () => {
   it.each(brokenCases)('with $name is refused in one clear line', ({ text, path, rule }) => {
     const result = parseCaseText(text);
     if (!('faults' in result)) throw new Error('was taken as sound');
-    expect(result.faults[0]).toMatchObject({ path, rule });
+    expect(result.faults[0]).toMatchObject({ path, rule: expect.stringContaining(rule) });
     for (const fault of result.faults) {
       const line = faultLine(fault);
       expect(line).not.toMatch(/[\p{Cc}\u2028-\u202e\u2066-\u2069]/u);

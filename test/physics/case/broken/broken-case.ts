@@ -13,6 +13,7 @@ export interface BrokenCase {
   /** The text of the broken file. */
   readonly text: string;
   readonly path: string;
+  /** The rule, or the part of it that does not depend on models. */
   readonly rule: string;
 }
 

@@ -1,0 +1,34 @@
+import { describe, expect, it } from 'vitest';
+import { runCommand } from './run-command.js';
+
+describe('stratabeam checks', () => {
+  it('gives every row with expected, computed, tolerance, verdict, source and provenance', async () => {
+    const { code, out } = await runCommand(['checks', '--json']);
+    const { rows } = JSON.parse(out) as { rows: readonly Record<string, unknown>[] };
+    expect(code).toBe(0);
+    expect(rows.length).toBeGreaterThan(1000);
+    for (const row of rows) {
+      expect(typeof row.expected).toBe('number');
+      expect(typeof row.tolerance).toBe('number');
+      expect(['met', 'short', 'unconfirmed source']).toContain(row.verdict);
+      expect(row.source).not.toBe('');
+      expect(row.provenance).not.toBe('');
+    }
+  });
+
+  it('shows people a table for each source and the count', async () => {
+    const { out } = await runCommand(['checks']);
+    expect(out).toMatch(/Hubbell JH, Seltzer SM\..*\(published\)\n\ncheck /);
+    expect(out).toMatch(/\nall +\d+ +0 +18\n/);
+    expect(out).toMatch(/\nNo check fell short\.\n$/);
+    const brief = await runCommand(['checks', '--summary']);
+    expect(brief.out.length).toBeLessThan(out.length / 5);
+  });
+
+  it('lists as CSV', async () => {
+    const { out } = await runCommand(['checks', '--csv']);
+    expect(out.split('\n')[0]).toBe(
+      'id,expected,computed,unit,tolerance,toleranceIs,verdict,source,provenance,note',
+    );
+  });
+});

@@ -1,4 +1,5 @@
 import { expect, it } from 'vitest';
+import { readReference } from '../../reference/read-reference.js';
 import { deviation } from './slab-runs.js';
 import { stackNumbers, type UnitNumber, waterNumbers } from './unit-numbers.js';
 
@@ -28,4 +29,17 @@ it('water slabs give the separately computed scatter, imparted energy and first 
 
 it('the seven-layer stack gives the separately computed energy by layer, K photons or not', () => {
   expectAgreement(stackNumbers(photons, 31));
+});
+
+it('all of them agree within 4 standard errors in the long run that is kept', () => {
+  const rows = readReference('transport-unit-numbers.csv');
+  expectAgreement(
+    rows.map(({ item, expected, expectedError, found, foundError }) => ({
+      name: item,
+      expected: Number(expected),
+      expectedError: Number(expectedError),
+      found: { value: Number(found), standardError: Number(foundError) },
+    })),
+  );
+  expect(rows).toHaveLength(31);
 });

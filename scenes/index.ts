@@ -5,6 +5,7 @@ export * from './density-rows.js';
 export * from './drawing/stack-drawing.js';
 export * from './ink-scale.js';
 export * from './inks.js';
+export * from './page-scale.js';
 export * from './projection.js';
 export * from './stack-anchors.js';
 export * from './stack-layout.js';

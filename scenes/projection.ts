@@ -1,5 +1,6 @@
 import type { Point } from './geometry.js';
-import { recede, type StackLayout } from './stack-layout.js';
+import { recede } from './page-scale.js';
+import type { StackLayout } from './stack-layout.js';
 import { obliqueShare, type View } from './view.js';
 
 /**

@@ -1,4 +1,5 @@
-import { recede, type StackLayout, type Stretch } from './stack-layout.js';
+import { recede } from './page-scale.js';
+import type { StackLayout, Stretch } from './stack-layout.js';
 
 /**
  * Where things stand on the page in the section view, px from the drawing's top and left: what a

@@ -1,4 +1,5 @@
 import { type AlongBeam, alongBeam } from './along-beam.js';
+import { pageScale } from './page-scale.js';
 import { faceDepths_mm, patientThickness_mm, type StackScene } from './stack-scene-data.js';
 
 /** A stretch along the beam, in drawn mm below the focal spot. */
@@ -43,36 +44,14 @@ export interface StackLayout {
   readonly halfField: (drawn: number) => readonly [number, number];
 }
 
-/** How far a mm of depth recedes to the right and up in the oblique view. */
-export const recede = { right: 0.38, up: 0.17 } as const;
-
-/** Sizes on paper, px: margins, and what is too thin to be drawn to scale. */
-const paper = {
-  side: 12,
-  detectorReach: 4,
-  filter: 7,
-  support: 5,
-  grid: 10,
-  gridGap: 8,
-  detector: 9,
-};
-const shares = { source: 0.03, detector: 0.925, patient: 0.54, gap: 0.42, filter: 0.34, air: 0.62 };
-/** How much wider than the field an unbounded body is drawn. */
-const beyondField = 1.18;
-const widestBody = 1.6;
-
-/** Half extents of the body across the beam: its own where it is bounded, else by the field. */
-function bodyHalves(scene: StackScene, atExit: readonly [number, number]): [number, number] {
-  const half = (i: 0 | 1) => {
-    const own = scene.lateral_mm?.[i];
-    return own === undefined ? atExit[i] * beyondField : Math.min(own / 2, atExit[i] * widestBody);
-  };
-  return [half(0), half(1)];
-}
+/** Heights on paper, px, of what is too thin to be drawn to scale, and of the space above a grid. */
+const paper = { filter: 7, support: 5, grid: 10, gridGap: 8, detector: 9 };
+/** Places as shares: of the page, of the free air above, of the height left for free air. */
+const shares = { source: 0.03, detector: 0.925, filter: 0.34, breakAbove: 0.62, gap: 0.42 };
 
 /** Stacks slabs from `start` on, each at its thickness or at the least that can be seen. */
 function stackUp(
-  slabs: readonly { thickness_mm: number }[],
+  slabs: readonly { readonly thickness_mm: number }[],
   start: number,
   least: number,
 ): Stretch[] {
@@ -85,87 +64,73 @@ function stackUp(
   });
 }
 
+const heightOf = (stretches: readonly Stretch[]): number =>
+  stretches.length > 0 ? stretches[stretches.length - 1].bottom - stretches[0].top : 0;
+
+const shorten = (at: number, drawn: number, length_mm: number): Shortened[] =>
+  drawn < 0.98 * length_mm ? [{ at, length_mm, factor: length_mm / drawn }] : [];
+
 /**
- * Fits the stack into a drawing of the given size: one scale for widths and for the patient's
- * thickness, the free air taking what height is left.
+ * Fits the stack into a drawing of the given size: one scale for widths, patient and support, the
+ * free air above and below taking what height is left.
  */
 export function stackLayout(scene: StackScene, width_px: number, height_px: number): StackLayout {
+  const { px_per_mm, body, widest, halfFieldAt, ...page } = pageScale(scene, width_px, height_px);
+  const mm = (px: number) => px / px_per_mm;
   const thickness = patientThickness_mm(scene);
   const toSkin = scene.sourceToSkin_mm;
-  const toDetector = Math.max(scene.sourceToDetector_mm, toSkin + thickness);
-  const spread = (distance_mm: number) =>
-    scene.beam === 'parallel' ? 1 : distance_mm / toDetector;
-  const halfFieldAt = (distance_mm: number): [number, number] => [
-    (scene.field_mm[0] / 2) * spread(distance_mm),
-    (scene.field_mm[1] / 2) * spread(distance_mm),
-  ];
-  const [halfWidth, depth] = bodyHalves(scene, halfFieldAt(toSkin + thickness));
-  const widest = Math.max(halfWidth, scene.field_mm[0] / 2);
-  const deepest = Math.max(depth, scene.field_mm[1] / 2);
+  const toExit = toSkin + thickness;
+  const toDetector = Math.max(scene.sourceToDetector_mm, toExit);
+  const sum = (slabs: StackScene['layers']) =>
+    slabs.reduce((all, slab) => all + slab.thickness_mm, 0);
+  const freeAbove = Math.max(0, toSkin - sum(scene.supportEntrance));
+  const toFreeBelow = Math.min(toDetector, toExit + sum(scene.supportExit));
+  const freeBelow = toDetector - toFreeBelow;
 
-  const across_px = Math.max(40, width_px - 2 * (paper.side + paper.detectorReach));
-  const px_per_mm = Math.min(
-    across_px / (2 * widest + recede.right * deepest),
-    (shares.patient * height_px) / thickness,
-  );
-  const mm = (px: number) => px / px_per_mm;
+  const least = mm(paper.support);
+  const entrance = heightOf(stackUp(scene.supportEntrance, 0, least));
+  const behind = heightOf(stackUp(scene.supportExit, 0, least));
+  const gridHeight = scene.grid ? mm(paper.grid + paper.gridGap) : 0;
+  const spare = mm((shares.detector - shares.source) * height_px) - thickness - entrance - behind;
+  const below = Math.max(gridHeight + mm(paper.gridGap), Math.min(freeBelow, shares.gap * spare));
+  const above = Math.max(mm(paper.filter), Math.min(freeAbove, spare - below));
 
-  const path = mm((shares.detector - shares.source) * height_px);
-  const spare = path - thickness;
-  const gap_mm = toDetector - toSkin - thickness;
-  const exitLeast = scene.supportExit.length * mm(paper.support);
-  const gapLeast =
-    exitLeast + (scene.grid ? mm(2 * paper.grid + paper.gridGap) : mm(paper.gridGap));
-  const gap = Math.max(gapLeast, Math.min(gap_mm, shares.gap * spare));
-  const air = Math.max(mm(paper.filter), Math.min(toSkin, spare - gap));
-
-  const skin = air;
+  const skin = above + entrance;
   const exit = skin + thickness;
-  const detectorTop = exit + gap;
+  const detectorTop = exit + behind + below;
   const along = alongBeam([
     { distance_mm: 0, drawn_mm: 0 },
+    { distance_mm: freeAbove, drawn_mm: above },
     { distance_mm: toSkin, drawn_mm: skin },
-    { distance_mm: toSkin + thickness, drawn_mm: exit },
-    { distance_mm: Math.max(toDetector, toSkin + thickness + 1e-6), drawn_mm: detectorTop },
+    { distance_mm: toExit, drawn_mm: exit },
+    { distance_mm: toFreeBelow, drawn_mm: exit + behind },
+    { distance_mm: toDetector, drawn_mm: detectorTop },
   ]);
-  const supports = stackUp(scene.supportEntrance, 0, mm(paper.support));
-  const supportHeight = supports.at(-1)?.bottom ?? 0;
-  const entranceOffset = skin - supportHeight;
   const gridBottom = detectorTop - mm(paper.gridGap);
   const faces = faceDepths_mm(scene).map((depth_mm) => skin + depth_mm);
-  const drawnWidth_px = (2 * widest + recede.right * deepest) * px_per_mm;
-  const shorten = (at: number, drawn: number, length_mm: number): Shortened[] =>
-    drawn < 0.98 * length_mm ? [{ at, length_mm, factor: length_mm / drawn }] : [];
 
   return {
     width_px,
     height_px,
     px_per_mm,
     origin_px: {
-      x: (width_px - drawnWidth_px) / 2 + widest * px_per_mm,
-      y: shares.source * height_px + (px_per_mm * (spare - gap - air)) / 2,
+      x: (width_px - page.width_px) / 2 + widest * px_per_mm,
+      y: shares.source * height_px + (px_per_mm * Math.max(0, spare - below - above)) / 2,
     },
     along,
-    body: { halfWidth, depth },
-    filter: { top: shares.filter * air, bottom: shares.filter * air + mm(paper.filter) },
-    supportEntrance: supports.map(({ top, bottom }) => ({
-      top: top + entranceOffset,
-      bottom: bottom + entranceOffset,
-    })),
+    body,
+    filter: { top: shares.filter * above, bottom: shares.filter * above + mm(paper.filter) },
+    supportEntrance: stackUp(scene.supportEntrance, above, least),
     layers: scene.layers.map((_, i) => ({ top: faces[i], bottom: faces[i + 1] })),
     skin,
     exit,
-    supportExit: stackUp(scene.supportExit, exit, mm(paper.support)),
+    supportExit: stackUp(scene.supportExit, exit, least),
     detail: scene.detail && skin + scene.detail.centreDepth_mm,
     grid: scene.grid && { top: gridBottom - mm(paper.grid), bottom: gridBottom },
     detector: { top: detectorTop, bottom: detectorTop + mm(paper.detector) },
     shortened: [
-      ...shorten(shares.air * air, air, toSkin),
-      ...shorten(
-        exit + 0.42 * (gap - (scene.grid ? mm(paper.grid + paper.gridGap) : 0)),
-        gap,
-        gap_mm,
-      ),
+      ...shorten(shares.breakAbove * above, above, freeAbove),
+      ...shorten(exit + behind + shares.gap * (below - gridHeight), below, freeBelow),
     ],
     halfField: (drawn) => halfFieldAt(along.distanceAt(drawn)),
   };

@@ -71,9 +71,21 @@ describe('the layout of the stack', () => {
 
   test('free air above the patient is shortened, and the drawing knows by how much', () => {
     const [air] = layout.shortened;
-    expect(air.length_mm).toBe(850);
-    expect(air.factor).toBeCloseTo(850 / layout.skin, 9);
+    // 850 mm to the skin less 2 mm of support.
+    expect(air.length_mm).toBe(848);
+    expect(air.factor).toBeCloseTo(848 / layout.supportEntrance[0].top, 9);
     expect(air.factor).toBeGreaterThan(1);
+  });
+
+  test('a thick support keeps its true height, and free air ends where it begins', () => {
+    const foam = { name: 'pad', material: 'foam', family: 'plastic' as const, thickness_mm: 40 };
+    const padded = stackLayout({ ...sampleScene, supportEntrance: [foam] }, 440, 640);
+    const [{ top, bottom }] = padded.supportEntrance;
+    expect(bottom - top).toBeCloseTo(40, 9);
+    expect(bottom).toBeCloseTo(padded.skin, 9);
+    expect(padded.along.distanceAt(top)).toBeCloseTo(810, 9);
+    expect(padded.shortened[0].at).toBeLessThan(top);
+    expect(padded.filter.bottom).toBeLessThan(top);
   });
 
   test('the detail stands at its depth in the patient', () => {

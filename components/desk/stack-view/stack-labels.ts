@@ -6,12 +6,14 @@ import type { View } from '../../../scenes/view.js';
 import { formatEntry } from '../../charts/format.js';
 import { placeAlong } from '../../charts/place-along.js';
 
-/** A label on the page: its words, its left edge and top, and the place it speaks of, in px. */
+/** A label on the page: its words, its left edge, top and width, and the place it speaks of, in px. */
 export interface PlacedLabel {
   readonly id: string;
   readonly words: string;
   readonly left: number;
   readonly top: number;
+  /** As the words are set, near enough. */
+  readonly width: number;
   readonly anchor: readonly [number, number];
   /** True where a line must lead from the place to the label. */
   readonly leads: boolean;
@@ -80,9 +82,9 @@ function rightWishes(scene: StackScene, layout: StackLayout): Wish[] {
   const air = layout.shortened
     .filter(({ at }) => at < layout.skin)
     .map(
-      ({ at, length_mm }): Wish => ({
+      ({ at }): Wish => ({
         id: 'air',
-        words: `${millimetres(length_mm)} to the skin`,
+        words: `${millimetres(scene.sourceToSkin_mm)} to the skin`,
         at: [layout.halfField(at)[0], -at, 0],
         dx: 18,
         dy: 0,
@@ -98,7 +100,7 @@ function rightWishes(scene: StackScene, layout: StackLayout): Wish[] {
 }
 
 const isBeside = (a: PlacedLabel, b: PlacedLabel): boolean =>
-  a.left + width_px(a.words) <= b.left || b.left + width_px(b.words) <= a.left;
+  a.left + a.width <= b.left || b.left + b.width <= a.left;
 
 /** Moves a label down past all it would stand on. */
 function clear(label: PlacedLabel, others: readonly PlacedLabel[]): PlacedLabel {
@@ -110,6 +112,12 @@ function clear(label: PlacedLabel, others: readonly PlacedLabel[]): PlacedLabel 
     }
   }
   return top === label.top ? label : { ...label, top, leads: true };
+}
+
+/** Left edge of a label that wants to stand `dx` right of its place: left of it where the page ends. */
+function leftEdge(x: number, dx: number, width: number, page: number): number {
+  const fits = x + dx + width <= page;
+  return Math.max(2, fits ? x + dx : Math.min(x - dx - width, page - width));
 }
 
 /** All labels of a view, none on another; those far from what they name lead there by a line. */
@@ -132,9 +140,9 @@ export function stackLabels(scene: StackScene, layout: StackLayout, view: View):
     );
     return placed.map(({ id, words, anchor, dx, dy }, i) => {
       const moved = Math.abs(tops[i] + labelHeight_px / 2 - anchor[1] - dy) > own_px;
-      const widest = layout.width_px - width_px(words);
-      const left = Math.max(2, Math.min(anchor[0] + dx, widest));
-      return { id, words, anchor, left, top: tops[i], leads: moved || id === 'detail' };
+      const width = width_px(words);
+      const left = leftEdge(anchor[0], dx, width, layout.width_px);
+      return { id, words, anchor, left, width, top: tops[i], leads: moved || id === 'detail' };
     });
   };
   const labels = onColumn(leftWishes(scene, layout, tilt, view.zoom));

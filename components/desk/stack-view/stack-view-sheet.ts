@@ -68,7 +68,7 @@ export const stackViewSheet = css`
   }
   .from {
     position: absolute;
-    inset: 2px 4px auto auto;
+    inset: 2px auto auto 2px;
     margin: 0;
     color: var(--soft);
     pointer-events: none;

@@ -49,7 +49,7 @@ describe('labels beside the stack', () => {
         for (const b of labels.slice(i + 1)) {
           const apart = Math.abs(a.top - b.top) >= 17 - 1e-9;
           const [first, second] = a.left < b.left ? [a, b] : [b, a];
-          const beside = first.left + 6.9 * first.words.length <= second.left;
+          const beside = first.left + first.width <= second.left;
           expect(apart || beside, `${a.words} on ${b.words}`).toBe(true);
         }
       });

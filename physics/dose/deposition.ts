@@ -3,7 +3,7 @@ import type { Stack } from '../stack/stack.js';
 import { fieldArea_cm2 } from './field-area.js';
 
 /** 1 keV in mJ, from the exact elementary charge (SI 2019). */
-const mJ_per_keV = 1.602176634e-13;
+export const mJ_per_keV = 1.602176634e-13;
 
 export interface Deposition {
   /** Energy imparted to the patient inside the field, mJ. */

@@ -138,7 +138,11 @@ export const stackViewSheet = css`
     color: var(--ink);
     border-block-end-color: var(--ink);
   }
-  button:hover,
+  button:disabled {
+    cursor: default;
+    opacity: 0.6;
+  }
+  button:hover:enabled,
   summary:hover {
     color: var(--ink);
   }
@@ -209,6 +213,9 @@ export const stackViewSheet = css`
   @media print {
     .views,
     details,
+    .turned .label,
+    .turned .leaders,
+    .from,
     .place {
       display: none;
     }

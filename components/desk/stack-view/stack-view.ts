@@ -5,7 +5,7 @@ import { pivotOnPage } from '../../../scenes/projection.js';
 import { type StackAnchors, stackAnchors } from '../../../scenes/stack-anchors.js';
 import { type StackLayout, stackLayout } from '../../../scenes/stack-layout.js';
 import type { Shading, StackScene } from '../../../scenes/stack-scene-data.js';
-import { isSectionView, type View, viewWords } from '../../../scenes/view.js';
+import { isSectionView, sectionView, type View, viewWords } from '../../../scenes/view.js';
 import { type PresetName, presetNames, presetView } from '../../../scenes/view-presets.js';
 import { drawingSheet } from '../sheets/drawing-sheet.js';
 import { pageInks } from './page-inks.js';
@@ -96,7 +96,9 @@ export class StackView extends LitElement {
       {
         stage: this.stage,
         view: () => this.looking.view,
-        change: (view) => this.looking.go(view, null),
+        change: (view) => {
+          if (this.picture.isSolid) this.looking.go(view, null);
+        },
         pivot: () => (this.layout ? pivotOnPage(this.layout) : [0, 0]),
       },
       this.listening.signal,
@@ -134,7 +136,7 @@ export class StackView extends LitElement {
 
   private onKey(event: KeyboardEvent) {
     const answer = keyAnswer(event, this.looking.view);
-    if (!answer) return;
+    if (!answer || !this.picture.isSolid) return;
     event.preventDefault();
     if ('preset' in answer) this.go(answer.preset);
     else this.looking.go(answer.view, null);
@@ -165,7 +167,8 @@ export class StackView extends LitElement {
   }
 
   private overlay(scene: StackScene, layout: StackLayout) {
-    const { view } = this.looking;
+    // The flat section that stands in cannot be turned.
+    const view = this.picture.isSolid ? this.looking.view : sectionView;
     const isTurned = !isSectionView(view);
     const hasLabels = this.labels === 'all' || (this.labels === 'turned' && isTurned);
     return html`${hasLabels ? stackOverlay(scene, layout, view) : nothing}
@@ -182,7 +185,7 @@ export class StackView extends LitElement {
       <div class="views" part="views" role="group" aria-label="Views">
         ${presetNames.map(
           (name) =>
-            html`<button type="button" aria-pressed=${this.looking.preset === name} @click=${() => this.go(name)}>${name}</button>`,
+            html`<button type="button" ?disabled=${!this.picture.isSolid} aria-pressed=${this.looking.preset === name} @click=${() => this.go(name)}>${name}</button>`,
         )}
       </div>
       <details part="table"><summary>as a table</summary><div class="sheet">${stackTable(scene)}</div></details>
@@ -191,8 +194,8 @@ export class StackView extends LitElement {
 
   override render() {
     const { shown: scene, layout, anchors } = this;
-    return html`<div class="stage ${this.picture.isSolid ? 'solid' : 'flat'}" part="stage" role="application" tabindex="0"
-        aria-label=${scene ? stackWords(scene) : 'No stack to show.'} aria-describedby="keys"
+    return html`<div class="stage ${this.picture.isSolid ? 'solid' : 'flat'} ${isSectionView(this.looking.view) ? '' : 'turned'}" part="stage" role="application" tabindex="0"
+        aria-label=${scene ? stackWords(scene) : 'No stack to show.'} aria-describedby=${this.picture.isSolid ? 'keys' : nothing}
         aria-roledescription="layer view" @keydown=${this.onKey}>
         <div class="place"></div>
         ${scene && layout && anchors ? [sectionFallback(scene, layout, anchors), this.overlay(scene, layout)] : nothing}

@@ -205,7 +205,7 @@ describe('stack-view', () => {
     expect(getComputedStyle(inside('.section')).display).to.equal('none');
   });
 
-  it('is the flat section where there is no WebGL2, and still answers keys and anchors', async () => {
+  it('is the flat section where there is no WebGL2, and still tells its places; keys are left to the browser', async () => {
     element.remove();
     const { getContext } = HTMLCanvasElement.prototype;
     HTMLCanvasElement.prototype.getContext = () => null;
@@ -219,7 +219,12 @@ describe('stack-view', () => {
       await rest(200);
       expect(isSolid()).to.equal(false);
       expect(inside('.section').querySelectorAll('.layer')).to.have.length(3);
-      expect(key('3')).to.equal(false);
+      const [label] = element.shadowRoot?.querySelectorAll<HTMLElement>('.label') ?? [];
+      const { left, top } = label.style;
+      expect(key('3')).to.equal(true);
+      await rest(50);
+      expect([label.style.left, label.style.top]).to.deep.equal([left, top]);
+      expect(inside<HTMLButtonElement>('.views button').disabled).to.equal(true);
     } finally {
       HTMLCanvasElement.prototype.getContext = getContext;
     }

@@ -49,7 +49,7 @@ export const absorbedAlong = (point: OperatingPoint): AbsorbedAlong | null => {
   return {
     technique: technique.name,
     size: size.name,
-    faces_mm: thicknesses.reduce((faces, t) => [...faces, faces[faces.length - 1] + t], [0]),
+    faces_mm: [0, ...thicknesses.map((_, k) => sumTo(thicknesses, k + 1))],
     layers: cut.layerOf,
     energy_mJ_per_mm: total.map((energy, k) => perFrame(energy, thicknesses[k])),
     fromScattered_mJ_per_mm: total.map((energy, k) =>
@@ -105,3 +105,6 @@ const primaryDeposits_keV_per_mm2 = (skin: Spectrum, layers: readonly StackLayer
     return energySum(skin, left);
   });
 };
+
+const sumTo = (values: readonly number[], end: number): number =>
+  values.slice(0, end).reduce((sum, value) => sum + value, 0);

@@ -1,11 +1,14 @@
+import { type AbsorbedAlong, absorbedAlong } from '../../physics/absorbed-along.js';
 import { type AlongBeam, alongBeam } from '../../physics/along-beam.js';
 import type { ParsedCase } from '../../physics/case/index.js';
 import { sharedWith } from '../../physics/case/shared-with.js';
-import { operatingPoint } from '../../physics/operating-point.js';
+import type { CheckRequest, NoCheck } from '../../physics/check-by-transport/index.js';
+import { type OperatingPoint, operatingPoint } from '../../physics/operating-point.js';
 import type { Weighing } from '../../physics/results.js';
 import { sizesOf } from '../../physics/stack/sizes.js';
 import type { SweepSetting } from '../../physics/sweep/sweep-setting.js';
 import { weigh } from '../../physics/weigh.js';
+import { type CheckStart, startCheck } from './check-start.js';
 import { type ScanRequest, scanSlice } from './scan-slice.js';
 
 /**
@@ -19,6 +22,10 @@ export interface EvaluationHost {
   /** Primary photons along the axis and the spectrum at the detail, per technique that has them. */
   readonly along: (size: string) => AlongBeam[];
   readonly scan: (request: ScanRequest) => SweepSetting[];
+  /** Energy absorbed along the depth, per technique that has it; much more work than `weigh`. */
+  readonly absorbed: (size: string) => AbsorbedAlong[];
+  /** A transport run made ready to fly, with the ways of its first photons. */
+  readonly check: (request: CheckRequest) => CheckStart | NoCheck;
 }
 
 export function evaluationHost(): EvaluationHost {
@@ -27,19 +34,23 @@ export function evaluationHost(): EvaluationHost {
     if (!loaded) throw new Error('no case was handed over');
     return loaded;
   };
-  const sizesNamed = (name: string) => sizesOf(parsed().case.patient).filter((size) => size.name === name);
+  const sizesNamed = (name: string) =>
+    sizesOf(parsed().case.patient).filter((size) => size.name === name);
+  const pointsAt = (name: string): OperatingPoint[] => {
+    const { case: c } = parsed();
+    const [size] = sizesNamed(name);
+    if (!size) return [];
+    const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
+    return points.filter((point): point is OperatingPoint => 'made' in point);
+  };
   return {
     load: (next) => {
       loaded = { case: sharedWith(loaded?.case, next.case), assumed: next.assumed };
     },
     weigh: (name) => weigh(parsed(), sizesNamed(name)),
-    along: (name) => {
-      const { case: c } = parsed();
-      const [size] = sizesNamed(name);
-      if (!size) return [];
-      const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
-      return points.flatMap((point) => ('made' in point ? [alongBeam(point)] : []));
-    },
+    along: (name) => pointsAt(name).map(alongBeam),
     scan: (request) => scanSlice(parsed().case, request),
+    absorbed: (name) => pointsAt(name).flatMap((point) => absorbedAlong(point) ?? []),
+    check: (request) => startCheck(parsed().case, request),
   };
 }

@@ -1,8 +1,11 @@
 import { type Remote, wrap } from 'comlink';
+import type { AbsorbedAlong } from '../../physics/absorbed-along.js';
 import type { AlongBeam } from '../../physics/along-beam.js';
 import type { ParsedCase } from '../../physics/case/index.js';
+import type { CheckRequest, NoCheck } from '../../physics/check-by-transport/index.js';
 import type { Weighing } from '../../physics/results.js';
 import type { SweepSetting } from '../../physics/sweep/sweep-setting.js';
+import type { CheckStart } from './check-start.js';
 import type { EvaluationHost } from './evaluation-host.js';
 import type { ScanRequest } from './scan-slice.js';
 
@@ -12,6 +15,8 @@ export interface Evaluator {
   readonly weigh: (size: string) => Promise<Weighing>;
   readonly scan: (request: ScanRequest) => Promise<SweepSetting[]>;
   readonly along: (size: string) => Promise<AlongBeam[]>;
+  readonly absorbed: (size: string) => Promise<AbsorbedAlong[]>;
+  readonly check: (request: CheckRequest) => Promise<CheckStart | NoCheck>;
   readonly end: () => void;
 }
 
@@ -38,7 +43,9 @@ export function startEvaluator(make: () => Worker): Evaluator {
   const host = (): Remote<EvaluationHost> => {
     if (remote) return remote;
     worker = make();
-    worker.addEventListener('error', (event) => lose(event.message || 'the worker could not start'));
+    worker.addEventListener('error', (event) =>
+      lose(event.message || 'the worker could not start'),
+    );
     worker.addEventListener('messageerror', () => lose('the worker’s answer could not be read'));
     remote = wrap<EvaluationHost>(worker);
     return remote;
@@ -46,7 +53,9 @@ export function startEvaluator(make: () => Worker): Evaluator {
   const ask = <T>(call: (to: Remote<EvaluationHost>) => Promise<T>): Promise<T> =>
     new Promise((resolve, reject) => {
       pending.add(reject);
-      call(host()).then(resolve, reject).finally(() => pending.delete(reject));
+      call(host())
+        .then(resolve, reject)
+        .finally(() => pending.delete(reject));
     });
 
   return {
@@ -54,6 +63,8 @@ export function startEvaluator(make: () => Worker): Evaluator {
     weigh: (size) => ask((to) => to.weigh(size)),
     scan: (request) => ask((to) => to.scan(request)),
     along: (size) => ask((to) => to.along(size)),
+    absorbed: (size) => ask((to) => to.absorbed(size)),
+    check: (request) => ask(async (to) => to.check(request)),
     end: () => lose('the evaluator was ended'),
   };
 }

@@ -16,7 +16,10 @@ export interface ScanRequest {
  * Current with another potential and filter, everything else as it is, one quantity held equal to
  * what Current delivers as set. Empty where Current itself cannot be computed.
  */
-export function scanSlice(c: Case, { size: name, filter, potentials_kV, hold }: ScanRequest): SweepSetting[] {
+export function scanSlice(
+  c: Case,
+  { size: name, filter, potentials_kV, hold }: ScanRequest,
+): SweepSetting[] {
   const size = sizesOf(c.patient).find((entry) => entry.name === name);
   const [technique] = c.techniques;
   const current = size && operatingPoint(c, technique, size);

@@ -1,21 +1,24 @@
 import type { z } from 'zod';
 import { type Path, printedPath, valueAt } from './printed.js';
-import { elementOf, isPrefilled, shapeFor } from './schema-walk.js';
+import { defaultOf, elementOf, shapeFor } from './schema-walk.js';
 
 /** Keys that hold prose: they change no result, so no default of theirs is an assumption. */
 export const proseKeys: ReadonlySet<string> = new Set(['title', 'question', 'dossier.text']);
+
+/** Mass fractions that the file leaves out come from the formula it gives. */
+const fromFormula = /^materials\[\d+\]\.massFractions$/;
 
 /**
  * Every path whose value is a default because the input has no key there, in the order of the
  * schema: `room.tube.anodeAngle_deg`.
  *
- * @param input the case as handed in.
+ * @param input the case as handed in, the rows of its files in place.
  * @param parsed the same case with defaults filled in.
  */
 export const assumedPaths = (schema: z.core.$ZodType, input: unknown, parsed: unknown): string[] =>
   defaultedPaths(schema, input, parsed, [])
     .map(printedPath)
-    .filter((path) => !proseKeys.has(path));
+    .filter((path) => !proseKeys.has(path) && !fromFormula.test(path));
 
 const defaultedPaths = (
   schema: z.core.$ZodType,
@@ -36,7 +39,7 @@ const defaultedPaths = (
     const value = valueAt(parsed, [key]);
     const at = [...path, key];
     if (value === undefined) return [];
-    if (given === undefined && !isPrefilled(field)) return [at];
+    if (given === undefined && defaultOf(field) !== undefined) return [at];
     return defaultedPaths(field, given, value, at);
   });
 };

@@ -1,3 +1,4 @@
+import { formulaFractions } from './formulas.js';
 import { type Path, printedPath, valueAt } from './printed.js';
 
 /** A default that depends on another part of the case and there replaces the usual one. */
@@ -7,21 +8,32 @@ export interface ContextDefault {
 }
 
 /**
- * Defaults that depend on context: in a room without a grid no technique has one in; subtraction
- * has a mask of one frame.
+ * Defaults that depend on context: a material given by formula has the mass fractions of the formula;
+ * in a room without a grid no technique has one in; subtraction has a mask of one frame.
  *
  * @param input a case, parsed or as read.
  */
-export const contextDefaults = (input: unknown): readonly ContextDefault[] => {
-  const techniques = valueAt(input, ['techniques']);
-  if (!Array.isArray(techniques)) return [];
-  const hasGrid = (valueAt(input, ['room', 'grid']) ?? null) !== null;
-  return techniques.flatMap((technique: unknown, index) => [
-    ...(hasGrid ? [] : [{ path: ['techniques', index, 'grid'], value: 'out' }]),
+export const contextDefaults = (input: unknown): readonly ContextDefault[] => [
+  ...listAt(input, 'materials').flatMap((material, index) => {
+    const formula = valueAt(material, ['formula']);
+    const read = typeof formula === 'string' ? formulaFractions(formula.slice(0, 200)) : {};
+    return 'massFractions' in read
+      ? [{ path: ['materials', index, 'massFractions'], value: read.massFractions }]
+      : [];
+  }),
+  ...listAt(input, 'techniques').flatMap((technique, index) => [
+    ...((valueAt(input, ['room', 'grid']) ?? null) === null
+      ? [{ path: ['techniques', index, 'grid'], value: 'out' }]
+      : []),
     ...(valueAt(technique, ['acquisition', 'mode']) === 'subtraction'
       ? [{ path: ['techniques', index, 'acquisition', 'maskFrames'], value: 1 }]
       : []),
-  ]);
+  ]),
+];
+
+const listAt = (input: unknown, key: string): readonly unknown[] => {
+  const list = valueAt(input, [key]);
+  return Array.isArray(list) ? list : [];
 };
 
 /** The same case with those defaults filled in where the file is silent. */

@@ -7,6 +7,7 @@ export const defaults = {
   title: '',
   question: '',
   materials: [],
+  material: { formula: null, massFractions: {} },
   room: {
     name: 'Room',
     tube: {

@@ -46,7 +46,7 @@ export const parseCase = (json: unknown, files: CaseFiles = {}): ParsedCase | Ca
   if (!parsed.success || faults.length > 0) return { faults };
   return {
     case: deepFrozen(parsed.data),
-    assumed: assumedPaths(caseSchema, current.input, parsed.data),
+    assumed: assumedPaths(caseSchema, read.input, parsed.data),
   };
 };
 

@@ -13,6 +13,7 @@ const remedies: Readonly<Record<string, string>> = {
   material: "name a built-in material, an element or one of the case's materials",
   carrier: "name the liquid that carries the agent, or null for the agent's own",
   'materials.density_g_per_cm3': 'enter the density in g/cm³',
+  'materials.formula': 'write a formula such as BaSO4, or give massFractions',
   'materials.massFractions': 'list element symbols with their mass fractions',
   room: 'describe the room',
   'tube.anodeAngle_deg': 'enter the nameplate angle',

@@ -11,6 +11,7 @@ import { monoChecks } from './mono-checks.js';
 import { optimumChecks } from './optimum-checks.js';
 import { qualityChecks } from './quality-checks.js';
 import { ruleChecks } from './rule-checks.js';
+import { backscatterChecks, scatterChecks } from './scatter-checks.js';
 import { tradeChecks } from './trade-checks.js';
 import { tubeChecks } from './tube-checks.js';
 
@@ -30,6 +31,8 @@ export const publishedChecks = (): readonly CheckRow[] => [
   ...qualityChecks(),
   ...monoChecks(),
   ...detectorChecks(),
+  ...scatterChecks(),
+  ...backscatterChecks(),
   ...optimumChecks(),
   ...tradeChecks(),
   ...ruleChecks(),

@@ -12,6 +12,8 @@ export const shippedTables = [
   'agents',
   'gadolinium_equivalence',
   'detectors',
+  'scatter_spr',
+  'backscatter',
   'min_hvl',
   'trade_facts',
 ] as const;

@@ -1,5 +1,6 @@
 import { elementBySymbol, materialNames, namedMaterial } from '../../../materials/index.js';
 import { type Fault, faultAt } from '../fault.js';
+import { formulaFractions } from '../formulas.js';
 import type { Path } from '../printed.js';
 import type { Case, UserMaterial } from '../schema.js';
 import { unknownNameFaults } from './known-name.js';
@@ -32,6 +33,13 @@ const compositionFaults = (material: UserMaterial, path: Path): Fault[] => {
         faultAt([...at, symbol], share, rule, 'write the symbol with its usual capitals'),
       );
     }
+  }
+  if (material.formula !== null && Object.keys(massFractions).length === 0) {
+    const read = formulaFractions(material.formula);
+    const isRefused = 'rule' in read;
+    return isRefused
+      ? [...faults, faultAt([...path, 'formula'], material.formula, read.rule, read.remedy)]
+      : faults;
   }
   const sum = Object.values(massFractions).reduce((total, share) => total + share, 0);
   if (Math.abs(sum - 1) > sumTolerance) {

@@ -5,7 +5,11 @@ import { d, fraction, materialName, name, positive } from './common.js';
 export const userMaterialSchema = z.strictObject({
   name,
   density_g_per_cm3: z.number().positive().max(30),
-  massFractions: z.record(z.string().regex(/^[A-Z][a-z]?$/), fraction),
+  /** Chemical formula, `BaSO4`, in place of mass fractions; the parser fills these in from it. */
+  formula: z.string().min(1).max(200).nullable().default(d.material.formula),
+  massFractions: z
+    .record(z.string().regex(/^[A-Z][a-z]?$/), fraction)
+    .default(d.material.massFractions),
 });
 
 export const amountSchema = z.strictObject({

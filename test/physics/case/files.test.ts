@@ -43,6 +43,16 @@ describe('files that a case names', () => {
     ]);
   });
 
+  it('are no assumption, but a weight they leave out is', () => {
+    const c = withSizes();
+    c.techniques[0].control = { curve: 'control.csv' };
+    const result = parseCase(c, { 'sizes.csv': 'thickness_mm\n180\n', 'control.csv': curve });
+    const assumed = 'case' in result ? result.assumed : [];
+    expect(assumed.filter((path) => /sizes|control/.test(path))).toEqual([
+      'patient.sizes[0].weight',
+    ]);
+  });
+
   it('give the control curve', () => {
     const result = parseCase(withCurve(), { 'control.csv': curve });
     expect('case' in result && result.case.techniques[0].control).toMatchObject({

@@ -58,6 +58,15 @@ describe('the hash of a case', () => {
     expect(changed((c) => delete c.techniques[0].acquisition.maskFrames)).toBe(original);
   });
 
+  it('holds the formula of a material, not the atomic weights behind it', () => {
+    const material = { name: 'my salt', density_g_per_cm3: 2.17, formula: 'NaCl' };
+    const byFormula = changed((c) => (c.materials = [material]));
+    const parsedAgain = parseCase({ ...soundCase(), materials: [material] });
+    if ('faults' in parsedAgain) throw new Error('refused');
+    expect(Object.keys(parsedAgain.case.materials[0].massFractions)).toEqual(['Na', 'Cl']);
+    expect(hashOf(parsedAgain.case)).toBe(byFormula);
+  });
+
   it('changes with anything that changes a result', () => {
     const original = hashOf(soundCase());
     expect(changed((c) => (c.room.tube.anodeAngle_deg = 11))).not.toBe(original);

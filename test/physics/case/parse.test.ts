@@ -141,6 +141,15 @@ describe('a sound case', () => {
     expect(parsed(c).case.techniques[1].potential_kV).toBe(kV);
   });
 
+  it('may give a material by formula and density', () => {
+    const c = soundCase();
+    c.materials = [{ name: 'my salt', density_g_per_cm3: 2.17, formula: 'NaCl' }];
+    c.patient.layers[0].material = 'my salt';
+    const [{ massFractions }] = parsed(c).case.materials;
+    expect(massFractions.Na).toBeCloseTo(22.99 / 58.44, 4);
+    expect(massFractions.Na + massFractions.Cl).toBeCloseTo(1, 12);
+  });
+
   it('keeps markup in names as the text it is', () => {
     const c = soundCase();
     c.techniques[1].name = '<img src=x onerror=alert(1)> & "quotes"';

@@ -81,6 +81,18 @@ export const names: readonly BrokenCase[] = [
     'must not be empty',
   ),
   changed(
+    'a formula of an element that does not exist',
+    (c) => (c.materials[0] = { name: 'x', density_g_per_cm3: 1, formula: 'Qq2O' }),
+    'materials[0].formula',
+    'which is no element from H to U',
+  ),
+  changed(
+    'a material of nothing',
+    (c) => (c.materials[0] = { name: 'x', density_g_per_cm3: 1 }),
+    'materials[0].massFractions',
+    'must sum to 1 within 0.02',
+  ),
+  changed(
     'an element that does not exist',
     (c) => (c.materials[0].massFractions = { H: 0.5, Qq: 0.5 }),
     'materials[0].massFractions.Qq',

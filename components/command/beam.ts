@@ -40,7 +40,7 @@ export const beamCommand = (io: Io): Command =>
   new Command('beam')
     .summary('spectrum and quality of one beam')
     .description(
-      'Spectrum and quality of one tungsten-anode beam at a point on its axis. In vacuum unless\n' +
+      'Spectrum and quality of one tungsten-anode beam at a point on its axis. In vacuum unless ' +
         '--air; everything between anode and point must be listed in --through.',
     )
     .requiredOption(

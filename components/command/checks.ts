@@ -15,8 +15,8 @@ export const checksCommand = (io: Io): Command =>
   new Command('checks')
     .summary('every published check beside what Stratabeam computes')
     .description(
-      'Every published (or, where said, separately computed) value beside what Stratabeam\n' +
-        'computes, with tolerance, source and provenance. Legal limits quoted from memory are an\n' +
+      'Every published (or, where said, separately computed) value beside what Stratabeam ' +
+        'computes, with tolerance, source and provenance. Legal limits quoted from memory are an ' +
         'unconfirmed source, never met. Exit code 1 when a check falls short.',
     )
     .option('--summary', 'only the count and what fell short', false)

@@ -26,7 +26,7 @@ export const matterCommand = (io: Io): Command =>
   new Command('matter')
     .summary('attenuation of one element, compound or material')
     .description(
-      'Attenuation of an element ("copper", "Cu"), a named material ("soft tissue") or a chemical\n' +
+      'Attenuation of an element ("copper", "Cu"), a named material ("soft tissue") or a chemical ' +
         'formula with its density ("BaSO4" --density 4.5), 1 keV to 20 MeV, narrow beam.',
     )
     .argument('<name>', 'element, named material or formula')

@@ -8,17 +8,19 @@ import { readCase } from './read-case.js';
 import { Shortfall } from './shortfall.js';
 import { weighCsv } from './weigh-csv.js';
 import { weighTables } from './weigh-tables.js';
+import { workedCases } from './worked-cases.js';
 
 /** `weigh`: every quantity of every technique at every size, and the comparisons. */
 export const weighCommand = (io: Io): Command =>
   new Command('weigh')
     .summary('every technique at every size, and the comparisons')
     .description(
-      'Every quantity of every technique of a case at every patient size, and each Proposed\n' +
-        'technique against Current with one quantity after another held constant. Exit code 1\n' +
+      'Every quantity of every technique of a case at every patient size, and each Proposed ' +
+        'technique against Current with one quantity after another held constant. Exit code 1 ' +
         'when something forbids a Proposed technique.',
     )
     .argument('<case>', 'a case file, NAME.case.json')
+    .addHelpText('after', workedCases)
     .action((path: string, _: unknown, command: Command) =>
       runWeigh(io, path, command.optsWithGlobals<Format>()),
     );

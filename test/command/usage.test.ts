@@ -15,6 +15,12 @@ describe('the command line', () => {
     expect(out).toContain(cautions);
   });
 
+  it('names the worked cases under weigh --help', async () => {
+    const { out } = await runCommand(['weigh', '--help']);
+    expect(out).toMatch(/Worked cases .* in components\/examples:\n/);
+    expect(out).toMatch(/ aortography\.case\.json +Aortography, abdomen\n/);
+  });
+
   it('prints its version', async () => {
     const { code, out } = await runCommand(['--version']);
     expect(code).toBe(0);

@@ -34,8 +34,8 @@ export function scaleWords({ shortened, skin }: StackLayout): string {
   return `to scale; free air shortened ${parts.join(', ')}`;
 }
 
-const inkWords = ({ quantity, unit, scale }: Shading): string =>
-  `${[quantity, unit].filter(Boolean).join(', ')}, ${scale} scale`;
+const inkWords = ({ quantity, unit }: Shading): string =>
+  [quantity, unit].filter(Boolean).join(', ');
 
 /** The quantity shown, or a choice between several. */
 function inkChoice(
@@ -43,9 +43,11 @@ function inkChoice(
   choices: readonly Shading[],
   choose: (quantity: string) => void,
 ) {
-  if (choices.length < 2) return html`<span>ink: ${inkWords(shown)}</span>`;
+  const name = `ink, ${shown.scale} scale:`;
+  if (choices.length < 2) return html`<span>${name} ${inkWords(shown)}</span>`;
   return html`<label
-    >ink: <select @change=${(event: Event) => choose((event.target as HTMLSelectElement).value)}>
+    >${name}
+    <select @change=${(event: Event) => choose((event.target as HTMLSelectElement).value)}>
       ${choices.map(
         (each) =>
           html`<option value=${each.quantity} ?selected=${each.quantity === shown.quantity}>${inkWords(each)}</option>`,

@@ -26,7 +26,7 @@ export function stackShadingsOf(model: DeskModel): readonly Shading[] {
   const shadings: Shading[] = profiles.some(Boolean)
     ? [
         {
-          quantity: 'mean absorbed dose in the layer',
+          quantity: 'layer absorbed dose',
           unit: 'mGy per frame',
           scale: 'linear',
           extent: 'body',

@@ -93,6 +93,10 @@ export const stackViewSheet = css`
     flex: 1 1 100%;
     white-space: nowrap;
   }
+  .legend label {
+    flex: 1;
+    min-width: 0;
+  }
   .legend svg {
     flex: none;
     margin-inline-start: -8px;
@@ -117,7 +121,10 @@ export const stackViewSheet = css`
     border: 0;
     border-block-end: 1px dotted var(--soft);
     padding: 0;
-    max-width: 100%;
+    margin: 0;
+    width: 100%;
+    text-overflow: ellipsis;
+    cursor: pointer;
   }
   option {
     color: var(--ink);

@@ -252,8 +252,8 @@ describe('stack-view', () => {
     await element.updateComplete;
     const choice = inside<HTMLSelectElement>('select');
     expect([...choice.options].map((option) => option.text.trim())).to.deep.equal([
-      'primary photons, per mm² and frame, log scale',
-      'energy absorbed per depth, mJ/cm, linear scale',
+      'primary photons, per mm² and frame',
+      'energy absorbed per depth, mJ/cm',
     ]);
     const { frames } = element;
     choice.value = energy.quantity;

@@ -1,11 +1,10 @@
 import { doseAt, exposureAt, figureOfMeritAt } from './at-load.js';
 import { beamQuality } from './beam/index.js';
 import type { Case } from './case/schema.js';
-import { isCurve } from './control.js';
 import { notYetComputed } from './findings.js';
 import { framesPerRun } from './frames.js';
-import { nearestAllowedText } from './limits/nearest-allowed.js';
-import { isAllowed, limitFindings } from './limits.js';
+import { nearestAllowedWords } from './limits/nearest-allowed.js';
+import { isAllowedBySetting, isOfSetting, limitFindings } from './limits.js';
 import type { OperatingPoint } from './operating-point.js';
 import { iodineEquivalent_mg_per_cm2, noiseAt, readoutWeights, sdnrAt } from './readout/index.js';
 import type { Evaluation, Finding } from './results.js';
@@ -86,14 +85,11 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
 
 /** A limit without a remedy of its own names the nearest setting of the room that is allowed. */
 const withNearest = (c: Case, point: OperatingPoint, findings: Finding[]): Finding[] => {
-  if (isAllowed(findings) || isCurve(point.technique.control)) return findings;
-  const nearest = nearestAllowedText(c, point);
-  const words = nearest
-    ? `Nearest allowed: ${nearest}.`
-    : 'No setting of this room is allowed at this size under this control.';
+  if (isAllowedBySetting(findings)) return findings;
+  const { nearest, sentence } = nearestAllowedWords(c, point);
   return findings.map((finding) =>
-    finding.severity === 'limit'
-      ? { ...finding, nearest, message: `${finding.message} ${words}` }
+    isOfSetting(finding)
+      ? { ...finding, nearest, message: `${finding.message} ${sentence}` }
       : finding,
   );
 };

@@ -36,7 +36,9 @@ export const operatingPoint = (
   if (!('stack' in placement)) return placement;
   const written = settingOf(technique);
   const { control } = technique;
-  const curve = isCurve(control) ? curvePointAt(control, size.thickness_mm) : null;
+  const curve = isCurve(control)
+    ? curvePointAt(control, size.thickness_mm, c.room.tube.potential_kV)
+    : null;
   const setting: Setting = curve ? { ...written, ...curve.setting } : written;
   const { spectrum, findings } = outputBeam(prepare(c), setting.potential_kV, setting.filter);
   if (!spectrum) return { findings };
@@ -49,9 +51,12 @@ export const operatingPoint = (
         ],
       };
     }
-    const tubeLoad_mAs = (curve.tubeCurrent_mA * curve.exposureTime_ms) / 1000;
+    const { tubeCurrent_mA, exposureTime_ms } = curve;
+    const tubeLoad_mAs = (tubeCurrent_mA * exposureTime_ms) / 1000;
+    // The curve splits the load, whatever the acquisition says.
+    const acquisition = { ...technique.acquisition, fixed: { tubeCurrent_mA } };
     return {
-      technique,
+      technique: { ...technique, acquisition },
       size,
       made,
       tubeLoad_mAs,

@@ -28,9 +28,11 @@ const tissueHalfValueLayer_mm = 30;
  * Three rules of thumb (common practice, no source) against the model at one size, with Current's
  * filter and grid, by detector air kerma per mAs:
  * raising potential by 15 % doubles it; raising it by 10 kV doubles it; 3 cm more patient halves it.
- * Potentials whose changed partner lies outside the tube's 20–150 kV are left out.
+ * Potentials whose changed partner lies outside the tube's 20–150 kV are left out; a source without
+ * a tube has no potential to raise.
  */
 export const rulesOfThumb = (c: Case, size: Size): RuleDeparture[] => {
+  if (c.room.source) return [];
   const technique = c.techniques[0];
   const kermaPerLoad = (potential_kV: number, at: Size): number | null => {
     const point = operatingPoint(c, technique, at);

@@ -16,5 +16,5 @@ export const settingOf = (technique: Technique): Setting => ({
 });
 
 /** `70 kV, 0.2 Cu` for sentences and tables. */
-export const settingLabel = (setting: Setting): string =>
+export const settingLabel = (setting: Pick<Setting, 'potential_kV' | 'filter'>): string =>
   `${setting.potential_kV} kV, ${setting.filter === 'none' ? 'no filter' : setting.filter}`;

@@ -5,6 +5,7 @@ import { roomAxes, type SweepAxes } from './sweep/axes.js';
 import type { CostName } from './sweep/costs.js';
 import { frontierOf } from './sweep/frontier.js';
 import { type SweepSetting, sweepSetting } from './sweep/sweep-setting.js';
+import { withNearest } from './sweep/with-nearest.js';
 
 /** What is asked of a sweep. */
 export interface SweepRequest {
@@ -32,6 +33,8 @@ export interface Sweep {
     readonly costs: readonly CostName[];
     readonly members: readonly MappedSetting[];
   };
+  /** Name of the detail's agent when it is investigational: every plot says so. */
+  readonly investigationalAgent: string | null;
   readonly findings: readonly Finding[];
 }
 
@@ -48,6 +51,7 @@ export const wholeRoom = (c: Case, holdConstant: HoldConstant = 'sdnr'): SweepRe
 /** One independent part of a sweep: one filter at one size, all potentials. */
 export interface SweepPiece {
   readonly settings: readonly SweepSetting[];
+  readonly investigationalAgent: string | null;
   readonly findings: readonly Finding[];
 }
 
@@ -60,23 +64,46 @@ export const sweepPiece = (c: Case, request: SweepRequest, index: number): Sweep
   const { potentials_kV, filters, sizes } = request.axes;
   const size = sizes[Math.floor(index / filters.length)];
   const filter = filters[index % filters.length];
-  const reference = operatingPoint(c, c.techniques[0], size);
-  if (!('made' in reference)) return { settings: [], findings: reference.findings };
-  const { grid } = c.techniques[0];
+  const [technique] = c.techniques;
+  const reference = operatingPoint(c, technique, size);
+  if (!('made' in reference)) {
+    return { settings: [], investigationalAgent: null, findings: reference.findings };
+  }
+  const { grid } = technique;
+  const { agent } = reference.made.placement.detail;
   return {
     settings: potentials_kV.map((potential_kV) =>
       sweepSetting(c, reference, { potential_kV, filter, grid }, request.holdConstant),
     ),
+    investigationalAgent: agent?.isInvestigational ? agent.name : null,
     findings: [],
   };
 };
 
+/** Settings of one size as they stand in the map: limits name the nearest allowed, the frontier. */
+export const mappedSettings = (
+  settings: readonly SweepSetting[],
+  filters: readonly string[],
+  costs: readonly CostName[],
+): MappedSetting[] => {
+  const isMember = new Set(frontierOf(settings, costs));
+  return withNearest(settings, filters).map((setting, i) => ({
+    ...setting,
+    onFrontier: isMember.has(i),
+  }));
+};
+
 /** Puts pieces together, in order, and finds what no setting beats. */
 export const combineSweep = (request: SweepRequest, pieces: readonly SweepPiece[]): Sweep => {
-  const settings = pieces.flatMap((piece) => piece.settings);
-  const isMember = new Set(frontierOf(settings, request.costs));
-  const mapped = settings.map((setting, i) => ({ ...setting, onFrontier: isMember.has(i) }));
   const { potentials_kV, filters, sizes } = request.axes;
+  const settings = sizes.flatMap((_, s) => {
+    const own = pieces.slice(s * filters.length, (s + 1) * filters.length);
+    return mappedSettings(
+      own.flatMap((piece) => piece.settings),
+      filters,
+      request.costs,
+    );
+  });
   return Object.freeze({
     axes: {
       potential_kV: potentials_kV,
@@ -84,11 +111,13 @@ export const combineSweep = (request: SweepRequest, pieces: readonly SweepPiece[
       size: sizes.map(({ name }) => name),
     },
     holdConstant: request.holdConstant,
-    settings: mapped,
+    settings,
     frontier: {
       costs: request.costs,
-      members: mapped.filter(({ onFrontier }) => onFrontier),
+      members: settings.filter(({ onFrontier }) => onFrontier),
     },
+    investigationalAgent:
+      pieces.find(({ investigationalAgent }) => investigationalAgent)?.investigationalAgent ?? null,
     findings: distinct(pieces.flatMap((piece) => piece.findings)),
   });
 };

@@ -1,42 +1,58 @@
 import type { Case } from '../case/schema.js';
-import { isAllowed } from '../limits.js';
+import { isCurve } from '../control.js';
+import { isAllowedBySetting } from '../limits.js';
 import type { OperatingPoint } from '../operating-point.js';
 import { roomPotentials_kV } from '../scan.js';
 import { type Setting, settingLabel } from '../setting.js';
+import { distance_kV } from '../sweep/nearness.js';
 import { sweepSetting } from '../sweep/sweep-setting.js';
-
-/** Changing to the next filter in the room's list counts as much as this much potential. */
-const filterStep_kV = 5;
 
 /** Settings of the room, nearest to one first: potential in kV, filters by place in the list. */
 const byNearness = (c: Case, from: Setting): Setting[] => {
   const filters = c.room.filters.map(({ name }) => name);
-  const place = filters.indexOf(from.filter);
-  const settings = filters.flatMap((filter, i) =>
+  const here = {
+    potential_kV: from.potential_kV,
+    filterPlace: Math.max(0, filters.indexOf(from.filter)),
+  };
+  const settings = filters.flatMap((filter, filterPlace) =>
     roomPotentials_kV(c).map((potential_kV) => ({
       setting: { potential_kV, filter, grid: from.grid },
-      far:
-        Math.abs(potential_kV - from.potential_kV) +
-        filterStep_kV * Math.abs(i - Math.max(0, place)),
+      far_kV: distance_kV(here, { potential_kV, filterPlace }),
     })),
   );
-  return settings.sort((a, b) => a.far - b.far).map(({ setting }) => setting);
+  return settings.sort((a, b) => a.far_kV - b.far_kV).map(({ setting }) => setting);
 };
 
 /**
- * The nearest setting of the room that nothing forbids at this size under the technique's own
- * control. Looks at every setting, nearest first, and stops at the first allowed.
+ * The nearest setting of the room that is forbidden by nothing another setting could meet, at this
+ * size under the technique's own control; a control curve speaks for its own settings only, so there
+ * the detector air kerma is held. Looks at every setting, nearest first, and stops at the first.
  *
  * @returns null when the room allows none.
  */
-export const nearestAllowed = (c: Case, point: OperatingPoint): Setting | null =>
-  byNearness(c, point.made.setting).find((setting) => {
-    const { values, findings } = sweepSetting(c, point, setting, 'asSet');
-    return values !== null && isAllowed(findings);
-  }) ?? null;
+export const nearestAllowed = (c: Case, point: OperatingPoint): Setting | null => {
+  const hold = isCurve(point.technique.control) ? 'detectorAirKerma' : 'asSet';
+  const allowed = byNearness(c, point.made.setting).find((setting) => {
+    const { values, findings } = sweepSetting(c, point, setting, hold);
+    return values !== null && isAllowedBySetting(findings);
+  });
+  return allowed ?? null;
+};
 
-/** The same in words: `73 kV, 0.1 Cu`. */
-export const nearestAllowedText = (c: Case, point: OperatingPoint): string | null => {
+/** The same as a sentence for a finding, and the setting alone: `73 kV, 0.1 Cu`. */
+export const nearestAllowedWords = (
+  c: Case,
+  point: OperatingPoint,
+): { readonly nearest: string | null; readonly sentence: string } => {
   const setting = nearestAllowed(c, point);
-  return setting && settingLabel(setting);
+  const nearest = setting && settingLabel(setting);
+  const condition = isCurve(point.technique.control)
+    ? 'at the same detector air kerma'
+    : 'under this control';
+  return {
+    nearest,
+    sentence: nearest
+      ? `Nearest allowed ${condition}: ${nearest}.`
+      : `No setting of this room is allowed at this size ${condition}.`,
+  };
 };

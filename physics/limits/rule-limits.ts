@@ -1,9 +1,10 @@
 import type { Rule } from '../case/schema.js';
-import { numberText } from '../number-text.js';
 import type { Finding } from '../results.js';
+import { apartTexts } from './apart-texts.js';
 import type { LimitInputs } from './limit-inputs.js';
 
 type MinimumHvl = Extract<Rule, { kind: 'minimum-hvl' }>;
+type KermaRate = Extract<Rule, { kind: 'kerma-rate' }>;
 type Segment = MinimumHvl['segments'][number];
 
 /** Value of a segment at a potential: linear between its points, the end points' lines beyond. */
@@ -31,13 +32,29 @@ export const minimumHalfValueLayer_mmAl = (
   return segment ? segmentValue_mmAl(segment, potential_kV) : null;
 };
 
-const origin = (rule: Rule): string => `${rule.source}, ${rule.date}, ${rule.provenance}`;
+const origin = ({ source, date, provenance }: Rule): string =>
+  [source, date, provenance].filter((part) => part !== '').join(', ');
+
+/** Text quoted from memory is no law: what meets it is said, and counts as nothing. */
+const unconfirmed = (rule: Rule, path: string, isMet: string, more: Partial<Finding>): Finding[] =>
+  rule.provenance === 'recalled' || rule.provenance === 'assumed'
+    ? [
+        {
+          code: 'ruleUnconfirmed',
+          severity: 'note',
+          message: `${isMet}, but the rule’s text is ${rule.provenance} (${rule.source}): confirm the text, and measure.`,
+          path,
+          ...more,
+        },
+      ]
+    : [];
 
 const minimumHvlFindings = (inputs: LimitInputs, rule: MinimumHvl, path: string): Finding[] => {
   const { potential_kV } = inputs.setting;
   const bound = minimumHalfValueLayer_mmAl(rule, potential_kV);
   const value = inputs.halfValueLayer_mmAl;
   if (value === null) return [];
+  const [is, least] = apartTexts(value, bound ?? 0, 4);
   if (bound === null) {
     return [
       {
@@ -55,44 +72,43 @@ const minimumHvlFindings = (inputs: LimitInputs, rule: MinimumHvl, path: string)
       {
         code: 'minimumHvl',
         severity: 'limit',
-        message: `Half-value layer ${numberText(value, 4)} mm Al is below the ${numberText(bound, 4)} mm Al asked for at ${potential_kV} kV (${origin(rule)}).`,
+        message: `Half-value layer ${is} mm Al is below the ${least} mm Al asked for at ${potential_kV} kV (${origin(rule)}).`,
         path,
         value,
         bound,
       },
     ];
   }
-  // A modelled value is no compliance test, and text quoted from memory is no law.
-  return rule.provenance === 'recalled' || rule.provenance === 'assumed'
-    ? [
-        {
-          code: 'ruleUnconfirmed',
-          severity: 'note',
-          message: `Half-value layer ${numberText(value, 4)} mm Al is above the ${numberText(bound, 4)} mm Al asked for at ${potential_kV} kV, but the rule’s text is ${rule.provenance} (${rule.source}): confirm the text, and measure.`,
-          path,
-          value,
-          bound,
-        },
-      ]
-    : [];
+  const isMet = `Half-value layer ${is} mm Al is not below the ${least} mm Al asked for at ${potential_kV} kV`;
+  return unconfirmed(rule, path, isMet, { value, bound });
 };
 
-/** The room's own rules: minimum half-value layer and kerma rate, as entered with their source. */
-export const ruleLimits = (inputs: LimitInputs): Finding[] =>
-  inputs.case.room.rules.flatMap((rule, index): Finding[] => {
-    const path = `room.rules[${index}]`;
-    if (rule.kind === 'minimum-hvl') return minimumHvlFindings(inputs, rule, path);
-    const value = inputs.incidentAirKermaRate_mGy_per_min;
-    if (!rule.appliesTo.includes(inputs.mode) || value === null) return [];
-    if (value <= rule.limit_mGy_per_min) return [];
+const kermaRateFindings = (inputs: LimitInputs, rule: KermaRate, path: string): Finding[] => {
+  const value = inputs.incidentAirKermaRate_mGy_per_min;
+  if (!rule.appliesTo.includes(inputs.mode) || value === null) return [];
+  const bound = rule.limit_mGy_per_min;
+  const [rate, most] = apartTexts(value, bound);
+  if (value > bound) {
     return [
       {
         code: 'kermaRate',
         severity: 'limit',
-        message: `Incident air kerma rate ${numberText(value)} mGy/min exceeds ${rule.limit_mGy_per_min} mGy/min for ${inputs.mode} (${origin(rule)}).`,
+        message: `Incident air kerma rate ${rate} mGy/min exceeds ${most} mGy/min for ${inputs.mode} (${origin(rule)}).`,
         path,
         value,
-        bound: rule.limit_mGy_per_min,
+        bound,
       },
     ];
+  }
+  const isMet = `Incident air kerma rate ${rate} mGy/min does not exceed ${most} mGy/min for ${inputs.mode}`;
+  return unconfirmed(rule, path, isMet, { value, bound });
+};
+
+/** The room's own rules: minimum half-value layer and kerma rate, as entered with their source. */
+export const ruleLimits = (inputs: LimitInputs): Finding[] =>
+  inputs.case.room.rules.flatMap((rule, index) => {
+    const path = `room.rules[${index}]`;
+    return rule.kind === 'minimum-hvl'
+      ? minimumHvlFindings(inputs, rule, path)
+      : kermaRateFindings(inputs, rule, path);
   });

@@ -25,3 +25,6 @@ export const blockedBy = (code: string, message: string, more: Partial<Finding> 
   message,
   ...more,
 });
+
+export const limitsOf = (findings: readonly Finding[]): Finding[] =>
+  findings.filter(({ severity }) => severity === 'limit');

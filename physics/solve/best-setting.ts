@@ -6,13 +6,16 @@ import { roomPotentials_kV } from '../scan.js';
 import type { Setting } from '../setting.js';
 import { type CostName, costs, figureOfMerit } from '../sweep/costs.js';
 import { type SweepSetting, sweepSetting } from '../sweep/sweep-setting.js';
-import { type Answer, blockedBy, noAnswer } from './answer.js';
+import { window90_kV } from '../sweep/window.js';
+import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
 
 export interface BestSetting {
   readonly setting: Setting;
   readonly figureOfMerit: number;
-  /** Potentials with the same filter whose figure of merit is within 90 % of the best. */
+  /** Potentials around the best, same filter, whose figure of merit is within 90 % of it. */
   readonly window90_kV: readonly [number, number];
+  /** Detector air kerma the room must hold to deliver it. */
+  readonly detectorAirKerma_uGy: number;
 }
 
 /**
@@ -30,41 +33,39 @@ export const bestSetting = (
   const reference = operatingPoint(c, c.techniques[0], size);
   if (!('made' in reference)) return noAnswer(null, reference.findings);
   const { grid } = c.techniques[0];
-  const run = (setting: Setting): SweepSetting => sweepSetting(c, reference, setting, holdConstant);
+  const run = ({ potential_kV, filter }: Pick<Setting, 'potential_kV' | 'filter'>): SweepSetting =>
+    sweepSetting(c, reference, { potential_kV, filter, grid }, holdConstant);
   const mapped = c.room.filters.flatMap(({ name: filter }) =>
-    roomPotentials_kV(c).map((potential_kV) => {
-      const setting = { potential_kV, filter, grid };
-      const made = run(setting);
-      const merit = made.values && figureOfMerit(made.values, cost);
-      return { setting, merit, findings: made.findings };
-    }),
+    roomPotentials_kV(c).map((potential_kV) => run({ potential_kV, filter })),
   );
   const ranked = mapped
-    .filter((one): one is typeof one & { merit: number } => one.merit !== null)
+    .flatMap((made) => {
+      const merit = made.values && figureOfMerit(made.values, cost);
+      return merit === null ? [] : [{ made, merit }];
+    })
     .sort((a, b) => b.merit - a.merit);
   if (ranked.length === 0) {
-    return noAnswer(null, [
-      blockedBy('costUnknown', `SdNR² per ${costs[cost].words} cannot be computed in this room.`),
-    ]);
+    const stopped = limitsOf(mapped[0]?.findings ?? []);
+    const unknown = `SdNR² per ${costs[cost].words} cannot be computed in this room.`;
+    return noAnswer(null, stopped.length > 0 ? stopped : [blockedBy('costUnknown', unknown)]);
   }
-  const best = ranked.find(({ findings }) => isAllowed(findings));
-  if (!best) {
-    const limits = ranked[0].findings.filter(({ severity }) => severity === 'limit');
-    return noAnswer(ranked[0].merit, limits);
-  }
-  const near = ranked.filter(
-    ({ setting, merit }) => setting.filter === best.setting.filter && merit >= 0.9 * best.merit,
-  );
-  const potentials = near.map(({ setting }) => setting.potential_kV);
-  const again = run(best.setting).values;
+  const best = ranked.find(({ made }) => isAllowed(made.findings));
+  if (!best) return noAnswer(ranked[0].merit, limitsOf(ranked[0].made.findings));
+  const { potential_kV, filter } = best.made;
+  const again = run(best.made);
   return {
     value: {
-      setting: best.setting,
+      setting: { potential_kV, filter, grid },
       figureOfMerit: best.merit,
-      window90_kV: [Math.min(...potentials), Math.max(...potentials)],
+      window90_kV: window90_kV(
+        mapped.filter((made) => made.filter === filter),
+        cost,
+        potential_kV,
+      ),
+      detectorAirKerma_uGy: again.values?.detectorAirKerma_uGy ?? 0,
     },
     target: best.merit,
-    forward: again && figureOfMerit(again, cost),
-    findings: best.findings,
+    forward: again.values && figureOfMerit(again.values, cost),
+    findings: again.findings,
   };
 };

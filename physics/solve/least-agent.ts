@@ -1,10 +1,13 @@
 import { findRoot } from '../beam/find-root.js';
 import type { Case, Size, Technique } from '../case/schema.js';
+import { deliverable_mg_per_mL } from '../limits/agent-limits.js';
 import { numberText } from '../number-text.js';
 import { type OperatingPoint, operatingPoint } from '../operating-point.js';
 import { sdnrAt } from '../readout/index.js';
 import type { Finding } from '../results.js';
-import { type Answer, blockedBy, noAnswer } from './answer.js';
+import { resolveAgent } from '../stack/resolve-material.js';
+import { settingAsSet } from '../sweep/sweep-setting.js';
+import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
 import { withAgentAmount } from './with-agent.js';
 
 export interface LeastAgent {
@@ -16,18 +19,25 @@ export interface LeastAgent {
 export const sdnrOf = ({ made, tubeLoad_mAs }: OperatingPoint): number =>
   sdnrAt(made.readout, tubeLoad_mAs);
 
+/** Relative accuracy of an amount: far inside what any amount is known to. */
+const tolerance = 1e-5;
+
 /**
  * Smallest amount of the detail's agent at which a technique, as set, reaches a target SdNR.
  *
- * |SdNR| grows with the amount from where agent and reference cancel; the root is bracketed between
- * no agent and the greatest amount the volume holds, or `greatest` when given.
+ * SdNR, taken negative while the detail is more transparent than its reference, grows with the
+ * amount; the root is bracketed between none and the greatest amount. What stands against the
+ * technique itself at the answer is in `findings`.
+ *
+ * @param greatest in the case's own unit; otherwise what can be delivered where the case states it,
+ *   else ten times the case's amount or what the carrier's volume holds.
  */
 export const leastAgentAmount = (
   c: Case,
   technique: Technique,
   size: Size,
   targetSdnr: number,
-  greatest = c.task.detail.agent ? 10 * Math.max(c.task.detail.agent.amount.value, 1) : 0,
+  greatest = greatestAmount(c),
 ): Answer<LeastAgent> => {
   const { agent } = c.task.detail;
   if (!agent) {
@@ -37,71 +47,84 @@ export const leastAgentAmount = (
       }),
     ]);
   }
-  const signedSdnr = (amount: number): number => {
-    const point = pointWith(c, technique, size, amount);
-    return point ? sdnrOf(point) * Math.sign(point.made.readout.contrast.subject) : Number.NaN;
-  };
-  const most = greatestPlaceable(c, technique, size, greatest);
-  const reached = most === null ? Number.NaN : signedSdnr(most);
+  const { unit } = agent.amount;
+  const as = pointsOf(c, technique, size);
+  const without = as.point(0);
+  if (!('made' in without)) return noAnswer(targetSdnr, without.findings);
+  if (as.signedSdnr(0) >= targetSdnr) {
+    const note = notNeeded(agent.name, as.signedSdnr(0), targetSdnr);
+    const findings = [note, ...limitsOf(settingAsSet(c, without).findings)];
+    const value = { amount: 0, unit };
+    return { value, target: targetSdnr, forward: as.signedSdnr(0), findings };
+  }
+  const most = as.greatestPlaceable(greatest);
+  const reached = as.signedSdnr(most);
   if (!(reached >= targetSdnr)) {
+    const message = `SdNR ${numberText(targetSdnr)} is not reached with ${numberText(most)} ${unit} of ${agent.name}, the most that ${most < greatest ? 'the volume holds' : 'is allowed here'}; that gives ${numberText(reached)}.`;
+    const path = 'task.detail.agent.amount.value';
     return noAnswer(targetSdnr, [
-      blockedBy(
-        'agentAmount',
-        `SdNR ${numberText(targetSdnr)} is not reached with up to ${numberText(most ?? 0)} ${agent.amount.unit} of ${agent.name}; that gives ${Number.isNaN(reached) ? 'no result' : numberText(reached)}.`,
-        { path: 'task.detail.agent.amount.value', value: reached, bound: most },
-      ),
+      blockedBy('agentAmount', message, { path, value: reached, bound: most }),
     ]);
   }
-  const without = signedSdnr(0);
-  if (without >= targetSdnr) {
-    const note: Finding = {
-      code: 'agentNotNeeded',
-      severity: 'note',
-      message: `Without any ${agent.name} the detail already reaches SdNR ${numberText(without)} against its reference: its carrier differs from it.`,
-      value: without,
-      bound: targetSdnr,
-    };
-    return {
-      value: { amount: 0, unit: agent.amount.unit },
-      target: targetSdnr,
-      forward: without,
-      findings: [note],
-    };
-  }
-  const amount = findRoot((x) => signedSdnr(x) - targetSdnr, 0, most as number, 1e-6);
-  if (amount === null) return noAnswer(targetSdnr, []);
+  const amount = findRoot((x) => as.signedSdnr(x) - targetSdnr, 0, most, tolerance) ?? most;
+  const found = as.point(amount);
   return {
-    value: { amount, unit: agent.amount.unit },
+    value: { amount, unit },
     target: targetSdnr,
-    forward: signedSdnr(amount),
-    findings: [],
+    forward: as.signedSdnr(amount),
+    findings:
+      'made' in found
+        ? limitsOf(settingAsSet(withAgentAmount(c, amount), found).findings)
+        : found.findings,
   };
 };
 
-const pointWith = (
-  c: Case,
-  technique: Technique,
-  size: Size,
-  amount: number,
-): OperatingPoint | null => {
-  try {
-    const point = operatingPoint(withAgentAmount(c, amount), technique, size);
-    return 'made' in point ? point : null;
-  } catch {
-    // The volume cannot hold this amount.
-    return null;
-  }
+/** What is delivered at most, in the case's own unit: every unit is in proportion to the element. */
+const greatestAmount = (c: Case): number => {
+  const { agent } = c.task.detail;
+  if (!agent) return 0;
+  const { value } = agent.amount;
+  const deliverable = deliverable_mg_per_mL(c);
+  const element = resolveAgent(c, agent).elementConcentration_mg_per_mL;
+  return deliverable !== null && element > 0
+    ? (value * deliverable) / element
+    : 10 * Math.max(value, 1);
 };
 
-/** Halves the amount until the carrier's volume holds it. */
-const greatestPlaceable = (
-  c: Case,
-  technique: Technique,
-  size: Size,
-  greatest: number,
-): number | null => {
-  for (let amount = greatest; amount > greatest / 1e6; amount /= 2) {
-    if (pointWith(c, technique, size, amount)) return amount;
-  }
-  return null;
+const notNeeded = (name: string, value: number, bound: number): Finding => ({
+  code: 'agentNotNeeded',
+  severity: 'note',
+  message: `Without any ${name} the detail already reaches SdNR ${numberText(value)} against its reference: its carrier differs from it.`,
+  value,
+  bound,
+});
+
+/** The technique as set with other amounts of agent. */
+const pointsOf = (c: Case, technique: Technique, size: Size) => {
+  const point = (amount: number): ReturnType<typeof operatingPoint> =>
+    operatingPoint(withAgentAmount(c, amount), technique, size);
+  const signedSdnr = (amount: number): number => {
+    const made = point(amount);
+    return 'made' in made ? sdnrOf(made) * Math.sign(made.made.readout.contrast.subject) : 0;
+  };
+  const isPlaceable = (amount: number): boolean => {
+    try {
+      return 'made' in point(amount);
+    } catch {
+      // The volume cannot hold this amount.
+      return false;
+    }
+  };
+  /** The greatest amount, or the most of it that the carrier's volume holds (to a hundredth). */
+  const greatestPlaceable = (greatest: number): number => {
+    if (isPlaceable(greatest)) return greatest;
+    let [low, high] = [0, greatest];
+    while (high - low > 0.01 * high && high > 1e-9 * greatest) {
+      const middle = (low + high) / 2;
+      if (isPlaceable(middle)) low = middle;
+      else high = middle;
+    }
+    return low;
+  };
+  return { point, signedSdnr, greatestPlaceable };
 };

@@ -1,29 +1,33 @@
 import { findRoot } from '../beam/find-root.js';
 import type { Case, Size, Technique } from '../case/schema.js';
-import { heldLoad } from '../compare.js';
-import { nearestPotential_kV } from '../limits/tube-limits.js';
+import { isAllowed } from '../limits.js';
 import { numberText } from '../number-text.js';
 import { operatingPoint } from '../operating-point.js';
-import { sdnrAt } from '../readout/index.js';
-import type { HoldConstant } from '../results.js';
+import type { Finding, HoldConstant } from '../results.js';
 import { roomPotentials_kV } from '../scan.js';
-import { type Answer, blockedBy, noAnswer } from './answer.js';
+import { type SweepSetting, sweepSetting } from '../sweep/sweep-setting.js';
+import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
 import { sdnrOf } from './least-agent.js';
 import { withAgentAmount } from './with-agent.js';
 
 export interface EqualPotential {
+  /** Where SdNR is exactly that of all the agent. */
   readonly potential_kV: number;
-  /** The nearest step the room offers, and the SdNR it gives. */
+  /** The nearest step of the room that gives at least that SdNR and is allowed, and what it gives. */
   readonly roomPotential_kV: number;
   readonly roomSdnr: number;
+  /** What the room's control must hold there. */
+  readonly detectorAirKerma_uGy: number;
 }
 
 /**
  * The potential at which a technique with a share of its agent shows the detail as well as with all
  * of it, at an equal dose or detector quantity (`incidentAirKerma` unless said).
  *
- * Searched downward from the technique's potential, where agents above their K edge gain contrast;
- * the highest potential that reaches the target is the answer. `forward` is the SdNR there.
+ * Every potential of the room is tried, nearest to the technique's own first; between the nearest
+ * allowed one that reaches the SdNR and its neighbour that does not, the exact potential is found.
+ * `forward` is the SdNR there. Without an allowed one, the findings name the limits of the nearest
+ * that reaches it.
  */
 export const potentialForLessAgent = (
   c: Case,
@@ -42,40 +46,49 @@ export const potentialForLessAgent = (
     ]);
   }
   const less = withAgentAmount(c, agent.amount.value * agentShare);
-  const sdnrAtPotential = (potential_kV: number): number => {
-    const point = operatingPoint(less, { ...technique, potential_kV }, size);
-    if (!('made' in point)) return Number.NaN;
-    const load = heldLoad(full, point, holdConstant);
-    return load.tubeLoad_mAs === null ? 0 : sdnrAt(point.made.readout, load.tubeLoad_mAs);
-  };
-  const downward = roomPotentials_kV(c)
-    .filter((potential) => potential <= technique.potential_kV)
-    .reverse();
-  let above = technique.potential_kV;
-  for (const potential_kV of downward) {
-    if (sdnrAtPotential(potential_kV) >= target) {
-      const found =
-        findRoot((x) => sdnrAtPotential(x) - target, potential_kV, above, 1e-7) ?? potential_kV;
-      const roomPotential_kV = nearestPotential_kV(c.room.tube.potential_kV, found);
-      return {
-        value: {
-          potential_kV: found,
-          roomPotential_kV,
-          roomSdnr: sdnrAtPotential(roomPotential_kV),
-        },
-        target,
-        forward: sdnrAtPotential(found),
-        findings: [],
-      };
-    }
-    above = potential_kV;
+  const reference = operatingPoint(less, technique, size);
+  if (!('made' in reference)) return noAnswer(target, reference.findings);
+  // Held to what the technique delivers with all of its agent.
+  const held = { ...reference, tubeLoad_mAs: full.tubeLoad_mAs };
+  const { setting } = full.made;
+  const run = (potential_kV: number): SweepSetting =>
+    sweepSetting(less, held, { ...setting, potential_kV }, holdConstant);
+  const sdnrAtPotential = (potential_kV: number): number => run(potential_kV).values?.sdnr ?? 0;
+
+  const tried = roomPotentials_kV(c)
+    .map((potential_kV) => run(potential_kV))
+    .sort((a, b) => far(a, setting.potential_kV) - far(b, setting.potential_kV));
+  const reaching = tried.filter(({ values }) => values !== null && values.sdnr >= target);
+  const chosen = reaching.find(({ findings }) => isAllowed(findings));
+  if (!chosen?.values) {
+    const limits = limitsOf(reaching[0]?.findings ?? []);
+    return noAnswer(target, limits.length > 0 ? limits : [outOfReach(c, agentShare, target)]);
   }
-  const { min } = c.room.tube.potential_kV;
-  return noAnswer(target, [
-    blockedBy(
-      'potentialRange',
-      `With ${numberText(100 * agentShare)} % of the agent no potential from ${technique.potential_kV} kV down to the room's ${min} kV reaches SdNR ${numberText(target)}.`,
-      { path: 'room.tube.potential_kV.min', value: agentShare, bound: min },
-    ),
-  ]);
+  const { potential_kV, values } = chosen;
+  const exact_kV =
+    findRoot((x) => sdnrAtPotential(x) - target, potential_kV, setting.potential_kV, 1e-6) ??
+    potential_kV;
+  return {
+    value: {
+      potential_kV: exact_kV,
+      roomPotential_kV: potential_kV,
+      roomSdnr: values.sdnr,
+      detectorAirKerma_uGy: values.detectorAirKerma_uGy,
+    },
+    target,
+    forward: sdnrAtPotential(exact_kV),
+    findings: chosen.findings,
+  };
+};
+
+const far = ({ potential_kV }: SweepSetting, from_kV: number): number =>
+  Math.abs(potential_kV - from_kV);
+
+const outOfReach = (c: Case, agentShare: number, target: number): Finding => {
+  const { min, max } = c.room.tube.potential_kV;
+  return blockedBy(
+    'potentialRange',
+    `With ${numberText(100 * agentShare)} % of the agent no potential of the room, ${min} to ${max} kV, reaches SdNR ${numberText(target)}.`,
+    { path: 'room.tube.potential_kV', value: agentShare, bound: min },
+  );
 };

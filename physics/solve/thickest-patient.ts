@@ -2,9 +2,8 @@ import type { Case, Size, Technique } from '../case/schema.js';
 import { numberText } from '../number-text.js';
 import { operatingPoint } from '../operating-point.js';
 import type { Finding } from '../results.js';
-import { settingOf } from '../setting.js';
-import { sweepSetting } from '../sweep/sweep-setting.js';
-import { type Answer, blockedBy, noAnswer } from './answer.js';
+import { settingAsSet } from '../sweep/sweep-setting.js';
+import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
 
 export interface ThickestPatient {
   readonly thickness_mm: number;
@@ -14,16 +13,21 @@ export interface ThickestPatient {
 /** Found to this; no patient is measured better. */
 const resolution_mm = 0.5;
 
+/** Thicknesses tried first, evenly from thickest to thinnest, to find where the target is met at all. */
+const coarseSteps = 6;
+
 interface Trial {
+  readonly thickness_mm: number;
   readonly isMet: boolean;
   readonly sdnr: number | null;
-  readonly findings: readonly Finding[];
+  readonly limits: readonly Finding[];
 }
 
 /**
  * Thickest patient in whom a technique, as set, still shows the detail at a target SdNR with no
- * limit broken, between `thinnest_mm` and `thickest_mm`. Halving: every step places the patient
- * anew and solves its scatter.
+ * limit broken, between `thinnest_mm` and `thickest_mm`. Looked for from the thickest down, then by
+ * halving: every step places the patient anew and solves its scatter. `forward` is its SdNR: the
+ * target, or more where a limit stops a thicker patient first.
  *
  * The findings say what stops the next half millimetre: SdNR, or the limit by name.
  */
@@ -34,48 +38,55 @@ export const thickestPatient = (
   thinnest_mm: number,
   thickest_mm: number,
 ): Answer<ThickestPatient> => {
-  const trial = (thickness_mm: number): Trial => {
-    const size: Size = { name: `${numberText(thickness_mm, 5)} mm`, thickness_mm, weight: 1 };
-    const point = operatingPoint(c, technique, size);
-    if (!('made' in point)) return { isMet: false, sdnr: null, findings: point.findings };
-    const { values, findings } = sweepSetting(c, point, settingOf(technique), 'asSet');
-    const limits = findings.filter(({ severity }) => severity === 'limit');
-    const sdnr = values?.sdnr ?? 0;
-    return { isMet: sdnr >= targetSdnr && limits.length === 0, sdnr, findings: limits };
-  };
-  const stopping = (stopped: Trial): Finding[] =>
-    stopped.findings.length > 0
-      ? [...stopped.findings]
-      : [
-          blockedBy(
-            'sdnrShort',
-            `SdNR falls to ${numberText(stopped.sdnr ?? 0)}, below ${numberText(targetSdnr)}.`,
-            {
-              value: stopped.sdnr,
-              bound: targetSdnr,
-            },
-          ),
-        ];
-  const thin = trial(thinnest_mm);
-  if (!thin.isMet) return noAnswer(targetSdnr, stopping(thin));
-  let low = thinnest_mm;
-  let high = thickest_mm;
-  let stopped = trial(high);
-  if (stopped.isMet) low = high;
-  while (high - low > resolution_mm) {
-    const middle = (low + high) / 2;
-    const tried = trial(middle);
-    if (tried.isMet) low = middle;
-    else {
-      high = middle;
-      stopped = tried;
-    }
+  const trial = (thickness_mm: number): Trial => trialAt(c, technique, targetSdnr, thickness_mm);
+  let stopped = trial(thickest_mm);
+  if (stopped.isMet) return answerOf(targetSdnr, stopped, []);
+  let met: Trial | null = null;
+  const step_mm = (thickest_mm - thinnest_mm) / coarseSteps;
+  for (let step = 1; step <= coarseSteps && !met; step++) {
+    const tried = trial(thickest_mm - step * step_mm);
+    if (tried.isMet) met = tried;
+    else stopped = tried;
   }
-  const again = trial(low);
-  return {
-    value: { thickness_mm: low, sdnr: again.sdnr ?? 0 },
-    target: targetSdnr,
-    forward: again.sdnr,
-    findings: stopped.isMet ? [] : stopping(stopped),
-  };
+  if (!met) return noAnswer(targetSdnr, stopping(stopped, targetSdnr));
+  while (stopped.thickness_mm - met.thickness_mm > resolution_mm) {
+    const tried = trial((stopped.thickness_mm + met.thickness_mm) / 2);
+    if (tried.isMet) met = tried;
+    else stopped = tried;
+  }
+  return answerOf(targetSdnr, met, stopping(stopped, targetSdnr));
+};
+
+const trialAt = (
+  c: Case,
+  technique: Technique,
+  targetSdnr: number,
+  thickness_mm: number,
+): Trial => {
+  const size: Size = { name: `${numberText(thickness_mm, 5)} mm`, thickness_mm, weight: 1 };
+  const point = operatingPoint(c, technique, size);
+  if (!('made' in point)) {
+    return { thickness_mm, isMet: false, sdnr: null, limits: point.findings };
+  }
+  const { values, findings } = settingAsSet(c, point);
+  const limits = limitsOf(findings);
+  const sdnr = values?.sdnr ?? 0;
+  return { thickness_mm, isMet: sdnr >= targetSdnr && limits.length === 0, sdnr, limits };
+};
+
+const answerOf = (
+  target: number,
+  { thickness_mm, sdnr }: Trial,
+  findings: readonly Finding[],
+): Answer<ThickestPatient> => ({
+  value: { thickness_mm, sdnr: sdnr ?? 0 },
+  target,
+  forward: sdnr,
+  findings,
+});
+
+const stopping = ({ limits, sdnr }: Trial, targetSdnr: number): Finding[] => {
+  if (limits.length > 0) return [...limits];
+  const message = `SdNR falls to ${numberText(sdnr ?? 0, 4)}, below ${numberText(targetSdnr, 4)}.`;
+  return [blockedBy('sdnrShort', message, { value: sdnr, bound: targetSdnr })];
 };

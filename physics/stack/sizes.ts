@@ -1,5 +1,9 @@
+import { kept } from '../../materials/kept.js';
 import type { Case, Size } from '../case/schema.js';
 import { drawnThickness_mm } from './grow-layers.js';
+
+/** The one size of a patient without a mix; kept, since results are remembered by the size itself. */
+const asDrawn = new WeakMap<Case['patient']['layers'], readonly Size[]>();
 
 /**
  * The size mix of a case. Without sizes there is one, the layers as drawn.
@@ -13,5 +17,7 @@ export const sizesOf = (patient: Case['patient']): readonly Size[] => {
   }
   return sizes.length > 0
     ? sizes
-    : [{ name: 'as drawn', thickness_mm: drawnThickness_mm(layers), weight: 1 }];
+    : kept(asDrawn, layers, () => [
+        { name: 'as drawn', thickness_mm: drawnThickness_mm(layers), weight: 1 },
+      ]);
 };

@@ -17,6 +17,11 @@ export const costs = {
     unit: 'Gy cm²',
     of: (v: SweepValues) => v.kermaAreaProduct_Gycm2,
   },
+  skinAbsorbedDose: {
+    words: 'skin absorbed dose',
+    unit: 'mGy',
+    of: (v: SweepValues) => v.skinAbsorbedDose_mGy,
+  },
   energyImparted: {
     words: 'energy imparted',
     unit: 'mJ',
@@ -28,6 +33,7 @@ export const costs = {
     of: (v: SweepValues) => v.meanAbsorbedDose_mGy,
   },
   tubeLoad: { words: 'tube load', unit: 'mAs', of: (v: SweepValues) => v.tubeLoad_mAs },
+  tubeEnergy: { words: 'tube energy', unit: 'kJ', of: (v: SweepValues) => v.tubeEnergy_kJ },
   power: { words: 'power', unit: 'kW', of: (v: SweepValues) => v.power_kW },
   elementMass: {
     words: 'element in the detail',

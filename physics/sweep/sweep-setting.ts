@@ -1,5 +1,6 @@
-import type { Case, Technique } from '../case/schema.js';
+import type { Acquisition, Case, Technique } from '../case/schema.js';
 import { heldTarget } from '../compare.js';
+import { isCurve } from '../control.js';
 import { framesPerRun } from '../frames.js';
 import { limitFindings } from '../limits.js';
 import { type OperatingPoint, operatingPoint } from '../operating-point.js';
@@ -8,7 +9,7 @@ import { prepare } from '../prepare.js';
 import { solveTubeLoad } from '../readout/index.js';
 import type { Finding, HoldConstant } from '../results.js';
 import type { Setting } from '../setting.js';
-import { yieldOf } from '../yield.js';
+import { type Yield, yieldOf } from '../yield.js';
 import { type SweepValues, sweepValues } from './values.js';
 
 /** One setting of a sweep at one size; values are null where its condition cannot be met. */
@@ -23,80 +24,109 @@ export interface SweepSetting {
 /**
  * One setting under a hold-constant condition: the reference technique with another potential and
  * filter, its load such that the held quantity equals the reference's as set. `asSet` keeps the
- * reference's control.
+ * reference's control; a control curve says nothing about settings off the curve, so there it gives
+ * no values and a finding.
  */
 export const sweepSetting = (
   c: Case,
   reference: OperatingPoint,
   setting: Setting,
   hold: HoldConstant,
+): SweepSetting =>
+  hold === 'asSet'
+    ? underOwnControl(c, reference, setting)
+    : heldEqual(c, reference, setting, hold);
+
+/** A technique as set, where its operating point is: the same row as a setting of a sweep. */
+export const settingAsSet = (c: Case, point: OperatingPoint): SweepSetting =>
+  atLoad(c, point.made, point.technique.acquisition, point.size.name, point);
+
+const underOwnControl = (
+  c: Case,
+  { technique, size }: OperatingPoint,
+  setting: Setting,
 ): SweepSetting => {
-  const where = { ...setting, size: reference.size.name };
-  const { acquisition } = reference.technique;
-  if (hold === 'asSet') {
-    const technique: Technique = { ...reference.technique, ...setting };
-    const point = operatingPoint(c, technique, reference.size);
-    if (!('made' in point)) return { ...named(where), values: null, findings: point.findings };
-    return finished(c, reference, point.made, point.tubeLoad_mAs, setting, point.findings);
-  }
+  if (isCurve(technique.control)) return withoutValues(setting, size.name, [offCurve(technique)]);
+  const point = operatingPoint(c, { ...technique, ...setting }, size);
+  return 'made' in point
+    ? settingAsSet(c, point)
+    : withoutValues(setting, size.name, point.findings);
+};
+
+const heldEqual = (
+  c: Case,
+  reference: OperatingPoint,
+  setting: Setting,
+  hold: Exclude<HoldConstant, 'asSet'>,
+): SweepSetting => {
+  const { size, technique } = reference;
+  const { acquisition } = technique;
   const { spectrum, findings } = outputBeam(prepare(c), setting.potential_kV, setting.filter);
-  if (!spectrum) return { ...named(where), values: null, findings };
+  if (!spectrum) return withoutValues(setting, size.name, findings);
   const made = yieldOf(c, reference.made.placement, setting, acquisition, spectrum);
-  const load = solveTubeLoad(
+  const { tubeLoad_mAs, reason } = solveTubeLoad(
     made.readout,
     made.dose.incidentAirKerma_mGy,
     hold,
     heldTarget(reference, hold),
   );
-  if (load.tubeLoad_mAs === null) {
-    const finding: Finding = {
-      code: 'equalityUnreachable',
-      severity: 'limit',
-      message: load.reason,
-      value: null,
-    };
-    return { ...named(where), values: null, findings: [...findings, finding] };
-  }
-  return finished(c, reference, made, load.tubeLoad_mAs, setting, findings);
+  return tubeLoad_mAs === null
+    ? withoutValues(setting, size.name, [...findings, unreachable(reason)])
+    : atLoad(c, made, acquisition, size.name, { tubeLoad_mAs, findings });
 };
 
-const named = ({ potential_kV, filter, size }: Setting & { size: string }) => ({
-  potential_kV,
-  filter,
-  size,
+const unreachable = (message: string): Finding => ({
+  code: 'equalityUnreachable',
+  severity: 'limit',
+  message,
+  value: null,
 });
 
-const finished = (
-  c: Case,
-  { technique, size }: OperatingPoint,
-  made: OperatingPoint['made'],
-  tubeLoad_mAs: number,
-  setting: Setting,
+const offCurve = ({ name }: Technique): Finding => ({
+  code: 'offControlCurve',
+  severity: 'limit',
+  message: `${name} follows a control curve, which says what the room delivers on it and nowhere else; hold a quantity constant instead.`,
+  path: 'techniques[0].control',
+  value: null,
+});
+
+const withoutValues = (
+  { potential_kV, filter }: Setting,
+  size: string,
   findings: readonly Finding[],
+): SweepSetting => ({ potential_kV, filter, size, values: null, findings });
+
+/** A yield at a load, and every limit it meets there. */
+const atLoad = (
+  c: Case,
+  made: Yield,
+  acquisition: Acquisition,
+  size: string,
+  { tubeLoad_mAs, findings }: Pick<OperatingPoint, 'tubeLoad_mAs' | 'findings'>,
 ): SweepSetting => {
-  const { acquisition } = technique;
-  const values = sweepValues(c, made, setting, acquisition, tubeLoad_mAs);
+  const values = sweepValues(c, made, acquisition, tubeLoad_mAs);
   const { exposureTime_ms, tubeCurrent_mA, power_kW } = values;
+  const { setting, placement } = made;
+  const isSingle = acquisition.mode === 'radiography' && acquisition.frames === 1;
+  const limits = limitFindings({
+    case: c,
+    setting,
+    mode: acquisition.mode,
+    framesPerRun: framesPerRun(acquisition),
+    exposure: { tubeLoad_mAs, exposureTime_ms, tubeCurrent_mA, power_kW },
+    halfValueLayer_mmAl: values.halfValueLayer_mmAl,
+    sourceToSkin_mm: placement.stack.sourceToSkin_mm,
+    detectorAirKerma_uGy: values.detectorAirKerma_uGy,
+    incidentAirKermaRate_mGy_per_min: isSingle
+      ? null
+      : values.incidentAirKerma_mGy * acquisition.frameRate_per_s * 60,
+    path: 'setting',
+  });
   return {
-    ...named({ ...setting, size: size.name }),
+    potential_kV: setting.potential_kV,
+    filter: setting.filter,
+    size,
     values,
-    findings: [
-      ...findings,
-      ...limitFindings({
-        case: c,
-        setting,
-        mode: acquisition.mode,
-        framesPerRun: framesPerRun(acquisition),
-        exposure: { tubeLoad_mAs, exposureTime_ms, tubeCurrent_mA, power_kW },
-        halfValueLayer_mmAl: values.halfValueLayer_mmAl,
-        sourceToSkin_mm: made.placement.stack.sourceToSkin_mm,
-        detectorAirKerma_uGy: values.detectorAirKerma_uGy,
-        incidentAirKermaRate_mGy_per_min:
-          acquisition.mode === 'radiography' && acquisition.frames === 1
-            ? null
-            : values.incidentAirKerma_mGy * acquisition.frameRate_per_s * 60,
-        path: 'setting',
-      }),
-    ],
+    findings: [...findings, ...limits],
   };
 };

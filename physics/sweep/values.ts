@@ -5,7 +5,6 @@ import { referenceMaterial } from '../beam/reference-materials.js';
 import type { Spectrum } from '../beam/spectrum.js';
 import type { Acquisition, Case } from '../case/schema.js';
 import { sdnrAt } from '../readout/index.js';
-import type { Setting } from '../setting.js';
 import type { Yield } from '../yield.js';
 
 /** Every quantity of one setting at one size, one frame at the load its condition asks for. */
@@ -14,6 +13,8 @@ export interface SweepValues {
   readonly tubeCurrent_mA: number | null;
   readonly exposureTime_ms: number | null;
   readonly power_kW: number | null;
+  /** Potential times load; null without a tube. */
+  readonly tubeEnergy_kJ: number | null;
   readonly sdnr: number;
   readonly subjectContrast: number;
   readonly detectedContrast: number;
@@ -21,6 +22,7 @@ export interface SweepValues {
   readonly detectorAirKerma_uGy: number;
   readonly incidentAirKerma_mGy: number;
   readonly entranceSurfaceAirKerma_mGy: number | null;
+  readonly skinAbsorbedDose_mGy: number | null;
   readonly kermaAreaProduct_Gycm2: number;
   readonly energyImparted_mJ: number | null;
   readonly meanAbsorbedDose_mGy: number | null;
@@ -41,17 +43,17 @@ const times = (value: number | null, load: number): number | null =>
 export const sweepValues = (
   c: Case,
   made: Yield,
-  setting: Setting,
   acquisition: Acquisition,
   tubeLoad_mAs: number,
 ): SweepValues => {
-  const { dose, readout, output, placement } = made;
+  const { dose, readout, output, placement, setting } = made;
   const exposure = exposureAt(c, acquisition, setting.potential_kV, tubeLoad_mAs);
   return {
     tubeLoad_mAs,
     tubeCurrent_mA: exposure.tubeCurrent_mA,
     exposureTime_ms: exposure.exposureTime_ms,
     power_kW: exposure.power_kW,
+    tubeEnergy_kJ: c.room.source ? null : (setting.potential_kV * tubeLoad_mAs) / 1000,
     sdnr: sdnrAt(readout, tubeLoad_mAs),
     subjectContrast: readout.contrast.subject,
     detectedContrast: readout.contrast.detected,
@@ -59,6 +61,7 @@ export const sweepValues = (
     detectorAirKerma_uGy: readout.detectorAirKerma_uGy_per_mAs * tubeLoad_mAs,
     incidentAirKerma_mGy: dose.incidentAirKerma_mGy * tubeLoad_mAs,
     entranceSurfaceAirKerma_mGy: times(dose.entranceSurfaceAirKerma_mGy, tubeLoad_mAs),
+    skinAbsorbedDose_mGy: times(dose.skinAbsorbedDose_mGy, tubeLoad_mAs),
     kermaAreaProduct_Gycm2: dose.kermaAreaProduct_Gycm2 * tubeLoad_mAs,
     energyImparted_mJ: times(dose.energyImparted_mJ, tubeLoad_mAs),
     meanAbsorbedDose_mGy: times(dose.meanAbsorbedDose_mGy, tubeLoad_mAs),

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { ruleSchema } from '../../physics/case/schema.js';
-import { minimumHalfValueLayer_mmAl } from '../../physics/limits/rule-limits.js';
-import { nearestPotential_kV } from '../../physics/limits/tube-limits.js';
+import { ruleSchema } from '../../../physics/case/schema.js';
+import { nearestPotential_kV } from '../../../physics/limits/potential-limits.js';
+import { minimumHalfValueLayer_mmAl } from '../../../physics/limits/rule-limits.js';
 
 const rule = ruleSchema.parse({
   kind: 'minimum-hvl',

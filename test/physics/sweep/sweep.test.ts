@@ -1,15 +1,16 @@
 import { describe, expect, it } from 'vitest';
-import { isAllowed } from '../../physics/limits.js';
-import { costs } from '../../physics/sweep/costs.js';
+import { isAllowed } from '../../../physics/limits.js';
+import { settingLabel } from '../../../physics/setting.js';
+import { costs } from '../../../physics/sweep/costs.js';
 import {
   combineSweep,
   sweep,
   sweepPiece,
   sweepPieceCount,
   wholeRoom,
-} from '../../physics/sweep.js';
-import { weigh } from '../../physics/weigh.js';
-import { sampleCase, sampleJson } from './sample-case.js';
+} from '../../../physics/sweep.js';
+import { weigh } from '../../../physics/weigh.js';
+import { sampleCase, sampleJson } from '../sample-case.js';
 
 const coarse = { room: { tube: { potential_kV: { min: 50, max: 120, step: 10 } } } };
 const c = sampleCase(coarse).case;
@@ -58,6 +59,44 @@ describe('a sweep of the room', () => {
       );
       expect(beaten).toBe(false);
     }
+  });
+
+  it('names the nearest allowed setting with every limit that another setting might meet', () => {
+    const forbidden = map.settings.filter(({ findings }) => !isAllowed(findings));
+    expect(forbidden.length).toBeGreaterThan(0);
+    const allowed = map.settings.filter(({ findings }) => isAllowed(findings));
+    for (const { findings } of forbidden) {
+      for (const { severity, nearest } of findings) {
+        if (severity !== 'limit') continue;
+        expect(allowed.map((setting) => settingLabel(setting))).toContain(nearest);
+      }
+    }
+  });
+
+  it('as set, says that a control curve speaks for its own settings only', () => {
+    const rows = [
+      {
+        thickness_mm: 200,
+        potential_kV: 80,
+        tubeCurrent_mA: 200,
+        exposureTime_ms: 50,
+        filter: 'none',
+      },
+    ];
+    const [current] = c.techniques;
+    const curved = { ...c, techniques: [{ ...current, control: { curve: 'room.csv', rows } }] };
+    const { settings } = sweepPiece(curved, wholeRoom(curved, 'asSet'), 0);
+    expect(settings.every(({ values }) => values === null)).toBe(true);
+    expect(settings[0].findings[0].code).toBe('offControlCurve');
+    const held = sweepPiece(curved, wholeRoom(curved, 'tubeLoad'), 0).settings;
+    expect(held[0].values?.tubeLoad_mAs).toBeCloseTo(10, 9);
+  });
+
+  it('labels an investigational agent, and no other', () => {
+    expect(map.investigationalAgent).toBeNull();
+    const amount = { value: 10, unit: 'mg element/mL' };
+    const gold = sampleCase({ ...coarse, task: { detail: { agent: { name: 'gold', amount } } } });
+    expect(sweepPiece(gold.case, wholeRoom(gold.case), 0).investigationalAgent).toBe('gold');
   });
 
   it('holds what it was asked to hold', () => {

@@ -116,6 +116,8 @@ function plotNames(data: DoseCurveData, { x, y }: Scales, frame: CurveFrame): SV
     const color = entry.ink === null ? 'var(--soft)' : techniqueInk(entry.ink).color;
     return [{ x: x(end.dose), y: y(end.value), words: lineName(entry), color }];
   });
+  // From the top down, so that the uppermost line is named above itself.
+  ends.sort((a, b) => a.y - b.y);
   const named = [...marks, ...ends].map((entry) => ({
     ...entry,
     width: wordsWidth(entry.words),

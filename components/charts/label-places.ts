@@ -62,7 +62,7 @@ export function placeLabels(
         Math.max(0, box.bottom - frame.bottom);
       const covered = taken.reduce((sum, other) => sum + overlap(box, other), 0);
       const crossed = points.filter((point) => holds(box, point)).length;
-      return outside * 50 + covered * 10 + crossed * 12 + Math.abs(place.y - y) * 0.2;
+      return outside * 50 + covered * 10 + crossed * 9 + Math.abs(place.y - y) * 0.8;
     };
     const best = candidates.reduce((a, b) => (cost(b) < cost(a) ? b : a));
     taken.push(boxAt(best, label));

@@ -33,3 +33,9 @@ export const isAssumed = (draft: Draft, path: string): boolean =>
   draft.assumed.some(
     (entry) => entry === path || path.startsWith(`${entry}.`) || path.startsWith(`${entry}[`),
   ) && valueAtPath(draft.document, path) === undefined;
+
+/** The list shown at a path: as entered, faulty items included, else as the case assumes it. */
+export const listAt = (draft: Draft, path: string): readonly Json[] => {
+  const shown = shownAt(draft, path);
+  return Array.isArray(shown) ? shown : [];
+};

@@ -10,6 +10,12 @@ export const addItem =
     return withValueAt(document, path, [...(Array.isArray(list) ? list : []), item]);
   };
 
+/** More items at the end of the list at `path`. */
+export const addItems =
+  (path: string, items: readonly Json[]): Change =>
+  (document) =>
+    items.reduce<Json>((json, item) => addItem(path, item)(json), document);
+
 /** The list at `path` without item `index`. */
 export const removeItem =
   (path: string, index: number, known: readonly Json[] = []): Change =>

@@ -79,7 +79,16 @@ export const beamPathSheet = css`
     background: var(--paper);
     border: 0;
     border-block-end: 1px dotted var(--entry-rule);
+    border-radius: 0;
     padding: 0;
+    appearance: none;
+    field-sizing: content;
+    cursor: pointer;
+  }
+  .forbidden {
+    margin: 0.1rem 0 0;
+    font-size: var(--small);
+    color: var(--ink);
   }
   .leaders {
     position: absolute;

@@ -7,7 +7,8 @@ import { placeAlong } from '../../charts/place-along.js';
 import { type SpineLayout, spineLayout } from '../../charts/spine-layout.js';
 import { type DeskModel, placed, sizeShown } from '../model/desk-model.js';
 import { spineOfScene } from '../stack-view/spine-of-scene.js';
-import { stackSceneOf } from '../stack-view/stack-scene.js';
+import { stackShadingsOf } from '../stack-view/stack-shadings.js';
+import { drawnSceneOf } from '../transport-section/drawn-scene.js';
 import { beamPathSheet } from './beam-path-sheet.js';
 import { leaderPath } from './leader-path.js';
 import { spineLabels } from './spine-labels.js';
@@ -66,11 +67,11 @@ export class BeamPath extends LitElement {
   }
 
   protected override willUpdate() {
-    const { draft, along, left, right, sizeName } = this.model;
-    const parts = [draft.case, along, left, right, sizeName];
+    const { draft, along, left, right, sizeName, tracks } = this.model;
+    const parts = [draft.case, along, left, right, sizeName, tracks];
     if (parts.every((part, i) => part === this.sceneParts[i])) return;
     this.sceneParts = parts;
-    this.scene = stackSceneOf(this.model);
+    this.scene = drawnSceneOf(this.model);
   }
 
   /** Where things stand now; what the layer view told last gives only the size of its drawing. */
@@ -103,6 +104,9 @@ export class BeamPath extends LitElement {
       ...root.querySelectorAll<HTMLElement>(`.row[data-station="${id}"]`),
     ];
     const used = stations.filter(({ id }) => rowsOf(id).some((row) => row.offsetHeight > 8));
+    const isFlowing =
+      used.length > 0 && getComputedStyle(rowsOf(used[0].id)[0]).position === 'static';
+    for (const { id } of used) for (const row of rowsOf(id)) row.style.minHeight = '';
     const heights = used.map(({ id }) => Math.max(...rowsOf(id).map((row) => row.offsetHeight)));
     const tops = placeAlong(
       used.map((station, i) => ({ anchor: station.anchor(layout), height: heights[i] })),
@@ -113,6 +117,8 @@ export class BeamPath extends LitElement {
     used.forEach((station, i) => {
       for (const row of rowsOf(station.id)) {
         row.style.top = `${tops[i]}px`;
+        // Where rows stand in the flow (on a phone) the two sides keep step by their heights.
+        row.style.minHeight = isFlowing ? `${heights[i]}px` : '';
         row.classList.add('placed');
         if (station.leader) paths.push(leaderPath(row, spine, layout, station.anchor(layout)));
       }
@@ -138,7 +144,7 @@ export class BeamPath extends LitElement {
         <svg class="leaders" aria-hidden="true"><path /></svg>
         ${this.side(model.left, 'left')}
         <section class="spine" aria-label="Beam path">
-          <stack-view .scene=${this.scene} labels="turned" @stack-anchors=${(
+          <stack-view .scene=${this.scene} .shadings=${stackShadingsOf(model)} labels="turned" @stack-anchors=${(
             event: CustomEvent<StackAnchors>,
           ) => {
             this.anchors = event.detail;

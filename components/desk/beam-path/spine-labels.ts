@@ -24,11 +24,11 @@ function fixtures(model: DeskModel, layout: SpineLayout, stack: Stack | null): T
   const slabs = support
     .map((slab) => `${slab.material} ${formatEntry(slab.thickness_mm)} mm`)
     .join(', ');
-  const behind = stack ? `, ${length(stack.exitToDetector_mm)} mm behind the patient` : '';
+  const gap = stack ? `, ${length(stack.exitToDetector_mm)} mm behind the patient` : '';
   const air = layout.airBreak ?? (layout.tube + layout.patient.top) / 2;
   const gridWords = grid
-    ? `grid ${formatEntry(grid.ratio)}:1, ${formatEntry(grid.strips_per_cm)} per cm`
-    : 'no grid';
+    ? `grid ${formatEntry(grid.ratio)}:1, ${formatEntry(grid.strips_per_cm)} per cm${gap}`
+    : `no grid${gap}`;
   return html`
     <span class="label soft" style=${at(layout.axis + 12, layout.tube - 8)}>${target}</span>
     ${
@@ -39,7 +39,7 @@ function fixtures(model: DeskModel, layout: SpineLayout, stack: Stack | null): T
     ${slabs ? html`<span class="label soft" style=${at(layout.left, layout.support.top - 19)}>${slabs}</span>` : nothing}
     <span class="label soft wash" style=${at(layout.left, layout.grid - 19)}>${gridWords}</span>
     <span class="label soft foot" style=${at(layout.left, layout.detector.bottom + 4)}
-      >${detector.material}, ${length(geometry.sourceToDetector_mm)} mm from the focal spot${behind}</span>`;
+      >${detector.material}, ${length(geometry.sourceToDetector_mm)} mm from the focal spot</span>`;
 }
 
 /** Words on the spine: fixtures, every layer with its material and thickness, and the detail. */

@@ -1,19 +1,14 @@
 import { html, type TemplateResult } from 'lit';
-import type { Draft } from '../../store/draft.js';
+import { type Draft, listAt } from '../../store/draft.js';
 import { addItem, removeItem } from '../../store/list-changes.js';
-import { type Json, valueAtPath } from '../../store/path.js';
+import type { Json } from '../../store/path.js';
 import { requestEdit } from './case-edit.js';
-
-const known = (draft: Draft, path: string): readonly Json[] => {
-  const list = valueAtPath(draft.case, path);
-  return Array.isArray(list) ? list : [];
-};
 
 /** Adds an item to a list of the case; `what` names it: `a filter`. */
 export const addButton = (draft: Draft, path: string, item: Json, what: string): TemplateResult =>
   html`<button class="plain" type="button" @click=${(event: Event) =>
     requestEdit(event.target as HTMLElement, {
-      change: addItem(path, item, known(draft, path)),
+      change: addItem(path, item, listAt(draft, path)),
     })}>add ${what}</button>`;
 
 /** Takes item `index` out of a list of the case; `what` names it for screen readers. */
@@ -28,5 +23,5 @@ export const removeButton = (
     event: Event,
   ) =>
     requestEdit(event.target as HTMLElement, {
-      change: removeItem(path, index, known(draft, path)),
+      change: removeItem(path, index, listAt(draft, path)),
     })}>remove</button>`;

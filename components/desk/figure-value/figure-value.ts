@@ -78,8 +78,10 @@ export class FigureValue extends LitElement {
       :host([small]) .unit {
         font-size: inherit;
       }
+      /* An answer that comes at once greys nothing: no flicker while an arrow key is held. */
       :host([stale]) button {
         color: var(--soft);
+        transition: color 0s 0.12s;
       }
       :host([stale]) .ratio svg {
         opacity: 0.45;

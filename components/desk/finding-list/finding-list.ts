@@ -1,19 +1,24 @@
 import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import type { Finding, Severity } from '../../../physics/results.js';
+import { mergedFindings } from '../../charts/merged-findings.js';
 
 const words: Record<Severity, string> = { limit: 'Limit', caution: 'Caution', note: 'Note' };
-const order: readonly Severity[] = ['limit', 'caution', 'note'];
+const order: readonly Severity[] = ['limit', 'caution'];
+/** With more findings than this, notes are folded away. */
+const foldedFrom = 3;
 
 /**
- * Findings as sentences in the margin, limits first; severity is a word and a mark.
+ * Findings as sentences in the margin, limits first, notes folded where they are many; severity is a
+ * word and a mark.
  *
- * Properties: `findings` (repeated sentences are shown once), `stale`. Events: none.
+ * Properties: `findings` (said once each), `techniques` (names sentences begin with), `stale`. Events: none.
  * Keyboard: none. Parts: none.
  */
 @customElement('finding-list')
 export class FindingList extends LitElement {
   @property({ attribute: false }) findings: readonly Finding[] = [];
+  @property({ attribute: false }) techniques: readonly string[] = [];
   @property({ type: Boolean, reflect: true }) stale = false;
 
   static override styles = css`
@@ -24,6 +29,7 @@ export class FindingList extends LitElement {
     }
     :host([stale]) {
       color: var(--soft);
+      transition: color 0s 0.12s;
     }
     ul {
       list-style: none;
@@ -53,17 +59,40 @@ export class FindingList extends LitElement {
     b {
       font-weight: 700;
     }
+    details {
+      border-block-start: 1px solid var(--rule);
+      padding-block-start: 0.45rem;
+    }
+    summary {
+      cursor: pointer;
+      color: var(--soft);
+    }
+    details ul {
+      margin-block-start: 0.4rem;
+    }
+    :focus-visible {
+      outline: 2px solid var(--ink);
+      outline-offset: 2px;
+    }
   `;
 
+  private item = ({ severity, message }: Finding) =>
+    html`<li class=${severity}><b>${words[severity]}.</b> ${message}</li>`;
+
   override render() {
-    const once = this.findings.filter(
-      (finding, i, all) => all.findIndex((other) => other.message === finding.message) === i,
-    );
-    if (once.length === 0) return nothing;
-    const sorted = [...once].sort((a, b) => order.indexOf(a.severity) - order.indexOf(b.severity));
-    return html`<ul aria-label="Findings">
-      ${sorted.map((finding) => html`<li class=${finding.severity}><b>${words[finding.severity]}.</b> ${finding.message}</li>`)}
-    </ul>`;
+    const merged = mergedFindings(this.findings, this.techniques);
+    if (merged.length === 0) return nothing;
+    const pressing = merged.filter(({ severity }) => severity !== 'note');
+    const sorted = pressing.sort((a, b) => order.indexOf(a.severity) - order.indexOf(b.severity));
+    const notes = merged.filter(({ severity }) => severity === 'note');
+    return html`${sorted.length > 0 ? html`<ul aria-label="Findings">${sorted.map(this.item)}</ul>` : nothing}
+      ${
+        notes.length > 0
+          ? html`<details ?open=${sorted.length + notes.length <= foldedFrom}>
+            <summary>${notes.length === 1 ? 'One note' : `${notes.length} notes`}</summary>
+            <ul aria-label="Notes">${notes.map(this.item)}</ul></details>`
+          : nothing
+      }`;
   }
 }
 

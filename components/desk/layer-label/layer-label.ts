@@ -49,6 +49,7 @@ export class LayerLabel extends LitElement {
         .choices=${materialChoices(draft)}></choice-field>
       <number-field data-field inline .draft=${draft} path="${path}.thickness_mm" label="Thickness of layer ${layer.name}" unit="mm"
         .edit=${layerEdits.thickness(this.index)}></number-field>
+      ${layer.agent ? html`<span class="grown">with ${layer.agent.name}</span>` : nothing}
       ${grown ? html`<span class="grown">· ${formatEntry(Number(this.thickness_mm.toFixed(1)))} here</span>` : nothing}`;
   }
 }

@@ -1,3 +1,4 @@
+import type { AbsorbedAlong } from '../../../physics/absorbed-along.js';
 import type { AlongBeam } from '../../../physics/along-beam.js';
 import type { Size } from '../../../physics/case/schema.js';
 import type { Comparison, Evaluation, Weighing } from '../../../physics/results.js';
@@ -5,7 +6,15 @@ import { type PlacedDetail, placeDetail } from '../../../physics/stack/place-det
 import { placeStack } from '../../../physics/stack/place-stack.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import type { Stack } from '../../../physics/stack/stack.js';
+import type { Track } from '../../../physics/transport/index.js';
 import type { Draft } from '../../store/draft.js';
+
+/** Photon paths to be drawn in the stack, and whose they are. */
+export interface DrawnTracks {
+  readonly technique: string;
+  readonly size: string;
+  readonly tracks: readonly Track[];
+}
 
 /** Everything the elements of the desk are handed: what is edited, and the last answer to it. */
 export interface DeskModel {
@@ -16,6 +25,10 @@ export interface DeskModel {
   readonly others: readonly Weighing[];
   /** The beam along the axis at the size looked at, per technique that could be computed. */
   readonly along: readonly AlongBeam[];
+  /** Energy absorbed along the depth, once an ink shows it. */
+  readonly absorbed?: readonly AbsorbedAlong[];
+  /** Paths of the photons of a check, while they are to be drawn. */
+  readonly tracks?: DrawnTracks | null;
   /** True while `weighing` belongs to an earlier state of the draft. */
   readonly stale: boolean;
   readonly sizeName: string;

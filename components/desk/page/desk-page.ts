@@ -1,5 +1,5 @@
 import { html, LitElement, nothing } from 'lit';
-import { customElement, property, query } from 'lit/decorators.js';
+import { customElement, property, query, state } from 'lit/decorators.js';
 import type { Fault } from '../../../physics/case/index.js';
 import type { Evaluation, Finding } from '../../../physics/results.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
@@ -8,8 +8,10 @@ import type { DeskCommand } from '../desk-header/desk-header.js';
 import type { ExplainCard } from '../explain-card/explain-card.js';
 import type { ExplainRequest } from '../figure-value/figure-value.js';
 import { comparisonOf, type DeskModel, evaluationOf } from '../model/desk-model.js';
+import type { CheckState } from '../transport-section/check-state.js';
 import type { Paper } from './paper.js';
 import { sectionInView } from './section-in-view.js';
+import { whenIdle } from './when-idle.js';
 import '../balance-section/balance-section.js';
 import '../beam-path/beam-path.js';
 import '../caution-footer/caution-footer.js';
@@ -23,6 +25,7 @@ import '../patient-section/patient-section.js';
 import '../room-section/room-section.js';
 import '../task-section/task-section.js';
 import '../techniques-section/techniques-section.js';
+import '../transport-section/transport-section.js';
 
 /** Whether a finding with this path is about the case or one of the techniques shown. */
 const concerns = ({ left, right }: DeskModel, path = ''): boolean => {
@@ -71,7 +74,7 @@ export const sections = [
  *
  * Properties: `model` (nothing is drawn before it is set), `scan`, `curveStale`, `hold`, and what the
  * head shows: `examples`, `canUndo`, `canRedo`, `status`, `paper`; `refused` (a file not opened and
- * why), `trouble` (why there is no answer). Events: `case-edit`, `command`, `example`,
+ * why), `trouble` (why there is no answer); `check` and `tracksDrawn` of the check by transport. Events: `case-edit`, `command`, `example`,
  * `choose-size`, `choose-hold`, `show-technique` from what it holds.
  */
 @customElement('desk-page')
@@ -88,10 +91,18 @@ export class DeskPage extends LitElement {
   @property({ attribute: false }) refused: { heading: string; faults: readonly Fault[] } | null =
     null;
   @property() trouble = '';
+  @property({ attribute: false }) check: CheckState | null = null;
+  @property({ type: Boolean }) tracksDrawn = false;
   @property() here = '';
   @query('explain-card') private card!: ExplainCard;
 
+  /** What the sections below show: the model of a moment ago, until the page is idle. */
+  @state() private sectionModel: DeskModel | null = null;
+
   private stopWatching: () => void = () => undefined;
+  private catchUp = whenIdle(() => {
+    this.sectionModel = this.model;
+  });
 
   protected override createRenderRoot() {
     return this;
@@ -102,6 +113,10 @@ export class DeskPage extends LitElement {
     this.addEventListener('explain', (event: CustomEvent<ExplainRequest>) => {
       this.card.show(event.detail, event.composedPath()[0] as HTMLElement);
     });
+  }
+
+  protected override updated() {
+    if (this.sectionModel !== this.model) this.catchUp();
   }
 
   protected override firstUpdated() {
@@ -151,6 +166,7 @@ export class DeskPage extends LitElement {
   override render() {
     const { model } = this;
     if (!model) return nothing;
+    const later = this.sectionModel ?? model;
     return html`${this.head()}
       <main>
         <beam-path .model=${model}></beam-path>
@@ -158,15 +174,16 @@ export class DeskPage extends LitElement {
           <curve-panel .model=${model} .scan=${this.scan} .hold=${this.hold} ?stale=${this.curveStale}></curve-panel>
           <div>
             <comparison-table .model=${model}></comparison-table>
-            <finding-list .findings=${this.findings()} ?stale=${model.stale}></finding-list>
+            <finding-list .findings=${this.findings()} .techniques=${model.draft.case.techniques.map(({ name }) => name)} ?stale=${model.stale}></finding-list>
           </div>
         </aside>
         <div class="sections">
-          <room-section id="room" .model=${model}></room-section>
-          <patient-section id="patient" .model=${model}></patient-section>
-          <task-section id="task" .model=${model}></task-section>
-          <techniques-section id="techniques" .model=${model}></techniques-section>
-          <balance-section id="balance" .model=${model}></balance-section>
+          <room-section id="room" .model=${later}></room-section>
+          <patient-section id="patient" .model=${later}></patient-section>
+          <task-section id="task" .model=${later}></task-section>
+          <techniques-section id="techniques" .model=${later}></techniques-section>
+          <balance-section id="balance" .model=${later}></balance-section>
+          <transport-section .model=${later} .check=${this.check} ?tracksDrawn=${this.tracksDrawn}></transport-section>
         </div>
       </main>
       <caution-footer></caution-footer>

@@ -1,7 +1,7 @@
 import type { Fault } from '../../../physics/case/index.js';
-import type { Size } from '../../../physics/case/schema.js';
 import type { HoldConstant } from '../../../physics/results.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
+import { usualSize } from '../../../physics/stack/usual-size.js';
 import { autosave } from '../../store/autosave.js';
 import { chooseFiles, fileNameFor, readHanded, saveCase } from '../../store/case-files.js';
 import { createCaseStore, type Sheet, type StoreState } from '../../store/case-store.js';
@@ -9,6 +9,7 @@ import { valueAtPath } from '../../store/path.js';
 import { startEvaluator } from '../../workers/evaluator.js';
 import { makeEvaluationWorker } from '../../workers/make-evaluation-worker.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
+import { joinTransport } from '../transport-section/join-transport.js';
 import { answering } from './answers.js';
 import type { DeskPage } from './desk-page.js';
 import { examples } from './examples.js';
@@ -49,9 +50,11 @@ export async function startDesk(page: DeskPage): Promise<void> {
     },
   });
 
+  const besidesChanged = joinTransport(page, () => store.state().draft);
   const askAgain = () => {
     const { draft, revision } = store.state();
     page.curveStale = true;
+    besidesChanged();
     ask({ revision, parsed: draft, size: page.model.sizeName, hold: page.hold as HoldConstant });
   };
 
@@ -65,10 +68,12 @@ export async function startDesk(page: DeskPage): Promise<void> {
       weighing: page.model?.weighing ?? null,
       along: page.model?.along ?? [],
       others: page.model?.others ?? [],
+      absorbed: page.model?.absorbed,
+      tracks: page.model?.tracks,
       stale: true,
       sizeName: sizes.some(({ name }) => name === page.model?.sizeName)
         ? page.model.sizeName
-        : usualSize(sizes),
+        : usualSize(sizes).name,
       left: 0,
       right: techniques.length > 1 ? Math.min(Math.max(1, shown), techniques.length - 1) : null,
     };
@@ -132,6 +137,9 @@ export async function startDesk(page: DeskPage): Promise<void> {
     if ('path' in detail) store.setAt(detail.path, detail.value);
     else store.change(detail.change, detail.joins);
   });
+  page.addEventListener('fault-report', ({ detail }) => {
+    page.refused = detail;
+  });
   page.addEventListener('command', ({ detail }) => void commands[detail]());
   page.addEventListener('example', ({ detail }) => {
     const chosen = examples.find(({ name }) => name === detail);
@@ -150,13 +158,6 @@ export async function startDesk(page: DeskPage): Promise<void> {
   });
   listenForKeys(commands);
   listenForDrops(handed);
-}
-
-/** The size to look at first: of those with the greatest weight, the middle one. */
-function usualSize(sizes: readonly Size[]): string {
-  const most = Math.max(...sizes.map(({ weight }) => weight));
-  const heaviest = sizes.filter(({ weight }) => weight === most);
-  return heaviest[Math.floor((heaviest.length - 1) / 2)].name;
 }
 
 /** Ctrl (or Command) with Z, Shift+Z, Y, S and O, wherever the focus is. */

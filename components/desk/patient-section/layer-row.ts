@@ -3,6 +3,7 @@ import { customElement, property } from 'lit/decorators.js';
 import { formatEntry } from '../../charts/format.js';
 import { renameLayer } from '../../store/layer-changes.js';
 import { requestEdit } from '../fields/case-edit.js';
+import { layerAgent } from '../layer-fields/layer-agent.js';
 import { layerEdits } from '../layer-fields/layer-edits.js';
 import { layerKeys } from '../layer-fields/layer-keys.js';
 import { materialChoices } from '../layer-fields/material-choices.js';
@@ -64,6 +65,7 @@ export class LayerRow extends LitElement {
         .edit=${layerEdits.thickness(this.index)}></number-field></span>
       <span role="cell"><number-field data-field inline .draft=${draft} path="${path}.growthShare" label="Growth share of layer ${name}" unit="" step="0.1" empty="by thickness"></number-field></span>
       <span role="cell">${formatEntry(Number(this.thickness_mm.toFixed(1)))} mm</span>
+      <span role="cell">${layerAgent(draft, this.index)}</span>
       <span role="cell"><button class="plain" type="button" aria-label="Remove layer ${name}" ?disabled=${layers.length < 2}
         @click=${() => requestEdit(this, layerEdits.remove(this.index))}>remove</button></span>`;
   }

@@ -2,9 +2,10 @@ import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { formatEntry, formatPercent } from '../../charts/format.js';
+import { addItems } from '../../store/list-changes.js';
 import { requestEdit } from '../fields/case-edit.js';
 import { fieldOf, numberSpec, textSpec } from '../fields/field-specs.js';
-import { addButton, removeButton } from '../fields/list-buttons.js';
+import { removeButton } from '../fields/list-buttons.js';
 import { layerEdits } from '../layer-fields/layer-edits.js';
 import { type DeskModel, placed } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
@@ -26,7 +27,7 @@ export class PatientSection extends LitElement {
     css`
       .rows {
         display: grid;
-        grid-template-columns: repeat(7, max-content);
+        grid-template-columns: repeat(8, max-content);
         column-gap: 1.3rem;
         font-size: var(--small);
       }
@@ -64,6 +65,7 @@ export class PatientSection extends LitElement {
           'thickness',
           'growth share',
           'at this size',
+          'agent in it',
           '',
         ].map(
           (heading) => html`<span role=${heading ? 'columnheader' : 'cell'}>${heading}</span>`,
@@ -91,7 +93,8 @@ export class PatientSection extends LitElement {
       thickness_mm: Math.round((shown.at(-1)?.thickness_mm ?? 200) + 20),
       weight: 1,
     };
-    const start = 'file' in sizes || sizes.length > 0 ? [] : [{ ...shown[0] }];
+    // The first size added stands beside the layers as drawn, which are then a size of their own.
+    const added = 'file' in sizes || sizes.length > 0 ? [fresh] : [{ ...shown[0] }, fresh];
     return html`<div class="wide">
       <h3>Size mix</h3>
       ${
@@ -111,7 +114,10 @@ export class PatientSection extends LitElement {
               </tr>`;
             })}</tbody></table>`
       }
-      <p class="after">${addButton({ ...draft, case: { ...draft.case, patient: { ...draft.case.patient, sizes: start } } }, 'patient.sizes', fresh, 'a size')}</p>
+      <p class="after"><button class="plain" type="button" @click=${(event: Event) =>
+        requestEdit(event.target as HTMLElement, {
+          change: addItems('patient.sizes', added),
+        })}>add a size</button></p>
     </div>`;
   }
 

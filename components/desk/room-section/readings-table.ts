@@ -1,17 +1,20 @@
 import { html, type TemplateResult } from 'lit';
 import type { Residual } from '../../../physics/results.js';
 import { formatNumber } from '../../charts/format.js';
+import { listAt } from '../../store/draft.js';
+import { faultNote } from '../fields/fault-note.js';
 import { choiceSpec, fieldOf, numberSpec } from '../fields/field-specs.js';
 import { addButton, removeButton } from '../fields/list-buttons.js';
 import type { DeskModel } from '../model/desk-model.js';
+import { readingsImport } from './readings-import.js';
 
 const signed = (percent: number): string =>
   `${percent > 0 ? '+' : ''}${formatNumber(percent, 2)} %`;
 
 /** The user's own measurements, which calibrate the model, each with what the model makes of it. */
 export function readingsTable({ draft, weighing }: DeskModel): TemplateResult {
-  const { readings, filters } = draft.case.room;
-  const names = filters.map(({ name }) => name);
+  const readings = listAt(draft, 'room.readings');
+  const names = draft.case.room.filters.map(({ name }) => name);
   const residual = (i: number, quantity: Residual['quantity']) => {
     const found = weighing?.calibration?.residuals.find(
       (entry) =>
@@ -51,5 +54,7 @@ export function readingsTable({ draft, weighing }: DeskModel): TemplateResult {
           <tbody>${readings.map((_, i) => row(i))}</tbody></table></div>`
       : html`<p class="note">None entered: the tube is not calibrated to this room, and its output may be off by a third.</p>`
   }
-    <p class="after">${addButton(draft, 'room.readings', { potential_kV: 80, filter: names[0] ?? 'none', halfValueLayer_mmAl: null, airKerma_uGy_per_mAs: null }, 'a reading')}</p>`;
+    <p class="after">${addButton(draft, 'room.readings', { potential_kV: 80, filter: names[0] ?? 'none', halfValueLayer_mmAl: null, airKerma_uGy_per_mAs: null }, 'a reading')}
+      ${readingsImport()}</p>
+    ${faultNote(draft.faults.find(({ path }) => /^room\.readings\[\d+\]$/.test(path)))}`;
 }

@@ -16,6 +16,7 @@ import {
 } from './room-specs.js';
 import { rulesTable } from './rules-table.js';
 import { slabsTable } from './slabs-table.js';
+import { sourceFields } from './source-fields.js';
 
 /**
  * The room: tube, readings, filters, support, geometry, grid, detector, rules, all editable.
@@ -64,7 +65,7 @@ export class RoomSection extends LitElement {
       <h2 id="name">Room</h2>
       <div class="groups">
         <div class="wide fields">
-          ${fieldOf(draft, textSpec('room.name', 'Name'))}
+          ${fieldOf(draft, textSpec('room.name', 'Name'))} ${sourceFields(draft)}
         </div>
         ${this.group(tubeGroup)} ${this.group(geometryGroup)}
         <div>

@@ -1,7 +1,6 @@
 import { html, type TemplateResult } from 'lit';
 import { materialNames } from '../../../materials/index.js';
-import type { Draft } from '../../store/draft.js';
-import { valueAtPath } from '../../store/path.js';
+import { type Draft, listAt } from '../../store/draft.js';
 import { choiceSpec, fieldOf, numberSpec } from '../fields/field-specs.js';
 import { addButton, removeButton } from '../fields/list-buttons.js';
 
@@ -12,8 +11,7 @@ export function slabsTable(
   caption: string,
   sided = false,
 ): TemplateResult {
-  const slabs = valueAtPath(draft.case, path);
-  const rows = Array.isArray(slabs) ? slabs : [];
+  const rows = listAt(draft, path);
   const row = (i: number) => {
     const at = `${path}[${i}]`;
     const what = `slab ${i + 1} of ${caption.toLowerCase()}`;

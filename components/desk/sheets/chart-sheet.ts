@@ -51,9 +51,11 @@ export const chartSheet = css`
   }
   .stale {
     color: var(--soft);
+    transition: color 0s 0.12s;
   }
   .stale svg {
     opacity: 0.45;
+    transition: opacity 0s 0.12s;
   }
   .waiting {
     margin: 0;

@@ -71,7 +71,7 @@ export const sectionSheet = css`
     font-weight: 400;
     text-align: start;
     vertical-align: baseline;
-    padding: 0.28rem 1.3rem 0.28rem 0;
+    padding: 0.28rem 1.05rem 0.28rem 0;
     border-block-end: 1px solid var(--rule);
     white-space: nowrap;
   }
@@ -106,6 +106,31 @@ export const sectionSheet = css`
   }
   .after {
     margin-block-start: 0.5rem;
+  }
+  .file {
+    font-size: var(--small);
+    position: relative;
+    border-block-end: 1px dotted var(--entry-rule);
+    cursor: pointer;
+  }
+  .file:hover {
+    border-block-end: 1px solid currentColor;
+  }
+  .file:focus-within {
+    outline: 2px solid var(--ink);
+    outline-offset: 2px;
+  }
+  .file input {
+    position: absolute;
+    inset: 0;
+    width: 100%;
+    opacity: 0;
+    cursor: pointer;
+  }
+  .fault {
+    color: var(--limit);
+    font-size: var(--small);
+    margin: 0.3rem 0;
   }
   :focus-visible {
     outline: 2px solid var(--ink);

@@ -1,4 +1,5 @@
-import { html, type TemplateResult } from 'lit';
+import { html, nothing, type TemplateResult } from 'lit';
+import { limitName } from '../../charts/limit-names.js';
 import { quantity } from '../../charts/quantities.js';
 import { renameTechnique } from '../../store/technique-changes.js';
 import { type DeskModel, evaluationOf } from '../model/desk-model.js';
@@ -8,6 +9,16 @@ const number = (model: DeskModel, technique: number, id: string): TemplateResult
   return html`<figure-value quantity=${id} .value=${evaluation ? quantity(id).of(evaluation) : null} ?stale=${model.stale}
     technique=${model.draft.case.techniques[technique].name}></figure-value>`;
 };
+
+/** What forbids a technique at the size looked at, by the name of the first limit. */
+function forbidden(model: DeskModel, technique: number) {
+  const limits = evaluationOf(model, technique)?.findings.filter(
+    ({ severity }) => severity === 'limit',
+  );
+  if (!limits || limits.length === 0) return nothing;
+  const more = limits.length > 1 ? ` and ${limits.length - 1} more` : '';
+  return html`<p class="forbidden">■ not allowed: ${limitName(limits[0].code)}${more}</p>`;
+}
 
 /** The technique's name, and on the right the choice among several Proposed ones. */
 export function techniqueName(model: DeskModel, technique: number): TemplateResult {
@@ -31,7 +42,8 @@ export function techniqueName(model: DeskModel, technique: number): TemplateResu
               : html`<option value=${i} ?selected=${i === technique}>${entry.name}</option>`,
           )}</select></label>`
         : null
-    }`;
+    }
+    ${forbidden(model, technique)}`;
 }
 
 /** Potential, typed in place. */

@@ -41,7 +41,8 @@ export class TechniquesSection extends LitElement {
         margin: 0;
         --field-size: var(--text);
       }
-      .switch {
+      .switch,
+      .forbidden {
         display: none;
       }
       td {
@@ -64,8 +65,16 @@ export class TechniquesSection extends LitElement {
         break-inside: avoid;
         margin-block-end: 1.2rem;
       }
+      .results table {
+        table-layout: fixed;
+      }
       .results th:first-child {
-        width: 14rem;
+        width: 12.5rem;
+        white-space: normal;
+      }
+      .results td {
+        white-space: nowrap;
+        padding-inline-end: 0.4rem;
       }
       .ratio {
         color: var(--soft);

@@ -11,8 +11,6 @@ const setting = (potential_kV: number, filter: string, hardness: number): SweepS
     size: 'median',
     values: {
       tubeLoad_mAs: 20,
-      tubeEnergy_kJ: 1.6,
-      skinAbsorbedDose_mGy: null,
       tubeCurrent_mA: 250,
       exposureTime_ms: 80,
       power_kW: 20,

@@ -1,18 +1,12 @@
-import type { EnergyNodes } from './energy-nodes.js';
+import { comptonEnergyRatio } from '../../materials/index.js';
+import { type EnergyNodes, isEdge } from './energy-nodes.js';
 import { equivalentWater } from './equivalent-water.js';
 import { multipleFieldFactor } from './field-table.js';
 import { type FirstOrder, firstOrder } from './first-order.js';
 import type { ScatterGeometry } from './geometry.js';
 import { type GridShare, gridShare } from './grid-share.js';
 import type { InfiniteField } from './infinite-field.js';
-import {
-  airKermaScore,
-  type ScatterDetector,
-  type ScatterGrid,
-  type ScoreTable,
-  scoreCount,
-  scoreTable,
-} from './scores.js';
+import { airKermaScore, type ScatterGrid, type ScoreTable, scoreCount } from './scores.js';
 import type { Slab } from './slabs.js';
 
 /** A stack in its geometry, on the energies it is solved for. */
@@ -45,12 +39,8 @@ export function estimate(scene: ScatterScene, { multiple }: InfiniteField): Floa
     halfSide_cm: Number.POSITIVE_INFINITY,
   };
   const here = firstOrder(slabs, geometry, nodes, table);
-  const spreads = comptonSpreads(here, firstOrder(slabs, broad, nodes, table));
-  const energyTable = scoreTable(energyMeter, null, nodes);
-  const [byEnergy] = comptonSpreads(
-    firstOrder(slabs, geometry, nodes, energyTable),
-    firstOrder(slabs, broad, nodes, energyTable),
-  );
+  const spreads = comptonSpreads(here, firstOrder(slabs, broad, nodes, table), nodes.energies_keV);
+  const byEnergy = spreads[table.width - 1];
   const factor = {
     energy: fieldFactors('energy', slabs, geometry, nodes.energies_keV),
     airKerma: fieldFactors('airKerma', slabs, geometry, nodes.energies_keV),
@@ -74,21 +64,37 @@ export function estimate(scene: ScatterScene, { multiple }: InfiniteField): Floa
   });
 }
 
-/** An ideal detector of energy, for which the field table was made. */
-const energyMeter: ScatterDetector = {
-  efficiency: () => 1,
-  energyFraction: () => 1,
-  energySquareFraction: () => 1,
-  edges_keV: [],
-};
-
 /** Compton scatter here over that in an infinite field, by score; 1 where there is none at all. */
-const comptonSpreads = (here: FirstOrder, infinite: FirstOrder): Float64Array[] =>
+const comptonSpreads = (
+  here: FirstOrder,
+  infinite: FirstOrder,
+  energies_keV: Float64Array,
+): Float64Array[] =>
   here.compton.map((values, score) =>
-    values.map((value, i) =>
-      infinite.compton[score][i] > 0 ? value / infinite.compton[score][i] : 1,
+    bridgeEdges(
+      values.map((value, i) =>
+        infinite.compton[score][i] > 0 ? value / infinite.compton[score][i] : 1,
+      ),
+      energies_keV,
     ),
   );
+
+/**
+ * Just above an edge first-order scatter is mostly what Compton scattering carries below the edge, at
+ * large angles; multiple scatter, with the K lines, gets below it otherwise. Where scattering by 90°
+ * crosses an edge the ratio below the edge stands.
+ */
+function bridgeEdges(ratios: Float64Array, energies_keV: Float64Array): Float64Array {
+  const bridged = ratios.slice();
+  for (let edge = 0; edge < ratios.length - 1; edge++) {
+    if (!isEdge(energies_keV, edge)) continue;
+    for (let i = edge + 1; i < ratios.length; i++) {
+      if (energies_keV[i] * comptonEnergyRatio(energies_keV[i], 0) >= energies_keV[edge]) break;
+      bridged[i] = bridged[edge];
+    }
+  }
+  return bridged;
+}
 
 const gridGain = (
   { here, broad }: { readonly here: GridShare; readonly broad: GridShare },

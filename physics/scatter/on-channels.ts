@@ -5,8 +5,10 @@ import type { DetectorScatter, ScatterResponses } from './responses.js';
 const made = new WeakMap<ScatterResponses, WeakMap<Float64Array, ScatterResponses>>();
 
 /**
- * The same responses on the channels of a spectrum: linear in ln E between nodes, never across an
- * edge; beyond the first and last node their values are held. Kept by identity of both arguments.
+ * The same responses on the channels of a spectrum: ln of the value linear in ln E between nodes, never
+ * across an edge; beyond the first and last node their values are held. Kept by identity of both
+ * arguments. Through strong absorbers a ratio to the primary falls by orders of magnitude from node to
+ * node: interpolating its logarithm keeps its product with the primary smooth.
  */
 export function responsesOn(
   responses: ScatterResponses,
@@ -19,9 +21,7 @@ export function responsesOn(
 function interpolate(responses: ScatterResponses, energies_keV: Float64Array): ScatterResponses {
   const places = Array.from(energies_keV, (energy) => placeOf(responses.energies_keV, energy));
   const column = (values: Float64Array) =>
-    Float64Array.from(places, ({ low, share }) =>
-      share === 0 ? values[low] : values[low] + share * (values[low + 1] - values[low]),
-    );
+    Float64Array.from(places, ({ low, share }) => between(values[low], values[low + 1], share));
   const scatter = (of: DetectorScatter): DetectorScatter => ({
     signal: column(of.signal),
     noise: column(of.noise),
@@ -36,6 +36,11 @@ function interpolate(responses: ScatterResponses, energies_keV: Float64Array): S
     layerAbsorbedFraction: responses.layerAbsorbedFraction?.map(column) ?? null,
     method: responses.method,
   };
+}
+
+function between(low: number, high: number, share: number): number {
+  if (share === 0) return low;
+  return low > 0 && high > 0 ? low * (high / low) ** share : low + share * (high - low);
 }
 
 function placeOf(nodes: Float64Array, energy: number): { low: number; share: number } {

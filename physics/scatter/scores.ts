@@ -56,7 +56,7 @@ const grazingCosine = 1e-3;
 /**
  * Scores over the fine energies and 48 angles β ∝ j² (dense near the normal, where the grid's
  * transmission falls): `values[(energy · 48 + angle) · width + score]`. With a grid, scores 4–7
- * repeat 0–3 times its transmission.
+ * repeat 0–3 times its transmission. The last score is the photon's energy itself, E.
  */
 export interface ScoreTable {
   readonly values: Float64Array;
@@ -98,7 +98,7 @@ function tabulate(
   grid: ScatterGrid | null,
   energies_keV: Float64Array,
 ): ScoreTable {
-  const width = grid ? 2 * scoreCount : scoreCount;
+  const width = (grid ? 2 * scoreCount : scoreCount) + 1;
   const values = new Float64Array(energies_keV.length * angleCount * width);
   const airKerma = airKermaPerFluence(energies_keV);
   let at = 0;
@@ -107,6 +107,7 @@ function tabulate(
       const cosine = Math.cos(scoreBetas_rad[j]);
       values.set(photonScores(detector, energy, cosine), at);
       values[at + airKermaScore] = airKerma[i];
+      values[at + width - 1] = energy;
       if (!grid) continue;
       const transmission = grid.lookup(energy, cosine);
       for (let score = 0; score < scoreCount; score++) {

@@ -5,8 +5,8 @@ import { defaultOf, elementOf, shapeFor } from './schema-walk.js';
 /** Keys that hold prose: they change no result, so no default of theirs is an assumption. */
 export const proseKeys: ReadonlySet<string> = new Set(['title', 'question', 'dossier.text']);
 
-/** Mass fractions that the file leaves out come from the formula it gives. */
-const fromFormula = /^materials\[\d+\]\.massFractions$/;
+/** A material is given by its formula or its mass fractions; the other is no assumption. */
+const eitherGiven = /^materials\[\d+\]\.(formula|massFractions)$/;
 
 /**
  * Every path whose value is a default because the input has no key there, in the order of the
@@ -18,7 +18,7 @@ const fromFormula = /^materials\[\d+\]\.massFractions$/;
 export const assumedPaths = (schema: z.core.$ZodType, input: unknown, parsed: unknown): string[] =>
   defaultedPaths(schema, input, parsed, [])
     .map(printedPath)
-    .filter((path) => !proseKeys.has(path) && !fromFormula.test(path));
+    .filter((path) => !proseKeys.has(path) && !eitherGiven.test(path));
 
 const defaultedPaths = (
   schema: z.core.$ZodType,

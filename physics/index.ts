@@ -6,6 +6,7 @@ export * from './beam/index.js';
 // The case.
 export * from './case/index.js';
 export { sharedWith } from './case/shared-with.js';
+export { cautions } from './cautions.js';
 export { compare, holdConstants, holdConstantWords } from './compare.js';
 export { evaluate } from './evaluate.js';
 export { isAllowed } from './limits.js';
@@ -13,7 +14,6 @@ export { type OperatingPoint, operatingPoint } from './operating-point.js';
 // Weighing: every technique at every size, every Proposed against Current.
 export * from './results.js';
 export { type RuleDeparture, rulesOfThumb } from './rules-of-thumb.js';
-
 // The decision: all settings, what no setting beats, who is worse off, what to solve for.
 export { type PotentialScan, potentialScan, roomPotentials_kV } from './scan.js';
 export { mixOutcomes, outcomeSentence, percentileResults } from './sizes.js';

@@ -1,7 +1,7 @@
 import { Command } from 'commander';
+import { cautions } from '../../physics/cautions.js';
 import { version } from '../../physics/version.js';
 import { beamCommand } from './beam.js';
-import { cautions } from './cautions.js';
 import { checksCommand } from './checks.js';
 import type { Io } from './io.js';
 import { matterCommand } from './matter.js';
@@ -15,7 +15,7 @@ export const program = (io: Io): Command => {
     .version(version, '--version', 'print the version')
     .helpOption('-h, --help', 'print this help')
     .helpCommand(false)
-    .addHelpText('after', `\n${cautions}`);
+    .addHelpText('after', `\n${cautions.join('\n')}`);
   for (const command of [
     weighCommand(io),
     transportCommand(io),
@@ -39,7 +39,7 @@ const withAnswerForms = (command: Command): Command =>
   command
     .option('--json', 'answer for programs, at full precision')
     .option('--csv', 'answer as a CSV table')
-    .addHelpText('after', `\n${cautions}`);
+    .addHelpText('after', `\n${cautions.join('\n')}`);
 
 const forAll = (command: Command, change: (command: Command) => void): Command => {
   change(command);

@@ -1,5 +1,5 @@
 import { CommanderError } from 'commander';
-import { cautions } from './cautions.js';
+import { cautions } from '../../physics/cautions.js';
 import { type ExitCode, exitCode } from './exit-code.js';
 import type { Io } from './io.js';
 import { program } from './program.js';
@@ -18,7 +18,7 @@ export const run = async (words: readonly string[], io: Io): Promise<ExitCode> =
   const asJson = words.includes('--json');
   try {
     if (words.length === 0) {
-      io.err(`${root.helpInformation()}\n${cautions}\n`);
+      io.err(`${root.helpInformation()}\n${cautions.join('\n')}\n`);
       return exitCode.badInput;
     }
     await root.parseAsync([...words], { from: 'user' });

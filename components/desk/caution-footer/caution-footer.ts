@@ -1,5 +1,6 @@
 import { css, html, LitElement } from 'lit';
 import { customElement } from 'lit/decorators.js';
+import { cautions } from '../../../physics/cautions.js';
 
 /** What the desk is and is not for; always in view. No properties, events, keys or parts. */
 @customElement('caution-footer')
@@ -22,11 +23,7 @@ export class CautionFooter extends LitElement {
   `;
 
   override render() {
-    return html`<footer>
-      Planning and documentation aid for qualified medical physicists. Modelled values need
-      confirmation by measurement before clinical use. Local regulations and licensed practice
-      decide. No patient identifiers. Not for decisions on an individual’s treatment.
-    </footer>`;
+    return html`<footer>${cautions.join(' ')}</footer>`;
   }
 }
 

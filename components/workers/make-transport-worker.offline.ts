@@ -1,4 +1,4 @@
-import { pageWorker } from './page-transport-worker.js';
+import { pageWorker } from './page-worker.js';
 import type { TransportWorker } from './transport-messages.js';
 import Inlined from './transport-worker.ts?worker&inline';
 

@@ -1,5 +1,6 @@
 import type { Batch } from '../../physics/jobs/index.js';
 import type { TransportInput } from '../../physics/transport/index.js';
+import type { PoolWorker } from './page-worker.js';
 
 /** To a transport worker: a run to hold ready, or one of its batches to fly. */
 export type ToTransportWorker =
@@ -17,12 +18,4 @@ export type FromTransportWorker =
   | { readonly kind: 'failed'; readonly run: number; readonly message: string };
 
 /** A worker of the page or a thread of Node, as the pool sees it. */
-export interface TransportWorker {
-  readonly post: (message: ToTransportWorker) => void;
-  /** Called once; `lost` when the worker has stopped by itself. */
-  readonly listen: (
-    answer: (message: FromTransportWorker) => void,
-    lost: (message: string) => void,
-  ) => void;
-  readonly end: () => void;
-}
+export type TransportWorker = PoolWorker<ToTransportWorker, FromTransportWorker>;

@@ -2,6 +2,7 @@ import type { Evaluation } from '../../../physics/results.js';
 import { faceDepths_mm, type Shading, type StackScene } from '../../../scenes/stack-scene-data.js';
 import { stepProfile } from '../../../scenes/step-profile.js';
 import { type DeskModel, evaluationOf } from '../model/desk-model.js';
+import { energyShadingsOf } from '../transport-section/energy-shadings.js';
 import { stackSceneOf } from './stack-scene.js';
 
 /** Mean absorbed dose of every layer as a profile; null while it is not computed. */
@@ -23,7 +24,7 @@ export function stackShadingsOf(model: DeskModel): readonly Shading[] {
   const scene = stackSceneOf(model);
   const shown = model.right === null ? [model.left] : [model.left, model.right];
   const profiles = shown.map((index) => scene && absorbedDose(scene, evaluationOf(model, index)));
-  const shadings: Shading[] = profiles.some(Boolean)
+  const doses: Shading[] = profiles.some(Boolean)
     ? [
         {
           quantity: 'layer absorbed dose',
@@ -34,6 +35,7 @@ export function stackShadingsOf(model: DeskModel): readonly Shading[] {
         },
       ]
     : [];
+  const shadings = [...doses, ...(scene ? energyShadingsOf(model) : [])];
   made.set(model, shadings);
   return shadings;
 }

@@ -30,7 +30,8 @@ import { followPointer } from './view-pointer.js';
  * (null: the page's custom properties); `view`, one of the named views; `labels`, `all`, `turned`
  * (own labels only when turned away from the section), `none`.
  * Events: `stack-anchors` with StackAnchors, the places in the section view, whenever they change;
- * `view-turned` with true while labels beside the section do not fit the view. Both bubble.
+ * `view-turned` with true while labels beside the section do not fit the view; `choose-ink` with the
+ * quantity the ink is to show. All bubble.
  * Keyboard: arrows turn, Shift and arrows shift, + and − zoom, 1–6 named views, 0 or Home resets.
  * Pointer: drag turns, Shift and drag shifts, the wheel zooms with Ctrl or once the view has focus.
  * Parts: `stage`, `label`, `legend`, `views`, `table`.
@@ -179,6 +180,7 @@ export class StackView extends LitElement {
     const inks = [this.scene?.shading ?? scene.primary, ...this.shadings];
     const choose = (quantity: string) => {
       this.chosen = quantity;
+      this.tell('choose-ink', quantity);
     };
     return html`<div class="foot">
       ${stackLegend(scene, this.layout, inks, choose)}
@@ -213,5 +215,6 @@ declare global {
   interface HTMLElementEventMap {
     'view-turned': CustomEvent<boolean>;
     'stack-anchors': CustomEvent<StackAnchors>;
+    'choose-ink': CustomEvent<string>;
   }
 }

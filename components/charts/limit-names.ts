@@ -12,6 +12,11 @@ const names: Readonly<Record<string, string>> = {
   kermaRate: 'beyond kerma rate',
   sourceToSkin: 'skin too near',
   motion: 'too slow for the motion',
+  detectorFloor: 'below the detector floor',
+  detectorCeiling: 'above the detector ceiling',
+  agentAmount: 'more agent than deliverable',
+  equalityUnreachable: 'equality out of reach',
+  offControlCurve: 'off the control curve',
 };
 
 /** The name of a limit by the code of its finding. */

@@ -12,8 +12,8 @@ import {
   tungstenSpectrum,
 } from '../../physics/beam/index.js';
 import { defaults } from '../../physics/case/index.js';
+import { csvText } from '../../physics/csv/csv-text.js';
 import type { BeamQuality } from '../../physics/results.js';
-import { csvText } from './csv-text.js';
 import type { Io } from './io.js';
 import { shown } from './numbers.js';
 import { optionNumber } from './option-number.js';

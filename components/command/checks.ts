@@ -1,7 +1,7 @@
 import { Command } from 'commander';
 import { type CheckRow, publishedChecks } from '../../physics/checks/index.js';
+import { csvText } from '../../physics/csv/csv-text.js';
 import { checksText } from './checks-text.js';
-import { csvText } from './csv-text.js';
 import type { Io } from './io.js';
 import { type Format, print } from './print.js';
 import { Shortfall } from './shortfall.js';

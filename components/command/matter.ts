@@ -6,7 +6,7 @@ import {
   massEnergyAbsorption,
   partialCoefficients,
 } from '../../materials/index.js';
-import { csvText } from './csv-text.js';
+import { csvText } from '../../physics/csv/csv-text.js';
 import type { Io } from './io.js';
 import { materialNamed } from './material-named.js';
 import { shown } from './numbers.js';

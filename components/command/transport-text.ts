@@ -5,9 +5,9 @@ import {
   statedBalance_fraction,
   verdictText,
 } from '../../physics/check-by-transport/index.js';
+import { csvText } from '../../physics/csv/csv-text.js';
 import type { CaseStamp, Finding } from '../../physics/results.js';
 import { version } from '../../physics/version.js';
-import { csvText } from './csv-text.js';
 import { shown } from './numbers.js';
 import { plainTableText } from './plain-table.js';
 

@@ -1,5 +1,5 @@
+import { csvText } from '../../physics/csv/csv-text.js';
 import type { Weighing } from '../../physics/results.js';
-import { csvText } from './csv-text.js';
 import { quantityOf, quantitySections } from './weigh-quantities.js';
 
 const quantities = quantitySections.flatMap((section) => section.quantities);

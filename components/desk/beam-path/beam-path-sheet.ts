@@ -56,7 +56,7 @@ export const beamPathSheet = css`
   .sentence {
     display: block;
     font-size: var(--small);
-    line-height: 1.55;
+    line-height: 24px;
     color: var(--soft);
   }
   .sentence choice-field,

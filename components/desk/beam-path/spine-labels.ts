@@ -7,7 +7,7 @@ import type { DeskModel } from '../model/desk-model.js';
 import '../layer-label/layer-label.js';
 import '../detail-label/detail-label.js';
 
-const labelHeight = 21;
+const labelHeight = 26;
 
 /** Lengths to a tenth of a millimetre, without needless zeros. */
 const length = (value_mm: number): string => formatEntry(Number(value_mm.toFixed(1)));

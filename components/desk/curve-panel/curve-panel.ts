@@ -64,6 +64,9 @@ export class CurvePanel extends LitElement {
         font-size: var(--small);
         line-height: 1.5;
       }
+      .condition select {
+        min-height: 24px;
+      }
       .condition choice-field {
         color: var(--ink);
       }

@@ -88,7 +88,7 @@ export class DeskHeader extends LitElement {
       flex-wrap: wrap;
       align-items: baseline;
       gap: 0.2rem 1.1rem;
-      padding-block: 0 0.4rem;
+      padding-block: 0 0.25rem;
       font-size: var(--small);
       color: var(--soft);
     }
@@ -99,6 +99,8 @@ export class DeskHeader extends LitElement {
       background: none;
       border: 0;
       padding: 0;
+      min-width: 24px;
+      min-height: 24px;
       cursor: pointer;
     }
     select {

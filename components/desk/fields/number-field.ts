@@ -38,7 +38,11 @@ export class NumberField extends LitElement {
     fieldSheet,
     css`
       input {
-        width: calc(var(--chars, 3) * 1ch + 3px);
+        /* A short figure is hit on 24 px but takes no more room than it is wide. */
+        --natural: calc(var(--chars, 3) * 1ch + 3px);
+        width: max(24px, var(--natural));
+        margin-inline: min(0px, (var(--natural) - 24px) / 2);
+        text-align: center;
       }
     `,
   ];

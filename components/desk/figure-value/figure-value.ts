@@ -48,6 +48,9 @@ export class FigureValue extends LitElement {
         background: none;
         border: 0;
         padding: 0;
+        min-width: 24px;
+        min-height: 24px;
+        text-align: inherit;
         cursor: help;
       }
       :host([small]) button {

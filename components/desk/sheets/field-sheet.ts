@@ -46,13 +46,16 @@ export const fieldSheet = css`
     font-variant-numeric: inherit;
     line-height: 1.25;
     color: var(--field-ink, inherit);
-    background: transparent;
+    /* The rule lies close under the words, not at the edge of what can be hit. */
+    --rule-drawn: repeating-linear-gradient(to right, var(--entry-rule) 0 1px, transparent 1px 3px);
+    background: var(--rule-drawn) 50% calc(50% + 0.66em) / var(--natural, 100%) 1px no-repeat;
     border: 0;
-    border-block-end: 1px dotted var(--entry-rule);
     border-radius: 0;
     padding: 0 1px;
     margin: 0;
-    min-width: 0;
+    /* What can be hit is 24 px at least, also in a sentence. */
+    min-width: 24px;
+    min-height: 24px;
     max-width: 100%;
     text-align: inherit;
   }
@@ -65,7 +68,6 @@ export const fieldSheet = css`
     field-sizing: content;
     cursor: pointer;
     padding-inline-end: 0.85em;
-    background: linear-gradient(var(--entry-rule) 0 0) right 0.32em top 58% / 0 0 no-repeat;
     text-overflow: ellipsis;
   }
   .choice {
@@ -91,8 +93,7 @@ export const fieldSheet = css`
   input:hover,
   select:hover,
   textarea:hover {
-    border-block-end-color: currentColor;
-    border-block-end-style: solid;
+    --rule-drawn: linear-gradient(currentColor 0 0);
   }
   :focus-visible {
     outline: 2px solid var(--field-ink, var(--ink));
@@ -111,7 +112,8 @@ export const fieldSheet = css`
     font-style: italic;
   }
   .faulty :is(input, select, textarea) {
-    border-block-end: 2px solid var(--limit);
+    --rule-drawn: linear-gradient(var(--limit) 0 0);
+    background-size: var(--natural, 100%) 2px;
     color: var(--limit);
   }
   .fault {

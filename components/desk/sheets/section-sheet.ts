@@ -93,6 +93,8 @@ export const sectionSheet = css`
     border: 0;
     border-block-end: 1px dotted var(--entry-rule);
     padding: 0;
+    min-width: 24px;
+    min-height: 24px;
     margin-inline-end: 0.9rem;
     cursor: pointer;
   }

@@ -1,12 +1,12 @@
 import {
   backscatterFactor,
-  boxEnergies_keV,
   type Estimated,
   impartedEnergy_keV,
   layerEnergy_keV,
   scatterToPrimary,
   type TransportScores,
 } from '../transport/index.js';
+import { columnEnergy_keV } from './central-column.js';
 import type { CheckSetup } from './check-setup.js';
 import { statedAccuracy_percent } from './stated-accuracy.js';
 import { type Judged, judge, photonsToDecide } from './verdict.js';
@@ -98,15 +98,15 @@ export const checkRows = (setup: CheckSetup, scores: TransportScores): CheckRow[
         name,
       ),
     ),
-    ...boxEnergies_keV(input, scores).map((energy, k) =>
+    ...setup.column.map((part, k) =>
       row(
         'columnAbsorbedDose',
         'Absorbed dose, central column',
         'mGy',
         null,
-        times(energy, perFrame(setup.columnMasses_g[k])),
+        times(columnEnergy_keV(input, scores, part), perFrame(part.mass_g)),
         null,
-        input.boxes[k].name,
+        input.layers[k].name,
       ),
     ),
   ];

@@ -1,5 +1,6 @@
 import type { Finding } from '../results.js';
 import type { TransportInput } from '../transport/index.js';
+import type { ColumnPart } from './central-column.js';
 import type { CheckEstimate } from './check-estimate.js';
 import type { CheckRequest } from './check-request.js';
 
@@ -17,8 +18,8 @@ export interface CheckSetup {
   readonly incidentAirKerma_mGy: number;
   /** Field area a pencil stands for at the skin; 1 where the photons of the run fill the field. */
   readonly pencilField_cm2: number;
-  /** Mass of the central column in each layer, in the order of `input.boxes`; empty for a pencil. */
-  readonly columnMasses_g: readonly number[];
+  /** The central column in each layer, tallied in `input.boxes`; empty for a pencil. */
+  readonly column: readonly ColumnPart[];
   /** What the two do not have in common, and where the stated accuracy was not tried. */
   readonly findings: readonly Finding[];
 }

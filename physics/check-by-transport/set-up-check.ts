@@ -60,7 +60,7 @@ const setUp = (
   if (outside !== undefined) return outsideRange(technique, outside);
   const { lateral_mm } = c.patient;
   const isPencil = stack.beam === 'parallel' && lateral_mm === null;
-  const column = isPencil ? { boxes: [], masses_g: [] } : centralColumn(stack);
+  const column = isPencil ? { boxes: [], layers: [] } : centralColumn(stack);
   const { grid } = chain;
   const input = buildTransportInput(
     stack,
@@ -81,7 +81,7 @@ const setUp = (
       : null,
     incidentAirKerma_mGy: dose.incidentAirKerma_mGy * tubeLoad_mAs,
     pencilField_cm2: isPencil ? fieldArea_cm2(stack, stack.sourceToSkin_mm) : 1,
-    columnMasses_g: column.masses_g,
+    column: column.layers,
     findings: checkFindings(c, point),
   };
 };

@@ -5,7 +5,7 @@ import type { CheckRow } from './check-rows.js';
 export const photonsText = (photons: number): string => {
   if (photons >= 1e9) return `${numberText(photons / 1e9, 2)} billion`;
   if (photons >= 1e6) return `${numberText(photons / 1e6, 2)} million`;
-  return photons >= 1e3 ? `${numberText(photons / 1e3, 2)} thousand` : numberText(photons, 2);
+  return photons >= 1e3 ? `${numberText(photons / 1e3, 2)} thousand` : numberText(photons);
 };
 
 /** The verdict on a row in plain words. */

@@ -164,3 +164,19 @@ describe('the desk', () => {
     ]);
   });
 });
+
+describe('a patient that has no place in the room', () => {
+  afterEach(clear);
+
+  it('is said to have none, and the layers stay editable', async () => {
+    const model = modelWith(['patient.sizes', [{ name: 'vast', thickness_mm: 1400, weight: 1 }]]);
+    const element = await page({
+      model: { ...model, sizeName: 'vast', weighing: null, along: [] },
+    });
+    expect(await axeFaults(element)).to.deep.equal([]);
+    expect(wordsOf(element)).to.contain('has no place in this room at size');
+    expect(deep(element, 'beam-path').shadowRoot?.querySelectorAll('layer-label')).to.have.length(
+      3,
+    );
+  });
+});

@@ -5,6 +5,7 @@ import { beamCommand } from './beam.js';
 import { checksCommand } from './checks.js';
 import type { Io } from './io.js';
 import { matterCommand } from './matter.js';
+import { sweepCommand } from './sweep.js';
 import { transportCommand } from './transport.js';
 import { weighCommand } from './weigh.js';
 
@@ -18,6 +19,7 @@ export const program = (io: Io): Command => {
     .addHelpText('after', `\n${cautions.join('\n')}`);
   for (const command of [
     weighCommand(io),
+    sweepCommand(io),
     transportCommand(io),
     beamCommand(io),
     matterCommand(io),

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { cautions } from '../../components/command/cautions.js';
+import { cautions } from '../../physics/cautions.js';
 import { runCommand } from './run-command.js';
 
 describe('the command line', () => {
@@ -12,7 +12,7 @@ describe('the command line', () => {
   ])('states the cautions under %s %s', async (...words) => {
     const { code, out, err } = await runCommand(words.filter((word) => word !== undefined));
     expect({ code, err }).toEqual({ code: 0, err: '' });
-    expect(out).toContain(cautions);
+    expect(out).toContain(cautions.join('\n'));
   });
 
   it('names the worked cases under weigh --help', async () => {

@@ -5,6 +5,7 @@ import { sizesOf } from '../../../physics/stack/sizes.js';
 import { convergenceChart } from '../../charts/transport-convergence.js';
 import { type DeskModel, sizeShown } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
+import { runSheet } from '../sheets/run-sheet.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import { type CheckState, checkBasis, isRunning } from './check-state.js';
 import { balanceTable, fateTable, layerTable, quantityTable } from './check-tables.js';
@@ -41,7 +42,7 @@ export class TransportSection extends LitElement {
   /** Row of the report the chart shows; null the one that matters most. */
   @state() private charted: number | null = null;
 
-  static override styles = [chartSheet, sectionSheet, transportSheet];
+  static override styles = [chartSheet, sectionSheet, runSheet, transportSheet];
 
   private tell(name: string, detail: unknown) {
     this.dispatchEvent(new CustomEvent(name, { detail, bubbles: true, composed: true }));

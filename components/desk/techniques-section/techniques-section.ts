@@ -76,6 +76,10 @@ export class TechniquesSection extends LitElement {
         white-space: nowrap;
         padding-inline-end: 0.4rem;
       }
+      .unit {
+        color: var(--soft);
+        white-space: nowrap;
+      }
       .ratio {
         color: var(--soft);
         padding-inline-start: 0.6rem;
@@ -98,11 +102,11 @@ export class TechniquesSection extends LitElement {
     });
     if (values.every((value) => value === null)) return null;
     const [base] = values;
-    return html`<tr><th scope="row">${entry.name}${entry.per ? `, ${entry.per}` : ''}</th>${values.map(
+    return html`<tr><th scope="row">${entry.name}${entry.per ? `, ${entry.per}` : ''} <span class="unit">${entry.unit}</span></th>${values.map(
       (
         value,
         i,
-      ) => html`<td style="--field-ink:${techniqueInk(i).color}"><figure-value small quantity=${entry.id} .value=${value} ?stale=${model.stale}
+      ) => html`<td style="--field-ink:${techniqueInk(i).color}"><figure-value small unit="" quantity=${entry.id} .value=${value} ?stale=${model.stale}
           technique=${model.draft.case.techniques[i].name}></figure-value>${
             i > 0 && base && value !== null
               ? html`<span class="ratio">${formatRatio(value / base)}</span>`

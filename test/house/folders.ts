@@ -50,19 +50,6 @@ export function allowedFrom(folder: Folder): Set<Folder> {
 export const folderOf = (path: string): Folder | undefined =>
   folders.find((folder) => path === folder || path.startsWith(`${folder}/`));
 
-/** Everything a source imports or re-exports, dynamic imports and worker addresses included. */
-export function importsOf(source: string): string[] {
-  const withoutComments = source.replace(/\/\*[\s\S]*?\*\/|^\s*\/\/.*$/gm, '');
-  const patterns = [
-    /\bfrom\s*['"]([^'"]+)['"]/g,
-    /\bimport\s*\(?\s*['"]([^'"]+)['"]/g,
-    /\bnew URL\(\s*['"]([^'"]+)['"]\s*,\s*import\.meta\.url/g,
-  ];
-  return patterns.flatMap((pattern) =>
-    [...withoutComments.matchAll(pattern)].map((match) => match[1] ?? ''),
-  );
-}
-
 /** Where a relative import of a file leads, as a path from the root. */
 export const targetOf = (file: string, specifier: string): string =>
   relative(root, resolve(root, dirname(file), specifier))

@@ -4,18 +4,18 @@ import {
   type Folder,
   folderOf,
   folders,
-  importsOf,
   packageOf,
   readSource,
   sourceFiles,
   targetOf,
 } from './folders.js';
+import { importsOf } from './imports-of.js';
 
 /** Import lines that lead where their folder may not go, as `file: specifier`. */
 function wrongWays(folder: Folder): string[] {
   const allowed = allowedFrom(folder);
   return sourceFiles(folder).flatMap((file) =>
-    importsOf(readSource(file))
+    importsOf(readSource(file), file)
       .filter((specifier) => specifier.startsWith('.'))
       .filter((specifier) => {
         const target = folderOf(targetOf(file, specifier));
@@ -44,15 +44,38 @@ describe('imports', () => {
     const source = `
       import { a } from './a.js';
       import type { B } from "../b.js";
-      import './c.js';
-      export * from './d.js';
-      const e = await import('./e.js');
-      new Worker(new URL('./f.js', import.meta.url));
+      import './c.js'; export * from './d.js'; export { d } from './d1.js';
+      import {
+        one, // from './not-me.js'
+        two,
+      } from './e.js';
+      const f = await import('./f.js'), g = await import(\`./g.js\`), h = await import(f.name);
+      new Worker(new URL('./i.js', import.meta.url), { type: 'module' });
+      type J = import('./j.js').J;
+      import k = require('k');
+      const l = new URL(\`./l.\${f.kind}\`, import.meta.url);
       // import './not-me.js';
       /* import './nor-me.js'; */`;
-    expect(importsOf(source).sort()).toEqual(
-      ['./a.js', '../b.js', './d.js', './c.js', './e.js', './f.js'].sort(),
-    );
+    const names = 'a.js ../b.js c.js d.js d1.js e.js f.js g.js i.js j.js'.split(' ');
+    const found = [...names.map((name) => (name.startsWith('.') ? name : `./${name}`)), 'k'];
+    expect(importsOf(source).sort()).toEqual([...found, './l.*', '*'].sort());
+  });
+
+  test('the scanner takes no word in code, string, template or comment for an import', () => {
+    const source = `
+      show(request, from);
+      function show(request: Request, from: HTMLElement): void { if (from.id !== 'a') return; }
+      const kinds = { from: 'below', import: 'x' };
+      const label = 'taken from "room"', other = "import 'y'";
+      html\`<p from='top' \${from ? 'left' : 'right'}>copied from '\${label}' import('z')</p>\`;
+      const pattern = /from 'w'/g; // it's from 'v'
+      const page = new URL('./v.html', document.baseURI);
+      export const from = 'u'; export { label };`;
+    expect(importsOf(source)).toEqual([]);
+  });
+
+  test('the scanner refuses what it cannot read', () => {
+    expect(() => importsOf('import { from', 'broken.ts')).toThrow(/^broken\.ts: /);
   });
 
   test('the dependency order is materials, physics, scenes, components', () => {
@@ -77,7 +100,7 @@ describe('imports', () => {
       const foreign = sourceFiles(folder)
         .filter((file) => !file.includes('/generate/'))
         .flatMap((file) =>
-          importsOf(readSource(file))
+          importsOf(readSource(file), file)
             .filter((specifier) => !specifier.startsWith('.'))
             .filter((specifier) => !allowed.includes(packageOf(specifier)))
             .map((specifier) => `${file}: ${specifier}`),

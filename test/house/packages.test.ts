@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
-import { folderOf, importsOf, packageOf, readSource, sourceFiles } from './folders.js';
+import { folderOf, packageOf, readSource, sourceFiles } from './folders.js';
+import { importsOf } from './imports-of.js';
 
 interface Manifest {
   readonly scripts: Record<string, string>;
@@ -36,7 +37,9 @@ describe('packages', () => {
     const missing = ['materials', 'physics', 'scenes', 'components']
       .flatMap(sourceFiles)
       .filter((file) => folderOf(file) && !file.includes('/generate/'))
-      .flatMap((file) => importsOf(readSource(file)).map((specifier) => ({ file, specifier })))
+      .flatMap((file) =>
+        importsOf(readSource(file), file).map((specifier) => ({ file, specifier })),
+      )
       .filter(({ specifier }) => !/^(\.|node:|stratabeam)/.test(specifier))
       .filter(({ specifier }) => !(packageOf(specifier) in manifest.dependencies))
       .map(({ file, specifier }) => `${file}: ${specifier}`);

@@ -3,6 +3,7 @@ import { customElement, property, query, state } from 'lit/decorators.js';
 import type { Fault } from '../../../physics/case/index.js';
 import type { Evaluation, Finding } from '../../../physics/results.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
+import type { SweepPool } from '../../workers/sweep-pool.js';
 import { marginColumns } from '../comparison-table/comparison-table.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
 import type { ExplainCard } from '../explain-card/explain-card.js';
@@ -23,6 +24,7 @@ import '../fault-list/fault-list.js';
 import '../finding-list/finding-list.js';
 import '../patient-section/patient-section.js';
 import '../room-section/room-section.js';
+import '../sweep-section/sweep-section.js';
 import '../task-section/task-section.js';
 import '../techniques-section/techniques-section.js';
 import '../transport-section/transport-section.js';
@@ -74,7 +76,8 @@ export const sections = [
  *
  * Properties: `model` (nothing is drawn before it is set), `scan`, `curveStale`, `hold`, and what the
  * head shows: `examples`, `canUndo`, `canRedo`, `status`, `paper`; `refused` (a file not opened and
- * why), `trouble` (why there is no answer); `check` and `tracksDrawn` of the check by transport. Events: `case-edit`, `command`, `example`,
+ * why), `trouble` (why there is no answer); `check` and `tracksDrawn` of the check by transport; `pool`, the
+ * workers of sweep, sizes and solving. Events: `case-edit`, `command`, `example`,
  * `choose-size`, `choose-hold`, `show-technique` from what it holds.
  */
 @customElement('desk-page')
@@ -93,6 +96,7 @@ export class DeskPage extends LitElement {
   @property() trouble = '';
   @property({ attribute: false }) check: CheckState | null = null;
   @property({ type: Boolean }) tracksDrawn = false;
+  @property({ attribute: false }) pool: SweepPool | null = null;
   @property() here = '';
   @query('explain-card') private card!: ExplainCard;
 
@@ -183,6 +187,7 @@ export class DeskPage extends LitElement {
           <task-section id="task" .model=${later}></task-section>
           <techniques-section id="techniques" .model=${later}></techniques-section>
           <balance-section id="balance" .model=${later}></balance-section>
+          <sweep-section .model=${later} .pool=${this.pool}></sweep-section>
           <transport-section .model=${later} .check=${this.check} ?tracksDrawn=${this.tracksDrawn}></transport-section>
         </div>
       </main>

@@ -8,6 +8,8 @@ import { createCaseStore, type Sheet, type StoreState } from '../../store/case-s
 import { valueAtPath } from '../../store/path.js';
 import { startEvaluator } from '../../workers/evaluator.js';
 import { makeEvaluationWorker } from '../../workers/make-evaluation-worker.js';
+import { makeSweepWorker } from '../../workers/make-sweep-worker.js';
+import { sweepPool } from '../../workers/sweep-pool.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
 import { joinTransport } from '../transport-section/join-transport.js';
 import { answering } from './answers.js';
@@ -130,6 +132,7 @@ export async function startDesk(page: DeskPage): Promise<void> {
     },
   };
 
+  page.pool = sweepPool(makeSweepWorker, Math.max(1, navigator.hardwareConcurrency - 1));
   page.paper = keptPaper();
   usePaper(page.paper);
   page.examples = examples.map(({ name }) => name);

@@ -1,0 +1,35 @@
+import { inGroup } from './quantity.js';
+
+/** What the detail shows, before noise. */
+export const detailQuantities = inGroup('detail', [
+  {
+    id: 'subjectContrast',
+    name: 'Subject contrast',
+    unit: '',
+    of: (e) => e.contrast.subject,
+    words:
+      'Primary signal without the detail less with it, over without; negative when the detail is more transparent.',
+  },
+  {
+    id: 'detectedContrast',
+    name: 'Detected contrast',
+    unit: '',
+    of: (e) => e.contrast.detected,
+    words: 'Subject contrast after scatter behind the grid and glare have diluted it.',
+  },
+  {
+    id: 'contrastDegradation',
+    name: 'Contrast degradation factor',
+    unit: '',
+    of: (e) => e.contrast.degradationFactor,
+    words: 'Detected over subject contrast.',
+  },
+  {
+    id: 'iodineEquivalent',
+    name: 'Iodine equivalent',
+    unit: 'mg/cm²',
+    of: (e) => e.contrast.iodineEquivalent_mg_per_cm2,
+    words:
+      'Areal density of iodine that gives the same subject contrast in this beam behind this stack.',
+  },
+]);

@@ -2,7 +2,7 @@ import { massAttenuationOn, massEnergyAbsorptionOn } from '../materials/index.js
 import type { Spectrum } from './beam/spectrum.js';
 import { mJ_per_keV } from './dose/deposition.js';
 import { fieldArea_cm2 } from './dose/field-area.js';
-import { KeptBy } from './kept-by.js';
+import { KeptBy } from './numeric/kept-by.js';
 import type { OperatingPoint } from './operating-point.js';
 import { responsesOn, type ScatterResponses, scatterResponses } from './scatter/index.js';
 import type { Stack, StackLayer } from './stack/stack.js';

@@ -1,6 +1,6 @@
 import { kept } from '../materials/kept.js';
 import type { Acquisition, Case, Size } from './case/schema.js';
-import { KeptBy, nothing } from './kept-by.js';
+import { KeptBy, nothing } from './numeric/kept-by.js';
 import { prepare } from './prepare.js';
 import { noiseTerms, type ReadoutChain } from './readout/index.js';
 import type { Finding } from './results.js';

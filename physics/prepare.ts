@@ -1,7 +1,7 @@
 import type { Material } from '../materials/index.js';
 import { calibrate, kEdges_keV, type MaterialLayer } from './beam/index.js';
 import type { Case } from './case/schema.js';
-import { KeptBy } from './kept-by.js';
+import { KeptBy } from './numeric/kept-by.js';
 import {
   type DetectorResponse,
   detectorResponse,

@@ -1,5 +1,5 @@
+import { findRoot } from '../numeric/find-root.js';
 import { attenuate, type MaterialLayer } from './attenuate.js';
-import { findRoot } from './find-root.js';
 import { halfValueLayer_mm } from './half-value-layer.js';
 import { referenceMaterial } from './reference-materials.js';
 import type { Spectrum } from './spectrum.js';

@@ -1,5 +1,5 @@
 import { massAttenuation, massAttenuationOn } from '../../materials/index.js';
-import { findRoot } from './find-root.js';
+import { findRoot } from '../numeric/find-root.js';
 import { soleEnergy_keV } from './fluence.js';
 import { halfValueLayer_mm } from './half-value-layer.js';
 import { referenceMaterial } from './reference-materials.js';

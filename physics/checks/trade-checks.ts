@@ -4,7 +4,7 @@ import {
   massAttenuation,
   partialCoefficients,
 } from '../../materials/index.js';
-import { findRoot } from '../beam/find-root.js';
+import { findRoot } from '../numeric/find-root.js';
 import { type CheckRow, checkRow } from './check-row.js';
 import { materialOf } from './material-of.js';
 import { numberAfter, type ReferenceRow, referenceRows } from './reference-rows.js';

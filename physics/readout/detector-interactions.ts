@@ -5,7 +5,7 @@ import {
   partialCoefficients,
   partialCoefficientsOn,
 } from '../../materials/index.js';
-import { locate, locatorOf } from '../scatter/locate.js';
+import { locate, locatorOf } from '../numeric/locate.js';
 import { edgeNodes, edgesWithin } from './edge-nodes.js';
 import { type KEmission, kEmissions } from './k-emission.js';
 

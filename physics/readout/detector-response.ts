@@ -1,7 +1,7 @@
 import { absorptionEdges, type Material } from '../../materials/index.js';
 import { kept } from '../../materials/kept.js';
 import type { Detector } from '../case/schema.js';
-import { KeptBy, nothing } from '../kept-by.js';
+import { KeptBy, nothing } from '../numeric/kept-by.js';
 import {
   type DetectorInteractions,
   detectorInteractions,

@@ -1,6 +1,6 @@
 import { type Material, massAttenuation } from '../../materials/index.js';
 import { opticalDepth } from '../beam/attenuate.js';
-import { locate, locatorOf } from '../scatter/locate.js';
+import { locate, locatorOf } from '../numeric/locate.js';
 import { edgeNodes, edgesWithin } from './edge-nodes.js';
 import type { GridGeometry } from './grid-geometry.js';
 import { type GridAtEnergy, meanGridTransmission } from './grid-transmission.js';

@@ -1,6 +1,6 @@
 import type { Material } from '../../materials/material.js';
 import type { Grid } from '../case/schema.js';
-import { KeptBy } from '../kept-by.js';
+import { KeptBy } from '../numeric/kept-by.js';
 import { gridGeometry } from './grid-geometry.js';
 import { type GridTable, gridTable } from './grid-table.js';
 

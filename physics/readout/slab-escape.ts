@@ -1,4 +1,4 @@
-import { gaussLegendre } from '../scatter/gauss-legendre.js';
+import { gaussLegendre } from '../numeric/gauss-legendre.js';
 
 const polar = gaussLegendre(24);
 

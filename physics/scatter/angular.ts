@@ -6,8 +6,8 @@ import {
   scatteringFunctionPerGram,
 } from '../../materials/index.js';
 import { kept } from '../../materials/kept.js';
+import { gaussLegendre } from '../numeric/gauss-legendre.js';
 import { scatterRange_keV } from './energy-nodes.js';
-import { gaussLegendre } from './gauss-legendre.js';
 
 /**
  * Angular shapes of one material on a grid uniform in √q, q = sin(θ/2)/λ: fine where F² falls

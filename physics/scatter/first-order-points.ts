@@ -1,4 +1,4 @@
-import { gaussLegendre } from './gauss-legendre.js';
+import { gaussLegendre } from '../numeric/gauss-legendre.js';
 import { type ScatterGeometry, shareInsideSquare } from './geometry.js';
 import { anglePlace, scoreAngles } from './scores.js';
 

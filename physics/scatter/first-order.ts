@@ -1,4 +1,5 @@
 import { electronRestEnergy_keV } from '../../materials/index.js';
+import { locate, locatorOf } from '../numeric/locate.js';
 import {
   angularNorms,
   comptonShape,
@@ -10,7 +11,6 @@ import type { EnergyNodes } from './energy-nodes.js';
 import { type FirstOrderPart, firstOrderParts } from './first-order-parts.js';
 import { valuesPerPoint } from './first-order-points.js';
 import type { ScatterGeometry } from './geometry.js';
-import { locate, locatorOf } from './locate.js';
 import { airKermaScore, type ScoreTable, scoreAngles, scoreCount } from './scores.js';
 import type { Slab } from './slabs.js';
 

@@ -1,7 +1,7 @@
-import { findRoot } from '../beam/find-root.js';
 import type { Case, Size, Technique } from '../case/schema.js';
 import { deliverable_mg_per_mL } from '../limits/agent-limits.js';
 import { numberText } from '../number-text.js';
+import { findRoot } from '../numeric/find-root.js';
 import { type OperatingPoint, operatingPoint } from '../operating-point.js';
 import { sdnrAt } from '../readout/index.js';
 import type { Finding } from '../results.js';

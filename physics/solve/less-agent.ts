@@ -1,7 +1,7 @@
-import { findRoot } from '../beam/find-root.js';
 import type { Case, Size, Technique } from '../case/schema.js';
 import { isAllowed } from '../limits.js';
 import { numberText } from '../number-text.js';
+import { findRoot } from '../numeric/find-root.js';
 import { operatingPoint } from '../operating-point.js';
 import type { Finding, HoldConstant } from '../results.js';
 import { roomPotentials_kV } from '../scan.js';

@@ -1,5 +1,5 @@
 import type { Detail } from '../case/schema.js';
-import { gaussLegendre } from '../scatter/gauss-legendre.js';
+import { gaussLegendre } from '../numeric/gauss-legendre.js';
 
 /**
  * One straight way of the beam through the detail: how much of the layer gives way, how much of

@@ -1,4 +1,4 @@
-import { gaussLegendre } from '../gauss-legendre.js';
+import { gaussLegendre } from '../../numeric/gauss-legendre.js';
 
 /** Ordinates per hemisphere; the weights of one hemisphere sum to 1, of both to 2. */
 export const ordinates = 8;

@@ -1,4 +1,4 @@
-import { gaussLegendre } from '../gauss-legendre.js';
+import { gaussLegendre } from '../../numeric/gauss-legendre.js';
 import {
   airKermaPerFluence,
   airKermaScore,

@@ -1,8 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { locate, locatorOf } from '../../../physics/numeric/locate.js';
 import { energyNodes, isEdge } from '../../../physics/scatter/energy-nodes.js';
 import { responsesOn, type ScatterResponses } from '../../../physics/scatter/index.js';
-import { locate, locatorOf } from '../../../physics/scatter/locate.js';
 
 describe('energy nodes', () => {
   const { energies_keV, fine_keV, fineIndex } = energyNodes([33.169, 88.0045, 5, 200]);

@@ -14,8 +14,7 @@ import type { Finding } from './results.js';
 export const outputFactorAt = (
   { room, calibration }: Pick<Prepared, 'room' | 'calibration'>,
   potential_kV: number,
-): number =>
-  calibration ? outputFactorAt_kV(calibration, potential_kV) : room.tube.outputFactor;
+): number => (calibration ? outputFactorAt_kV(calibration, potential_kV) : room.tube.outputFactor);
 
 /** The room's beam, or what had to be said about it. */
 export interface OutputBeam {

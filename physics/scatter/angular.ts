@@ -1,9 +1,10 @@
 import {
-  formFactorSquaredPerGram,
+  elementByZ,
+  formFactor,
+  incoherentScatteringFunction,
   kleinNishinaShape,
   type Material,
   photonEnergyWavelength_keV_angstrom,
-  scatteringFunctionPerGram,
 } from '../../materials/index.js';
 import { kept } from '../../materials/kept.js';
 import { gaussLegendre } from '../numeric/gauss-legendre.js';
@@ -24,19 +25,34 @@ const intervals = 1024;
 const greatestQ = (scatterRange_keV[1] / photonEnergyWavelength_keV_angstrom.value) * 1.001;
 const intervalsPerRootQ = intervals / Math.sqrt(greatestQ);
 
-const made = new WeakMap<Material, AngularShapes>();
+const gridQ = Float64Array.from({ length: intervals + 1 }, (_, i) => (i / intervalsPerRootQ) ** 2);
+
+const ofElements = new Map<number, AngularShapes>();
+const ofMaterials = new WeakMap<Material, AngularShapes>();
+
+/** S and F² of one atom on the grid. */
+const elementShapes = (z: number): AngularShapes =>
+  kept(ofElements, z, () => ({
+    incoherent: gridQ.map((q) => incoherentScatteringFunction(z, q)),
+    coherent: gridQ.map((q) => formFactor(z, q) ** 2),
+  }));
 
 /** Scattering functions of a material for both angular distributions, made once per material. */
-export function angularShapes(material: Material): AngularShapes {
-  return kept(made, material, () => tabulate(material));
-}
+export const angularShapes = (material: Material): AngularShapes =>
+  kept(ofMaterials, material, () => ({
+    incoherent: perGram(material, 'incoherent'),
+    coherent: perGram(material, 'coherent'),
+  }));
 
-function tabulate(material: Material): AngularShapes {
-  const q = Float64Array.from({ length: intervals + 1 }, (_, i) => (i / intervalsPerRootQ) ** 2);
-  return {
-    incoherent: q.map((each) => scatteringFunctionPerGram(material, each)),
-    coherent: q.map((each) => formFactorSquaredPerGram(material, each)),
-  };
+/** Σ w/A of the elements' values, mol/g. */
+function perGram(material: Material, name: keyof AngularShapes): Float64Array {
+  const sum = new Float64Array(gridQ.length);
+  for (const { z, massFraction } of material.massFractions) {
+    const values = elementShapes(z)[name];
+    const share = massFraction / elementByZ(z).atomicWeight_g_per_mol;
+    for (let i = 0; i < sum.length; i++) sum[i] += share * values[i];
+  }
+  return sum;
 }
 
 /** √(q/sin(θ/2)) in units of the grid's interval: times √sin(θ/2) it is the place in the grid. */

@@ -49,6 +49,16 @@ export function equivalentWater(
   };
 }
 
+/** Mean number of scatterings on a straight way through, over energy nodes. */
+export function scatteringDepth(slabs: readonly Slab[], energies_keV: Float64Array): Float64Array {
+  const depth = new Float64Array(energies_keV.length);
+  for (const { material, thickness_cm } of slabs) {
+    const { incoherent, coherent } = linearCoefficients(material, energies_keV);
+    for (let i = 0; i < depth.length; i++) depth[i] += (incoherent[i] + coherent[i]) * thickness_cm;
+  }
+  return depth;
+}
+
 /** Keeps the logarithm finite where next to nothing is absorbed. */
 const leastAbsorbed = 1e-9;
 

@@ -20,6 +20,13 @@ export function scatterGeometry(stack: Stack): ScatterGeometry {
   };
 }
 
+/** The same stack in a parallel field without end. */
+export const broadened = (geometry: ScatterGeometry): ScatterGeometry => ({
+  ...geometry,
+  beam: 'parallel',
+  halfSide_cm: Number.POSITIVE_INFINITY,
+});
+
 /** Side of the square with the same area over perimeter, 4A/P (common practice, no source). */
 export const equivalentSquare_mm = ([width, height]: readonly [number, number]): number =>
   width + height > 0 ? (2 * width * height) / (width + height) : 0;

@@ -1,14 +1,14 @@
 import type { EnergyNodes } from './energy-nodes.js';
 import { firstOrderParts } from './first-order-parts.js';
 import { valuesPerPoint } from './first-order-points.js';
-import type { ScatterGeometry } from './geometry.js';
+import { broadened, type ScatterGeometry } from './geometry.js';
 import { type ScatterGrid, scoreAngles, scoreBetas_rad } from './scores.js';
 import type { Slab } from './slabs.js';
 
 /** Multiply scattered photons reach the grid with about this share of the incident energy. */
 const meanEnergyShare = 0.88;
 
-/** Share of isotropically scattered photons that a grid lets through, over the nodes. */
+/** Share of isotropically scattered photons that a grid lets through, or a ratio of two such. */
 export interface GridShare {
   /** Of photons through the detector plane. */
   readonly plane: Float64Array;
@@ -17,10 +17,26 @@ export interface GridShare {
 }
 
 /**
- * G = N/D, N = Σ∫dz∫sinβ dβ σ_s W e^{−τ_out(secβ − 1)} T̄(0.88 E, β), D the same without T̄. Over its
- * value in an infinite field it tells how a finite field's multiple scatter passes the grid.
+ * How a finite field's multiple scatter passes the grid over how an infinite one's does, G/G∞, over the
+ * nodes: scatter from near the axis meets the grid less obliquely.
  */
-export function gridShare(
+export function gridGains(
+  slabs: readonly Slab[],
+  geometry: ScatterGeometry,
+  nodes: EnergyNodes,
+  grid: ScatterGrid,
+): GridShare {
+  const here = gridShare(slabs, geometry, nodes, grid);
+  const broad = gridShare(slabs, broadened(geometry), nodes, grid);
+  const over = (weighting: keyof GridShare) =>
+    here[weighting].map((value, i) => (broad[weighting][i] > 0 ? value / broad[weighting][i] : 1));
+  return { plane: over('plane'), fluence: over('fluence') };
+}
+
+/**
+ * G = N/D, N = Σ∫dz∫sinβ dβ σ_s W e^{−τ_out(secβ − 1)} T̄(0.88 E, β), D the same without T̄.
+ */
+function gridShare(
   slabs: readonly Slab[],
   geometry: ScatterGeometry,
   nodes: EnergyNodes,

@@ -1,6 +1,6 @@
 /**
  * Holds the scatter estimate against photon transport and writes test/reference/scatter-accuracy.csv:
- * `npx tsx test/tools/scatter-accuracy.ts [photons per run]`, some minutes.
+ * `npx tsx test/tools/scatter-accuracy.ts`, some minutes.
  */
 import { writeFileSync } from 'node:fs';
 import { absorptionEdges } from '../../materials/index.js';
@@ -21,36 +21,76 @@ import {
 } from '../physics/scatter/accuracy-stacks.js';
 import { spectrumSpr } from '../physics/scatter/spectrum-spr.js';
 
-const photons = Number(process.argv[2] ?? 400_000);
 const seed = 71;
+/** Standard errors aimed at, and the photons a run may take for them. */
+const wanted = { open: 0.008, behindGrid: 0.02 };
+const photons = { pilot: 100_000, least: 200_000, most: 8_000_000 };
 
+const relativeError = ({ value, standardError }: Estimated) => (standardError ?? value) / value;
+
+/** Photons for the wanted errors, judged by a pilot run. */
+function photonsFor(open: Estimated, behindGrid: Estimated): number {
+  const excess = Math.max(
+    relativeError(open) / wanted.open,
+    relativeError(behindGrid) / wanted.behindGrid,
+  );
+  return Math.round(
+    Math.min(photons.most, Math.max(photons.least, photons.pilot * excess * excess)),
+  );
+}
+
+const header = [
+  'stack,role,gap_cm,field_cm,potential_kV',
+  'signal,signal_error,signal_estimate,signal_grid,signal_grid_error,signal_grid_estimate',
+  'kerma,kerma_error,kerma_estimate,kerma_grid,kerma_grid_error,kerma_grid_estimate',
+];
 const lines = [
-  '# Scatter-to-primary ratio of detector signal: estimate against photon transport (computed here).',
+  '# Scatter-to-primary ratio of detector signal and of air kerma at the detector, without grid and behind it:',
+  '# photon transport with its standard error (1 sigma), then the estimate; both computed here.',
   '# Point source at 110 cm, laterally infinite layers, CsI 200 mg/cm2, 10:1 lead grid, tungsten 12 deg + 3 mm Al.',
-  `# ${photons} photons per run, seed ${seed}; standard errors of transport (1 sigma). Written by test/tools/scatter-accuracy.ts.`,
-  'stack,role,gap_cm,field_cm,potential_kV,transport,transport_error,estimate,transport_grid,transport_grid_error,estimate_grid',
+  `# Seed ${seed}. Written by test/tools/scatter-accuracy.ts.`,
+  header.join(),
 ];
 const number = (value: number) => value.toPrecision(5);
-const both = ({ value, standardError }: Estimated) =>
-  `${number(value)},${number(standardError ?? 0)}`;
+
+/** Transport with its error, then the estimate. */
+const compared = ({ value, standardError }: Estimated, estimate: number): string =>
+  [value, standardError ?? 0, estimate].map(number).join();
+
+const grid = (energy: number, cosine: number) => accuracyGrid.lookup(energy, cosine);
 
 accuracyStacks.forEach(({ name, role, layers }, index) => {
   const edges = layers.flatMap(([material]) =>
-    absorptionEdges(material, 10, 150).map((e) => e.energy_keV),
+    absorptionEdges(material, 10, 150).map(({ energy_keV }) => energy_keV),
   );
   for (const { gap_cm, field_cm, stack } of accuracyGeometries(index)) {
     const responses = scatterResponses(stack, accuracyDetector, accuracyGrid);
     for (const potential_kV of accuracyPotentials_kV) {
       const beam = accuracyBeam(potential_kV, edges);
-      const grid = (energy: number, cosine: number) => accuracyGrid.lookup(energy, cosine);
-      const input = buildTransportInput(stack, beam, accuracyDetector, grid, { photons, seed });
-      const scores = runTransport(input);
-      const estimate = spectrumSpr(stack, responses, beam, accuracyDetector, accuracyGrid);
-      const open = scatterToPrimary(input, scores);
-      const behind = scatterToPrimary(input, scores, { behindGrid: true });
-      lines.push(
-        `${name},${role},${gap_cm},${field_cm},${potential_kV},${both(open)},${number(estimate.open)},${both(behind)},${number(estimate.behindGrid)}`,
-      );
+      const run = (count: number, runSeed: number) => {
+        const request = { photons: count, seed: runSeed };
+        const input = buildTransportInput(stack, beam, accuracyDetector, grid, request);
+        const scores = runTransport(input);
+        return (quantity: 'signal' | 'airKerma', behindGrid: boolean) =>
+          scatterToPrimary(input, scores, { quantity, behindGrid });
+      };
+      const pilot = run(photons.pilot, seed + 1);
+      const found = run(photonsFor(pilot('signal', false), pilot('signal', true)), seed);
+      const columns = (['signal', 'airKerma'] as const).flatMap((quantity) => {
+        const estimate = spectrumSpr(
+          stack,
+          responses,
+          beam,
+          accuracyDetector,
+          accuracyGrid,
+          quantity,
+        );
+        return [
+          compared(found(quantity, false), estimate.open),
+          compared(found(quantity, true), estimate.behindGrid),
+        ];
+      });
+      lines.push([name, role, gap_cm, field_cm, potential_kV, ...columns].join());
       process.stderr.write(`${lines.at(-1)}\n`);
     }
   }

@@ -37,12 +37,16 @@ export function fluorescenceTerms(
     if (!shell || shell.edge_keV < energies_keV[0]) continue;
     const photoelectric = partialCoefficientsOn(element(z), energies_keV).photoelectric;
     const perPhotoelectric = massFraction * material.density_g_per_cm3;
+    // A line may lie above the edge by the difference between the two tables' binding energies.
+    const belowEdge = energies_keV.findLastIndex((energy) => energy < shell.edge_keV);
     energies_keV.forEach((energy, i) => {
       if (energy < shell.edge_keV) return;
       const vacancies =
         perPhotoelectric * photoelectric[i] * (1 - 1 / shell.jumpRatio) * shell.yield;
-      for (const line of shell.lines)
-        addLine(terms[i], energies_keV, line.energy_keV, vacancies * line.share);
+      for (const line of shell.lines) {
+        const line_keV = Math.min(line.energy_keV, energies_keV[belowEdge]);
+        addLine(terms[i], energies_keV, line_keV, vacancies * line.share);
+      }
     });
   }
   return terms.map((perNode) =>
@@ -57,8 +61,10 @@ function addLine(
   per_cm: number,
 ): void {
   if (line_keV < energies_keV[0]) return;
-  const above = energies_keV.findIndex((energy) => energy > line_keV);
-  if (above < 1) return;
+  const above = Math.max(
+    1,
+    energies_keV.findIndex((energy) => energy >= line_keV),
+  );
   const low = energies_keV[above - 1];
   const share = (line_keV - low) / (energies_keV[above] - low);
   perNode[above - 1] += per_cm * (1 - share);

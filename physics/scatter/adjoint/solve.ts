@@ -95,14 +95,8 @@ export function solveAdjoint(
       if (settle(solution.total, i * width, face, sources, energies_keV[i])) break;
     }
     sumIsotropic(group);
-    firstAlongRay(
-      mesh,
-      factors,
-      firstRaySource(mesh, kernels, width, i, groups),
-      solution.first,
-      i,
-      width,
-    );
+    const q = firstRaySource(mesh, kernels, width, i, groups);
+    firstAlongRay(mesh, factors, width, q, source, solution.first, i * width);
   }
   return solution;
 }
@@ -178,18 +172,18 @@ function sumIsotropic({ even, isotropic }: GroupMeans): void {
 function firstAlongRay(
   mesh: Mesh,
   factors: SweepFactors,
-  q: Float64Array,
-  into: Float64Array,
-  i: number,
   width: number,
+  q: Float64Array,
+  scratch: ParitySource,
+  into: Float64Array,
+  at: number,
 ): void {
-  const source = new Float64Array(q.length * rows);
   mesh.slabs.forEach(({ from, to }, k) => {
     for (let x = from * width; x < to * width; x++) {
-      source[x * rows + ray] = q[x] * factors.inverseAttenuation[k];
+      scratch.even[x * rows + ray] = q[x] * factors.inverseAttenuation[k];
     }
   });
   const face = new Float64Array(width * rows);
-  sweepDown(mesh, factors, width, source, face, new Float64Array(q.length * rows));
-  takeRay(face, into, i * width);
+  sweepDown(mesh, factors, width, scratch.even, face, scratch.odd, ray);
+  takeRay(face, into, at);
 }

@@ -38,7 +38,7 @@ export function sweepFactors(mesh: Mesh, kernels: readonly Kernel[], i: number):
 
 /**
  * Carries ψ of photons travelling towards the exit from the exit face to the entrance, all directions
- * at once, through a source linear in each cell.
+ * from `firstDirection` on, through a source linear in each cell.
  *
  * @param source Q/μt, `[(cell · width + response) · rows + direction]`.
  * @param face ψ at the exit face on entry, at the entrance on return, `[response · rows + direction]`.
@@ -51,9 +51,10 @@ export function sweepDown(
   source: Float64Array,
   face: Float64Array,
   mean: Float64Array,
+  firstDirection = 0,
 ): void {
   for (let c = mesh.cellCount - 1; c >= 0; c--) {
-    crossCell(mesh, factors, c, width, -mesh.slopeFactor[c], source, face, mean);
+    crossCell(mesh, factors, c, width, -mesh.slopeFactor[c], source, face, mean, firstDirection);
   }
 }
 
@@ -71,7 +72,7 @@ export function sweepUp(
     if (c === mesh.skinCell) {
       for (let f = 0; f < face.length; f++) face[f] += skin[f];
     }
-    crossCell(mesh, factors, c, width, mesh.slopeFactor[c], source, face, mean);
+    crossCell(mesh, factors, c, width, mesh.slopeFactor[c], source, face, mean, 0);
   }
 }
 
@@ -86,11 +87,12 @@ function crossCell(
   source: Float64Array,
   face: Float64Array,
   mean: Float64Array,
+  firstDirection: number,
 ): void {
   const here = c * width * rows;
   const toBefore = (mesh.before[c] - c) * width * rows;
   const toAfter = (mesh.after[c] - c) * width * rows;
-  for (let d = 0; d < rows; d++) {
+  for (let d = firstDirection; d < rows; d++) {
     const share = lost[c * rows + d];
     const slope = slopeFactor * tilt[c * rows + d];
     const steepest = 2 * tilt[c * rows + d];

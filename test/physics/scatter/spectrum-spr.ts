@@ -1,32 +1,51 @@
+import { massEnergyAbsorptionOn } from '../../../materials/index.js';
 import type { Spectrum } from '../../../physics/beam/index.js';
 import type { DetectorResponse, GridTable } from '../../../physics/readout/index.js';
-import { responsesOn, type ScatterResponses } from '../../../physics/scatter/index.js';
+import {
+  type DetectorScatter,
+  responsesOn,
+  type ScatterResponses,
+} from '../../../physics/scatter/index.js';
 import { linearCoefficients, slabsOf } from '../../../physics/scatter/slabs.js';
 import type { Stack } from '../../../physics/stack/stack.js';
+import { material } from './stacks.js';
 
-/** Signal scatter-to-primary ratio of a beam, without and behind the grid. */
+/** Scatter-to-primary ratios without grid and behind it. */
+export interface SpectrumSpr {
+  readonly open: number;
+  readonly behindGrid: number;
+}
+
+/** Scatter over primary of a beam, of detector signal or of air kerma at the detector. */
 export function spectrumSpr(
   stack: Stack,
   responses: ScatterResponses,
   skin: Spectrum,
   detector: DetectorResponse,
   grid: GridTable,
-): { open: number; behindGrid: number } {
-  const on = responsesOn(responses, skin.energies_keV);
-  const depth = new Float64Array(skin.energies_keV.length);
-  for (const { material, thickness_cm } of slabsOf(stack)) {
-    const { attenuation } = linearCoefficients(material, skin.energies_keV);
+  quantity: 'signal' | 'airKerma' = 'signal',
+): SpectrumSpr {
+  const energies = skin.energies_keV;
+  const on = responsesOn(responses, energies);
+  const inAir = massEnergyAbsorptionOn(material('air'), energies);
+  const depth = new Float64Array(energies.length);
+  for (const { material: matter, thickness_cm } of slabsOf(stack)) {
+    const { attenuation } = linearCoefficients(matter, energies);
     for (let i = 0; i < depth.length; i++) depth[i] += attenuation[i] * thickness_cm;
   }
-  const sums = { primary: 0, scatter: 0, primaryBehind: 0, scatterBehind: 0 };
-  skin.energies_keV.forEach((energy, i) => {
-    const signal =
-      skin.fluence_per_mm2[i] * Math.exp(-depth[i]) * energy * detector.energyFraction(energy, 1);
-    const behind = signal * grid.primary(energy);
-    sums.primary += signal;
-    sums.scatter += signal * on.withoutGrid.signal[i];
-    sums.primaryBehind += behind;
-    sums.scatterBehind += behind * (on.behindGrid?.signal[i] ?? 0);
+  const primary = energies.map((energy, i) => {
+    const score = quantity === 'signal' ? detector.energyFraction(energy, 1) : inAir[i];
+    return skin.fluence_per_mm2[i] * Math.exp(-depth[i]) * energy * score;
   });
-  return { open: sums.scatter / sums.primary, behindGrid: sums.scatterBehind / sums.primaryBehind };
+  const behind = primary.map((value, i) => value * grid.primary(energies[i]));
+  const ratio = (weights: Float64Array, scatter: DetectorScatter | null) => {
+    const total = weights.reduce((sum, weight) => sum + weight, 0);
+    return (
+      weights.reduce((sum, weight, i) => sum + weight * (scatter?.[quantity][i] ?? 0), 0) / total
+    );
+  };
+  return {
+    open: ratio(primary, on.withoutGrid),
+    behindGrid: ratio(behind, on.behindGrid),
+  };
 }

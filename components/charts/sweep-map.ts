@@ -21,13 +21,21 @@ export interface MapCursor {
 
 export const filterName = (filter: string): string => (filter === 'none' ? 'no filter' : filter);
 
-/** Hatch of what a limit forbids, and the clip that keeps every band to itself. */
+/** Words on a plate of paper, so that shading and hatches leave them readable. */
+const plated = (
+  words: string,
+  place: { readonly x: number; readonly y: number },
+  color: string,
+): SVGTemplateResult => svg`<rect class="plate" x=${place.x - 3} y=${place.y - 8} width=${wordsWidth(words) - 2} height="16" />
+  <text x=${place.x} y=${place.y + 4} fill=${color}>${words}</text>`;
+
+/** Hatch of what a limit forbids, and the clips that keep every band to itself. */
 const definitions = (data: SweepMapData, layout: MapLayout): SVGTemplateResult => svg`<defs>
     <pattern id="map-forbidden" patternUnits="userSpaceOnUse" width="6" height="6" patternTransform="rotate(45)"><path class="hatch-line" d="M0,0 V6" /></pattern>
-    <clipPath id="map-bands">${data.rows.map(
+    ${data.rows.map(
       (_, row) =>
-        svg`<rect x=${layout.left} y=${layout.rowTop(row)} width=${layout.right - layout.left} height=${layout.rowHeight} />`,
-    )}</clipPath>
+        svg`<clipPath id="map-band-${row}"><rect x=${layout.left} y=${layout.rowTop(row)} width=${layout.right - layout.left} height=${layout.rowHeight} /></clipPath>`,
+    )}
   </defs>`;
 
 function bandOf(
@@ -71,11 +79,12 @@ function limitLabels(data: SweepMapData, layout: MapLayout): SVGTemplateResult[]
       if (width > (widest.get(run.limit)?.width ?? 0)) widest.set(run.limit, { run, row, width });
     }
   });
-  return [...widest].flatMap(([limit, { run, row, width }]) =>
-    width > wordsWidth(limit) + 8
-      ? svg`<text class="name limit-name" text-anchor="middle" x=${(layout.edges[run.from] + layout.edges[run.to + 1]) / 2} y=${layout.rowTop(row) + layout.rowHeight / 2 + 4}>${limit}</text>`
-      : [],
-  );
+  return [...widest].flatMap(([limit, { run, row, width }]) => {
+    const middle = (layout.edges[run.from] + layout.edges[run.to + 1]) / 2;
+    const x = middle - wordsWidth(limit) / 2 + 4;
+    const y = layout.rowTop(row) + layout.rowHeight / 2;
+    return width > wordsWidth(limit) + 8 ? plated(limit, { x, y }, 'var(--ink)') : [];
+  });
 }
 
 /** The best allowed setting as an upright cross, its 90 % window as a bracket under it. */
@@ -121,10 +130,7 @@ function names(data: SweepMapData, layout: MapLayout): SVGTemplateResult[] {
     top: layout.top,
     bottom: layout.bottom,
   });
-  return wanted.map(
-    ({ words, color }, i) =>
-      svg`<text class="name" x=${places[i].x} y=${places[i].y + 4} fill=${color}>${words}</text>`,
-  );
+  return wanted.map(({ words, color }, i) => plated(words, places[i], color));
 }
 
 function axes(data: SweepMapData, layout: MapLayout): SVGTemplateResult {
@@ -172,7 +178,7 @@ export function sweepMap(
   return html`<svg class="chart map" viewBox="0 0 ${width} ${height}" width=${width} height=${height} role="img" aria-label=${mapWords(data)}>
     ${definitions(data, layout)}
     ${axes(data, layout)}
-    <g clip-path="url(#map-bands)">${data.rows.map((row, i) => bandOf(row, i, data, layout, best))}</g>
+    ${data.rows.map((row, i) => svg`<g clip-path="url(#map-band-${i})">${bandOf(row, i, data, layout, best)}</g>`)}
     ${limitLabels(data, layout)}
     ${bestSign(data, layout)}
     ${cursor ? svg`<rect class="reading" x=${layout.edges[cursor.column] - 1} y=${layout.rowTop(cursor.row) - 1} width=${Math.max(4, layout.edges[cursor.column + 1] - layout.edges[cursor.column] + 2)} height=${layout.rowHeight + 2} />` : nothing}
@@ -189,12 +195,10 @@ export function sweepMap(
 
 /** What the ink says, as shares of the best allowed setting. */
 export function mapLegend(data: SweepMapData): TemplateResult {
-  const box = { width: 30, height: 9 };
-  const bounds = levels.map((level) => `${100 * level}`);
+  const box = { width: 34, height: 9 };
   const right = (levels.length + 1) * box.width;
-  return html`<span class="legend"><svg width=${right + 26} height="24" aria-hidden="true">
+  return html`<span class="legend"><svg width=${right} height="24" aria-hidden="true">
       ${[0, ...levels].map((_, i) => svg`<rect x=${i * box.width} y="0" width=${box.width - 1} height=${box.height} style="fill:${levelFill(i)}" />`)}
-      ${bounds.map((words, i) => svg`<text class="tick" text-anchor="middle" x=${(i + 1) * box.width - 0.5} y="21">${words}</text>`)}
-      <text class="tick" text-anchor="middle" x=${right - 4} y="21">100 %</text>
-    </svg><span>${data.best ? 'of the best allowed setting' : 'of the best setting, though none is allowed'}; + best, bracket: within 90 % of it; hatched: forbidden</span></span>`;
+      ${levels.map((level, i) => svg`<text class="tick" text-anchor="middle" x=${(i + 1) * box.width - 0.5} y="22">${100 * level} %</text>`)}
+    </svg><span>${data.best ? 'of the best allowed setting' : 'of the best setting, though none is allowed'}</span><span>+ best, bracket: within 90 % of it</span><span>hatched: forbidden</span></span>`;
 }

@@ -24,6 +24,8 @@ import '../fault-list/fault-list.js';
 import '../finding-list/finding-list.js';
 import '../patient-section/patient-section.js';
 import '../room-section/room-section.js';
+import '../sizes-section/sizes-section.js';
+import '../solve-section/solve-section.js';
 import '../sweep-section/sweep-section.js';
 import '../task-section/task-section.js';
 import '../techniques-section/techniques-section.js';
@@ -188,6 +190,8 @@ export class DeskPage extends LitElement {
           <techniques-section id="techniques" .model=${later}></techniques-section>
           <balance-section id="balance" .model=${later}></balance-section>
           <sweep-section .model=${later} .pool=${this.pool}></sweep-section>
+          <sizes-section .model=${later} .pool=${this.pool}></sizes-section>
+          <solve-section .model=${later} .pool=${this.pool}></solve-section>
           <transport-section .model=${later} .check=${this.check} ?tracksDrawn=${this.tracksDrawn}></transport-section>
         </div>
       </main>

@@ -257,14 +257,14 @@ export class SweepSection extends LitElement {
         ${
           data && sweep && known && known.settings.length > 0
             ? html`<div class="results ${isStale ? 'stale' : ''}">
-              <div>${this.map(data, known.settings)} ${this.below(data, sweep)}</div>
+              <div>${this.map(data, known.settings)} ${this.below(data, sweep)}
+                <rules-panel .model=${this.model} .pool=${this.seen.isSeen ? this.pool : null} .size=${size}></rules-panel></div>
               <frontier-panel .model=${this.model} .sweep=${sweep} .size=${size} @adopt=${(
                 event: CustomEvent<MappedSetting>,
               ) => this.adopt(event.detail)}></frontier-panel>
             </div>`
             : nothing
         }
-        <rules-panel .model=${this.model} .pool=${this.seen.isSeen ? this.pool : null} .size=${size}></rules-panel>
       </div>
     </section>`;
   }

@@ -30,11 +30,9 @@ export const sweepSheet = css`
   .uncomputed {
     fill: var(--paper-shade);
   }
-  .limit-name {
-    fill: var(--ink);
-  }
-  .name {
-    stroke-width: 4px;
+  .plate {
+    fill: var(--paper);
+    opacity: 0.86;
   }
   .window,
   .best {
@@ -55,7 +53,7 @@ export const sweepSheet = css`
     display: flex;
     flex-wrap: wrap;
     align-items: start;
-    gap: 0.2rem 0.8rem;
+    gap: 0.2rem 1.4rem;
     color: var(--soft);
     font-size: var(--small);
     line-height: 1;
@@ -132,8 +130,13 @@ export const sweepSheet = css`
   }
   .members th,
   .members td {
-    padding-inline-end: 0.8rem;
+    padding-inline: 0.8rem 0;
+    text-align: end;
     white-space: nowrap;
+  }
+  .members tr > :first-child {
+    text-align: start;
+    padding-inline-start: 0;
   }
   .members thead th {
     white-space: normal;
@@ -145,9 +148,6 @@ export const sweepSheet = css`
   }
   .members tbody tr:hover {
     background: var(--paper-shade);
-  }
-  .rules {
-    margin-block-start: 1.6rem;
   }
   .rule {
     stroke: var(--ink);

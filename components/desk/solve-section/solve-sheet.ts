@@ -1,0 +1,49 @@
+import { css } from 'lit';
+
+/** Four questions, each a sentence with its answer below. */
+export const solveSheet = css`
+  .questions {
+    display: grid;
+    grid-template-columns: repeat(auto-fit, minmax(min(30rem, 100%), 1fr));
+    gap: 1.8rem 2.5rem;
+    align-items: start;
+  }
+  .questions > * {
+    min-width: 0;
+  }
+  .ask {
+    margin: 0 0 0.5rem;
+    line-height: 1.9;
+    max-width: 34rem;
+  }
+  .ask select,
+  .ask input {
+    color: var(--ink);
+  }
+  .ask input[type='text'] {
+    width: calc(var(--chars, 5) * 1ch);
+    text-align: end;
+  }
+  .ask button.plain {
+    margin-inline-start: 0.8rem;
+  }
+  .answer {
+    border-inline-start: 2px solid var(--rule);
+    padding-inline-start: 0.9rem;
+    max-width: 34rem;
+  }
+  .answer p {
+    margin: 0 0 0.25rem;
+    line-height: 1.45;
+  }
+  .answer .found {
+    font-size: var(--value);
+  }
+  .answer .forward {
+    font-size: var(--small);
+    color: var(--soft);
+  }
+  .answer button.plain {
+    font-size: var(--small);
+  }
+`;

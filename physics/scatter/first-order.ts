@@ -57,7 +57,8 @@ export function firstOrder(
   return { compton, rayleigh };
 }
 
-function addSlab(
+/** Adds the scatter of one slab at one node to `sums`: Compton by score, then Rayleigh by score. */
+export function addSlab(
   part: FirstOrderPart,
   nodes: EnergyNodes,
   node: number,

@@ -19,9 +19,7 @@ export function responsesOn(
 }
 
 function interpolate(responses: ScatterResponses, energies_keV: Float64Array): ScatterResponses {
-  const places = Array.from(energies_keV, (energy) => placeOf(responses.energies_keV, energy));
-  const column = (values: Float64Array) =>
-    Float64Array.from(places, ({ low, share }) => between(values[low], values[low + 1], share));
+  const column = toChannels(responses.energies_keV, energies_keV);
   const scatter = (of: DetectorScatter): DetectorScatter => ({
     signal: column(of.signal),
     noise: column(of.noise),
@@ -36,6 +34,16 @@ function interpolate(responses: ScatterResponses, energies_keV: Float64Array): S
     layerAbsorbedFraction: responses.layerAbsorbedFraction?.map(column) ?? null,
     method: responses.method,
   };
+}
+
+/** What brings a column of values over nodes to the channels of a spectrum, as `responsesOn` does. */
+export function toChannels(
+  nodes_keV: Float64Array,
+  energies_keV: Float64Array,
+): (values: Float64Array) => Float64Array {
+  const places = Array.from(energies_keV, (energy) => placeOf(nodes_keV, energy));
+  return (values) =>
+    Float64Array.from(places, ({ low, share }) => between(values[low], values[low + 1], share));
 }
 
 function between(low: number, high: number, share: number): number {

@@ -1,9 +1,8 @@
 import { absorptionEdges } from '../../materials/index.js';
 import type { Stack } from '../stack/stack.js';
+import { backscatterShare } from './backscatter-share.js';
 import { type EnergyNodes, energyNodes, scatterRange_keV } from './energy-nodes.js';
-import { equivalentWater } from './equivalent-water.js';
 import { estimate } from './estimate.js';
-import { backscatterFieldShare } from './field-table.js';
 import { firstOrder } from './first-order.js';
 import { scatterGeometry } from './geometry.js';
 import { infiniteField } from './infinite-field.js';
@@ -80,39 +79,4 @@ export function scatterResponses(
     layerAbsorbedFraction: infinite.layerAbsorbedFraction,
     method: 'estimate',
   };
-}
-
-/** Depth whose scattering decides how far backscatter spreads along the skin. */
-const backscatterDepth_cm = 5;
-
-/** Share of the infinite field's backscatter that the field at the skin keeps, over the nodes. */
-function backscatterShare(
-  stack: Stack,
-  slabs: readonly Slab[],
-  energies_keV: Float64Array,
-): Float64Array {
-  const { halfSide_cm } = scatterGeometry(stack);
-  const atSkin =
-    stack.beam === 'point'
-      ? (halfSide_cm * stack.sourceToSkin_mm) / stack.sourceToDetector_mm
-      : halfSide_cm;
-  const near = uppermost(
-    slabs.filter(({ layerIndex }) => layerIndex !== null),
-    backscatterDepth_cm,
-  );
-  const depth_cm = near.reduce((sum, { thickness_cm }) => sum + thickness_cm, 0);
-  const water = equivalentWater(near, energies_keV);
-  return water.energy_keV.map((energy, i) =>
-    backscatterFieldShare(energy, atSkin * (depth_cm > 0 ? water.thickness_cm[i] / depth_cm : 1)),
-  );
-}
-
-/** The first `depth_cm` of a stack. */
-function uppermost(slabs: readonly Slab[], depth_cm: number): Slab[] {
-  let left = depth_cm;
-  return slabs.flatMap((slab) => {
-    const thickness_cm = Math.min(left, slab.thickness_cm);
-    left -= thickness_cm;
-    return thickness_cm > 0 ? [{ ...slab, thickness_cm }] : [];
-  });
 }

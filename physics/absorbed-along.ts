@@ -1,16 +1,15 @@
 import { massAttenuationOn, massEnergyAbsorptionOn } from '../materials/index.js';
 import type { Spectrum } from './beam/spectrum.js';
+import { type CutStack, cutStack } from './cut-stack.js';
 import { mJ_per_keV } from './dose/deposition.js';
 import { fieldArea_cm2 } from './dose/field-area.js';
 import { KeptBy } from './numeric/kept-by.js';
 import type { OperatingPoint } from './operating-point.js';
 import { responsesOn, type ScatterResponses, scatterResponses } from './scatter/index.js';
-import type { Stack, StackLayer } from './stack/stack.js';
+import type { StackLayer } from './stack/stack.js';
 
 /** Energy absorbed along the depth of the patient, of one frame. */
 export interface AbsorbedAlong {
-  readonly technique: string;
-  readonly size: string;
   /** Faces of the pieces the layers are cut into, from 0 at the skin; one more than the values. */
   readonly faces_mm: readonly number[];
   /** Layer each piece belongs to. */
@@ -32,13 +31,10 @@ const pieces = 20;
  * @returns null where the estimate gives no deposition.
  */
 export const absorbedAlong = (point: OperatingPoint): AbsorbedAlong | null => {
-  const { made, tubeLoad_mAs, technique, size } = point;
+  const { made, tubeLoad_mAs } = point;
   const { stack } = made.placement;
-  const cut = cutStack(stack);
-  const { layerAbsorbedFraction } = responsesOn(
-    cut.responses(made.chain.detector),
-    made.skin.energies_keV,
-  );
+  const { cut, responses } = depositionOf(made);
+  const { layerAbsorbedFraction } = responsesOn(responses, made.skin.energies_keV);
   if (layerAbsorbedFraction === null) return null;
   const area_mm2 = fieldArea_cm2(stack, stack.sourceToSkin_mm) * 100;
   const perFrame = (keV_per_mm2: number, thickness_mm: number): number =>
@@ -47,9 +43,7 @@ export const absorbedAlong = (point: OperatingPoint): AbsorbedAlong | null => {
   const total = layerAbsorbedFraction.map((fraction) => energySum(made.skin, fraction));
   const thicknesses = cut.stack.layers.map((layer) => layer.thickness_mm);
   return {
-    technique: technique.name,
-    size: size.name,
-    faces_mm: [0, ...thicknesses.map((_, k) => sumTo(thicknesses, k + 1))],
+    faces_mm: cut.faces_mm,
     layers: cut.layerOf,
     energy_mJ_per_mm: total.map((energy, k) => perFrame(energy, thicknesses[k])),
     fromScattered_mJ_per_mm: total.map((energy, k) =>
@@ -58,32 +52,18 @@ export const absorbedAlong = (point: OperatingPoint): AbsorbedAlong | null => {
   };
 };
 
-interface CutStack {
-  readonly stack: Stack;
-  readonly layerOf: readonly number[];
-  readonly responses: (detector: Parameters<typeof scatterResponses>[1]) => ScatterResponses;
+interface Deposition {
+  readonly cut: CutStack;
+  readonly responses: ScatterResponses;
 }
 
-const cuts = new KeptBy<CutStack>();
+const depositions = new KeptBy<Deposition>();
 
-/** Kept with the stack, so that every technique shares one solution. */
-const cutStack = (stack: Stack): CutStack =>
-  cuts.get([stack], () => {
-    const step_mm = stack.thickness_mm / pieces;
-    const layerOf: number[] = [];
-    const layers = stack.layers.flatMap((layer, index) => {
-      const count = Math.max(1, Math.round(layer.thickness_mm / step_mm));
-      const piece: StackLayer = { ...layer, thickness_mm: layer.thickness_mm / count };
-      for (let k = 0; k < count; k++) layerOf.push(index);
-      return Array.from({ length: count }, () => piece);
-    });
-    const cut = { ...stack, layers };
-    const kept = new KeptBy<ScatterResponses>();
-    return {
-      stack: cut,
-      layerOf,
-      responses: (detector) => kept.get([detector], () => scatterResponses(cut, detector, null)),
-    };
+/** Kept with stack and detector, so that every technique shares one solution. */
+const depositionOf = ({ placement, chain }: OperatingPoint['made']): Deposition =>
+  depositions.get([placement.stack, chain.detector], () => {
+    const cut = cutStack(placement.stack, pieces);
+    return { cut, responses: scatterResponses(cut.stack, chain.detector, null) };
   });
 
 const energySum = ({ energies_keV, fluence_per_mm2 }: Spectrum, share: Float64Array): number =>
@@ -105,6 +85,3 @@ const primaryDeposits_keV_per_mm2 = (skin: Spectrum, layers: readonly StackLayer
     return energySum(skin, left);
   });
 };
-
-const sumTo = (values: readonly number[], end: number): number =>
-  values.slice(0, end).reduce((sum, value) => sum + value, 0);

@@ -1,8 +1,8 @@
-import { type AbsorbedAlong, absorbedAlong } from '../../physics/absorbed-along.js';
 import { type AlongBeam, alongBeam } from '../../physics/along-beam.js';
 import type { ParsedCase } from '../../physics/case/index.js';
 import { sharedWith } from '../../physics/case/shared-with.js';
 import type { CheckRequest, NoCheck } from '../../physics/check-by-transport/index.js';
+import { type DepthProfiles, depthProfiles } from '../../physics/depth-profiles.js';
 import { type OperatingPoint, operatingPoint } from '../../physics/operating-point.js';
 import type { Weighing } from '../../physics/results.js';
 import { sizesOf } from '../../physics/stack/sizes.js';
@@ -22,8 +22,8 @@ export interface EvaluationHost {
   /** Primary photons along the axis and the spectrum at the detail, per technique that has them. */
   readonly along: (size: string) => AlongBeam[];
   readonly scan: (request: ScanRequest) => SweepSetting[];
-  /** Energy absorbed along the depth, per technique that has it; much more work than `weigh`. */
-  readonly absorbed: (size: string) => AbsorbedAlong[];
+  /** Absorbed energy and scatter along the depth, per technique; much more work than `weigh`. */
+  readonly depths: (size: string) => DepthProfiles[];
   /** A transport run made ready to fly, with the ways of its first photons. */
   readonly check: (request: CheckRequest) => CheckStart | NoCheck;
 }
@@ -50,7 +50,7 @@ export function evaluationHost(): EvaluationHost {
     weigh: (name) => weigh(parsed(), sizesNamed(name)),
     along: (name) => pointsAt(name).map(alongBeam),
     scan: (request) => scanSlice(parsed().case, request),
-    absorbed: (name) => pointsAt(name).flatMap((point) => absorbedAlong(point) ?? []),
+    depths: (name) => pointsAt(name).map(depthProfiles),
     check: (request) => startCheck(parsed().case, request),
   };
 }

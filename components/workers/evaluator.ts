@@ -1,8 +1,8 @@
 import { type Remote, wrap } from 'comlink';
-import type { AbsorbedAlong } from '../../physics/absorbed-along.js';
 import type { AlongBeam } from '../../physics/along-beam.js';
 import type { ParsedCase } from '../../physics/case/index.js';
 import type { CheckRequest, NoCheck } from '../../physics/check-by-transport/index.js';
+import type { DepthProfiles } from '../../physics/depth-profiles.js';
 import type { Weighing } from '../../physics/results.js';
 import type { SweepSetting } from '../../physics/sweep/sweep-setting.js';
 import type { CheckStart } from './check-start.js';
@@ -15,7 +15,7 @@ export interface Evaluator {
   readonly weigh: (size: string) => Promise<Weighing>;
   readonly scan: (request: ScanRequest) => Promise<SweepSetting[]>;
   readonly along: (size: string) => Promise<AlongBeam[]>;
-  readonly absorbed: (size: string) => Promise<AbsorbedAlong[]>;
+  readonly depths: (size: string) => Promise<DepthProfiles[]>;
   readonly check: (request: CheckRequest) => Promise<CheckStart | NoCheck>;
   readonly end: () => void;
 }
@@ -63,7 +63,7 @@ export function startEvaluator(make: () => Worker): Evaluator {
     weigh: (size) => ask((to) => to.weigh(size)),
     scan: (request) => ask((to) => to.scan(request)),
     along: (size) => ask((to) => to.along(size)),
-    absorbed: (size) => ask((to) => to.absorbed(size)),
+    depths: (size) => ask((to) => to.depths(size)),
     check: (request) => ask(async (to) => to.check(request)),
     end: () => lose('the evaluator was ended'),
   };

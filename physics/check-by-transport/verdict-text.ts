@@ -1,11 +1,18 @@
 import { numberText } from '../number-text.js';
 import type { CheckRow } from './check-rows.js';
 
+const units = [
+  [1e9, ' billion'],
+  [1e6, ' million'],
+  [1e3, ' thousand'],
+  [1, ''],
+] as const;
+
 /** `300 thousand`, `2.4 million`: a number of photons to two digits. */
 export const photonsText = (photons: number): string => {
-  if (photons >= 1e9) return `${numberText(photons / 1e9, 2)} billion`;
-  if (photons >= 1e6) return `${numberText(photons / 1e6, 2)} million`;
-  return photons >= 1e3 ? `${numberText(photons / 1e3, 2)} thousand` : numberText(photons);
+  const rounded = Number(photons.toPrecision(2));
+  const [size, name] = units.find(([least]) => rounded >= least) ?? units[units.length - 1];
+  return `${numberText(rounded / size)}${name}`;
 };
 
 /** The verdict on a row in plain words. */

@@ -1,6 +1,6 @@
-import type { AbsorbedAlong } from '../../../physics/absorbed-along.js';
 import type { AlongBeam } from '../../../physics/along-beam.js';
 import type { Size } from '../../../physics/case/schema.js';
+import type { DepthProfiles } from '../../../physics/depth-profiles.js';
 import type { Comparison, Evaluation, Weighing } from '../../../physics/results.js';
 import { type PlacedDetail, placeDetail } from '../../../physics/stack/place-detail.js';
 import { placeStack } from '../../../physics/stack/place-stack.js';
@@ -25,8 +25,8 @@ export interface DeskModel {
   readonly others: readonly Weighing[];
   /** The beam along the axis at the size looked at, per technique that could be computed. */
   readonly along: readonly AlongBeam[];
-  /** Energy absorbed along the depth, once an ink shows it. */
-  readonly absorbed?: readonly AbsorbedAlong[];
+  /** Absorbed energy and scatter along the depth, once an ink shows them. */
+  readonly depths?: readonly DepthProfiles[];
   /** Paths of the photons of a check, while they are to be drawn. */
   readonly tracks?: DrawnTracks | null;
   /** True while `weighing` belongs to an earlier state of the draft. */

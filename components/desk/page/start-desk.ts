@@ -70,7 +70,7 @@ export async function startDesk(page: DeskPage): Promise<void> {
       weighing: page.model?.weighing ?? null,
       along: page.model?.along ?? [],
       others: page.model?.others ?? [],
-      absorbed: page.model?.absorbed,
+      depths: page.model?.depths,
       tracks: page.model?.tracks,
       stale: true,
       sizeName: sizes.some(({ name }) => name === page.model?.sizeName)

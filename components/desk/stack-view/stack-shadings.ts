@@ -2,7 +2,7 @@ import type { Evaluation } from '../../../physics/results.js';
 import { faceDepths_mm, type Shading, type StackScene } from '../../../scenes/stack-scene-data.js';
 import { stepProfile } from '../../../scenes/step-profile.js';
 import { type DeskModel, evaluationOf } from '../model/desk-model.js';
-import { energyShadingsOf } from '../transport-section/energy-shadings.js';
+import { depthShadingsOf } from '../transport-section/depth-shadings.js';
 import { stackSceneOf } from './stack-scene.js';
 
 /** Mean absorbed dose of every layer as a profile; null while it is not computed. */
@@ -35,7 +35,7 @@ export function stackShadingsOf(model: DeskModel): readonly Shading[] {
         },
       ]
     : [];
-  const shadings = [...doses, ...(scene ? energyShadingsOf(model) : [])];
+  const shadings = [...doses, ...(scene ? depthShadingsOf(model) : [])];
   made.set(model, shadings);
   return shadings;
 }

@@ -7,6 +7,7 @@ import {
   fateWords,
   statedBalance_fraction,
 } from '../../../physics/check-by-transport/index.js';
+import type { Estimated } from '../../../physics/transport/index.js';
 import { formatNumber } from '../../charts/format.js';
 import { differenceBar } from '../../charts/transport-difference.js';
 import { verdictSign, verdictWords } from './check-words.js';
@@ -20,6 +21,12 @@ const headings = html`<th scope="col" class="number">estimate</th>
 const signed = (value: number, digits: number): string =>
   `${value > 0 ? '+' : ''}${value.toFixed(digits).replace('-', '−')}`;
 
+/** A standard error in percent of its value. */
+const relative = ({ value, standardError }: Estimated): string =>
+  value === 0 || standardError === null
+    ? '–'
+    : `${formatNumber((100 * standardError) / Math.abs(value), 2)} %`;
+
 /** Estimate, transport and how they lie to each other. */
 function cells(row: CheckRow, ink: number): TemplateResult {
   const { estimate, transport, difference_percent, tolerance_percent, z } = row;
@@ -28,7 +35,7 @@ function cells(row: CheckRow, ink: number): TemplateResult {
     difference_percent !== null && tolerance_percent !== null && standardError !== null;
   return html`<td class="number">${formatNumber(estimate)}</td>
     <td class="number">${formatNumber(value)}</td>
-    <td class="number soft">${formatNumber(standardError, 2)}</td>
+    <td class="number soft">${relative(transport)}</td>
     <td>${
       isKnown
         ? html`<span class="against">${differenceBar(
@@ -79,7 +86,7 @@ export function layerTable({ rows }: CheckReport, ink: number): TemplateResult {
         const column = columns[k]?.transport;
         return html`<tr><th scope="row">${row.layer}</th>${cells(row, ink)}${verdictCell(row)}${
           column
-            ? html`<td class="number">${formatNumber(column.value)}</td><td class="number soft">${formatNumber(column.standardError, 2)}</td>`
+            ? html`<td class="number">${formatNumber(column.value)}</td><td class="number soft">${relative(column)}</td>`
             : nothing
         }</tr>`;
       })}</tbody>

@@ -7,7 +7,7 @@ import { transportPool } from '../../workers/transport-pool.js';
 import type { DeskPage } from '../page/desk-page.js';
 import { checkRunner } from './check-runner.js';
 import { type CheckState, checkBasis, isRunning } from './check-state.js';
-import { isEnergyInk } from './energy-shadings.js';
+import { isDepthInk } from './depth-shadings.js';
 
 /** Made when first asked for. */
 const once = <T>(make: () => T): (() => T) => {
@@ -19,8 +19,8 @@ const once = <T>(make: () => T): (() => T) => {
 };
 
 /**
- * Joins the page with what computes aside from it: transport runs, and absorbed energy along the
- * depth. Both have workers of their own, so that answers to edits never wait for them.
+ * Joins the page with what computes aside from it: transport runs, and what
+ * happens along the depth. Both have workers of their own, so that answers to edits never wait for them.
  *
  * @param parsed the case as it stands.
  * @returns what to call after every change of the case or of the size looked at.
@@ -47,17 +47,18 @@ export function joinTransport(page: DeskPage, parsed: () => ParsedCase): () => v
   };
 
   let ink = '';
-  const absorbed = latestWins(async ({ size }: { readonly size: string }) => {
-    const [, along] = await Promise.all([aside().load(parsed()), aside().absorbed(size)]);
-    return along;
+  const depths = latestWins(async ({ size }: { readonly size: string }) => {
+    const [, profiles] = await Promise.all([aside().load(parsed()), aside().depths(size)]);
+    return profiles;
   });
-  const askAbsorbed = async () => {
-    if (!isEnergyInk(ink)) return;
+  const askDepths = async () => {
+    if (!isDepthInk(ink)) return;
     const asked = parsed();
-    const along = await absorbed({ size: page.model.sizeName }).catch(
+    const profiles = await depths({ size: page.model.sizeName }).catch(
       (): typeof superseded => superseded,
     );
-    if (along !== superseded && asked === parsed()) page.model = { ...page.model, absorbed: along };
+    if (profiles === superseded || asked !== parsed()) return;
+    page.model = { ...page.model, depths: profiles };
   };
 
   page.addEventListener('run-check', ({ detail }) => void runner.run(parsed(), detail));
@@ -68,12 +69,12 @@ export function joinTransport(page: DeskPage, parsed: () => ParsedCase): () => v
   });
   page.addEventListener('choose-ink', ({ detail }) => {
     ink = detail;
-    void askAbsorbed();
+    void askDepths();
   });
   return () => {
     const { check } = page;
     if (check && isRunning(check) && !isCurrent(check)) runner.cancel('the case has changed');
     drawTracks();
-    void askAbsorbed();
+    void askDepths();
   };
 }

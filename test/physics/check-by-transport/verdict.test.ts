@@ -77,7 +77,8 @@ describe('the verdict on an estimate', () => {
   });
 
   it.each([
-    [999, '999'],
+    [990, '990'],
+    [999_600, '1 million'],
     [25_000, '25 thousand'],
     [1_000_000, '1 million'],
     [2.4e9, '2.4 billion'],

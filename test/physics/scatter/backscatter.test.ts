@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { kept } from '../../../materials/kept.js';
 import {
   attenuate,
   halfValueLayer_mm,
@@ -6,7 +7,11 @@ import {
   tungstenSpectrum,
 } from '../../../physics/beam/index.js';
 import { backscatterFactor } from '../../../physics/dose/backscatter.js';
-import { responsesOn, scatterResponses } from '../../../physics/scatter/index.js';
+import {
+  responsesOn,
+  type ScatterResponses,
+  scatterResponses,
+} from '../../../physics/scatter/index.js';
 import { readReference } from '../../reference/read-reference.js';
 import { idealDetector, material, stackOf } from './stacks.js';
 
@@ -31,6 +36,20 @@ function beamOf(potential_kV: number, halfValueLayer_mmAl: number): Spectrum {
   return filtered(low);
 }
 
+const known = new Map<string, ScatterResponses>();
+
+/** A slab of 15 cm with a square field at its face, 100 cm from the source; both beams share one. */
+const phantomResponses = (phantom: string, field_cm: number): ScatterResponses =>
+  kept(known, `${phantom} ${field_cm}`, () => {
+    const side_mm = field_cm * 11.5;
+    const stack = stackOf([[material(phantom), 15]], {
+      beam: 'point',
+      sourceToDetector_mm: 1150,
+      field_mm: [side_mm, side_mm],
+    });
+    return scatterResponses(stack, idealDetector(), null);
+  });
+
 const phantoms: Readonly<Record<string, string>> = {
   water: 'water',
   'ICRU tissue': 'soft tissue ICRU four-component',
@@ -54,13 +73,8 @@ describe('backscatter factors of 15 cm phantoms at 100 cm', () => {
   it('are eighteen', () => expect(rows).toHaveLength(18));
 
   it.each(rows)('$phantom, $field_cm cm, $potential_kV kV: $expected', (row) => {
-    const stack = stackOf([[material(row.phantom), 15]], {
-      beam: 'point',
-      sourceToDetector_mm: 1150,
-      field_mm: [row.field_cm * 11.5, row.field_cm * 11.5],
-    });
     const beam = beamOf(row.potential_kV, row.hvl);
-    const responses = scatterResponses(stack, idealDetector(), null);
+    const responses = phantomResponses(row.phantom, row.field_cm);
     const backscatter = responsesOn(responses, beam.energies_keV).backscatter;
     const found = backscatterFactor(beam, backscatter ?? new Float64Array(0));
     expect(Math.abs(found / row.expected - 1), `${found}`).toBeLessThan(0.03);

@@ -36,7 +36,7 @@ const margin = { top: 20, right: 84, bottom: 40, left: 46 };
 const panelHeight = 118;
 const panelGap = 30;
 const mixHeight = 40;
-const rowHeight = 17;
+const rowHeight = 18;
 
 type Scale = (value: number) => number;
 
@@ -127,7 +127,7 @@ function settings(data: ThicknessData, top: number, x: Scale, width: number): SV
           from,
           to,
         }) => svg`<line x1=${x(from)} x2=${Math.max(x(from) + 2, x(to) - 2)} y1=${y} y2=${y} stroke=${color} stroke-width="2.5" />
-          <text class="name" x=${Math.min(x(from) + 4, width - margin.right - 40)} y=${y + 4} fill=${color}>${filterName(filter)}</text>`,
+          <text class="name" x=${Math.min(x(from), width - margin.right - 40)} y=${y + 4} fill=${color}>${filterName(filter)}</text>`,
       );
     })}`;
 }

@@ -62,7 +62,10 @@ export const potentialForLessAgent = (
   const chosen = reaching.find(({ findings }) => isAllowed(findings));
   if (!chosen?.values) {
     const limits = limitsOf(reaching[0]?.findings ?? []);
-    return noAnswer(target, limits.length > 0 ? limits : [outOfReach(c, agentShare, target)]);
+    return noAnswer(
+      target,
+      limits.length > 0 ? limits : [outOfReach(c, agentShare, target, tried)],
+    );
   }
   const { potential_kV, values } = chosen;
   const exact_kV =
@@ -84,11 +87,18 @@ export const potentialForLessAgent = (
 const far = ({ potential_kV }: SweepSetting, from_kV: number): number =>
   Math.abs(potential_kV - from_kV);
 
-const outOfReach = (c: Case, agentShare: number, target: number): Finding => {
+const outOfReach = (
+  c: Case,
+  agentShare: number,
+  target: number,
+  tried: readonly SweepSetting[],
+): Finding => {
   const { min, max } = c.room.tube.potential_kV;
+  const most = tried.reduce((a, b) => ((b.values?.sdnr ?? 0) > (a.values?.sdnr ?? 0) ? b : a));
+  const value = most.values?.sdnr ?? 0;
   return blockedBy(
     'potentialRange',
-    `With ${numberText(100 * agentShare)} % of the agent no potential of the room, ${min} to ${max} kV, reaches SdNR ${numberText(target)}.`,
-    { path: 'room.tube.potential_kV', value: agentShare, bound: min },
+    `With ${numberText(100 * agentShare)} % of the agent no potential of the room, ${min} to ${max} kV, reaches SdNR ${numberText(target, 4)}; the most is ${numberText(value, 4)} at ${most.potential_kV} kV.`,
+    { path: 'room.tube.potential_kV', value, bound: target },
   );
 };

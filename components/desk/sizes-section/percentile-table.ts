@@ -5,6 +5,16 @@ import { formatNumber, formatRatio } from '../../charts/format.js';
 import { techniqueInk } from '../../charts/inks.js';
 import { forbiddenBy } from '../sweep-section/map-data.js';
 
+/** What stands against the techniques shown at a percentile, a sentence where there is anything. */
+const forbiddenAt = (result: PercentileResult, shown: readonly string[]): string[] => {
+  const limits = result.evaluations.flatMap(({ technique, findings }) => {
+    const limit = shown.includes(technique) ? forbiddenBy(findings) : null;
+    return limit ? [`${technique} ${limit}`] : [];
+  });
+  const all = [...limits, ...result.findings.map(({ message }) => message)];
+  return all.length > 0 ? [`P${result.percentile}: ${all.join('; ')}.`] : [];
+};
+
 /** P5, P50 and P95 of the mix, each at its own thickness: Current beside the Proposed shown. */
 export function percentileTable(
   results: readonly PercentileResult[],
@@ -28,20 +38,22 @@ export function percentileTable(
     <thead><tr><th scope="col">patient</th>
       ${pair('SdNR')}${pair('incident mGy')}
       ${right === null ? null : html`<th scope="col" class="number">kerma ratio<br />as set</th><th scope="col" class="number">kerma ratio<br />equal SdNR</th>`}
-      ${pair('power kW')}<th scope="col">forbidden</th></tr></thead>
+      ${pair('power kW')}</tr></thead>
     <tbody>${results.map((result) => {
       const own = shown.map((ink) => of(result, ink));
       const cells = (value: (evaluation: Evaluation) => number | null) =>
         own.map((one) => html`<td class="number">${formatNumber(one && value(one))}</td>`);
-      const forbidden = own.flatMap((one) => {
-        const limit = one && forbiddenBy(one.findings);
-        return limit ? [`${one.technique}: ${limit}`] : [];
-      });
-      const impossible = result.findings.map(({ message }) => message);
       return html`<tr><th scope="row">P${result.percentile}, ${formatNumber(result.thickness_mm)} mm</th>
         ${cells(({ sdnr }) => sdnr)}${cells(({ dose }) => dose.incidentAirKerma_mGy)}
         ${right === null ? null : html`<td class="number">${formatRatio(ratioAt(result, 'asSet'))}</td><td class="number">${formatRatio(ratioAt(result, 'sdnr'))}</td>`}
-        ${cells(({ exposure }) => exposure.power_kW)}
-        <td>${[...forbidden, ...impossible].join('; ')}</td></tr>`;
-    })}</tbody></table>`;
+        ${cells(({ exposure }) => exposure.power_kW)}</tr>`;
+    })}</tbody></table>
+    ${results
+      .flatMap((result) =>
+        forbiddenAt(
+          result,
+          shown.map((ink) => techniques[ink]),
+        ),
+      )
+      .map((words) => html`<p class="note forbids">${words}</p>`)}`;
 }

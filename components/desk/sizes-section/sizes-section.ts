@@ -108,7 +108,7 @@ export class SizesSection extends LitElement {
   private caution() {
     const open = this.model.draft.case.techniques.filter(({ control }) => !isCurve(control));
     if (open.length === 0) return nothing;
-    return html`<p class="note"><b>Caution.</b> The room’s exposure control is not modelled for ${open.map(({ name }) => name).join(' and ')}: every size is taken at one potential and filter. Read a control curve to see where a filter is withdrawn.</p>`;
+    return html`<p class="note caution"><b>Caution.</b> The room’s exposure control is not modelled for ${open.map(({ name }) => name).join(' and ')}: every size is taken at one potential and filter. Read a control curve to see where a filter is withdrawn.</p>`;
   }
 
   private outcomes(isStale: boolean) {
@@ -166,7 +166,8 @@ export class SizesSection extends LitElement {
           ${this.outcomes(isStale)}
           <div class="along">${
             hasLine
-              ? html`<h3>Along patient thickness, each as its own control has it</h3>${thicknessChart(data, this.measured.width)}`
+              ? html`<h3>Along patient thickness, each as its own control has it</h3>
+                <p class="note">cross: a limit forbids it there</p>${thicknessChart(data, this.measured.width)}`
               : html`<p class="note">One size: there is nothing to draw along thickness.</p>`
           }</div>
         </div>

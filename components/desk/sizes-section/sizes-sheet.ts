@@ -4,7 +4,7 @@ import { css } from 'lit';
 export const sizesSheet = css`
   .halves {
     display: grid;
-    grid-template-columns: minmax(0, 1fr) 30rem;
+    grid-template-columns: minmax(0, 1fr) 26rem;
     gap: 1.2rem 2.5rem;
     align-items: start;
   }
@@ -18,14 +18,24 @@ export const sizesSheet = css`
   td {
     vertical-align: baseline;
   }
-  th br + * {
-    color: inherit;
+  .halves th,
+  .halves td {
+    padding-inline: 0 0.75rem;
+  }
+  .note.forbids {
+    margin: 0.4rem 0 0;
+  }
+  .note.caution {
+    margin-block: 0.9rem 1rem;
   }
   td .ratio {
     margin: 0;
   }
+  .technique-table {
+    max-height: none;
+  }
   .technique-table tr.first > * {
-    border-block-start: 1px solid var(--soft);
+    border-block-start: 1px solid var(--rule);
   }
   .technique-table tbody tr > * {
     border-block-end: 0;

@@ -13,14 +13,14 @@ export interface AnswerWords {
   readonly forward: string;
 }
 
-/** How a forward run compares with its target. */
+/** How a forward run compares with its target; further off than 1 %, a limit stopped it first. */
 const forwardWords = (name: string, forward: number | null, target: number | null): string => {
   if (forward === null || target === null) return '';
-  const off = forward / target - 1;
+  const off = Math.abs(forward / target - 1);
   const how =
-    Math.abs(off) < 0.01
-      ? `met within ${formatPercent(Math.max(Math.abs(off), 1e-4))}`
-      : `${formatPercent(Math.abs(off))} ${off > 0 ? 'above' : 'below'} it`;
+    off < 0.01
+      ? `met within ${formatEntry(Number(Math.max(100 * off, 0.01).toPrecision(1)))} %`
+      : 'reached and more: a limit stops it first';
   return `Run forward again: ${name} ${formatNumber(forward, 4)}, target ${formatNumber(target, 4)}, ${how}.`;
 };
 
@@ -28,6 +28,7 @@ export function answerWords(c: Case, question: SolveQuestion, given: SolveAnswer
   const { target, forward } = given.answer;
   const sdnr = forwardWords('SdNR', forward, target);
   const agent = c.task.detail.agent?.name ?? 'agent';
+  const stops = given.answer.findings.length > 0 ? 'What stops a thicker one stands below.' : '';
   switch (given.what) {
     case 'bestSetting': {
       const { value } = given.answer;
@@ -60,7 +61,7 @@ export function answerWords(c: Case, question: SolveQuestion, given: SolveAnswer
     case 'thickestPatient': {
       const { value } = given.answer;
       if (!value) return none;
-      return { found: `${formatNumber(value.thickness_mm, 4)} mm`, more: '', forward: sdnr };
+      return { found: `${formatNumber(value.thickness_mm, 4)} mm`, more: stops, forward: sdnr };
     }
   }
 }

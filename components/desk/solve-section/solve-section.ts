@@ -43,7 +43,7 @@ export class SolveSection extends LitElement {
   @state() private hold: HoldConstant = 'sdnr';
   @state() private evenHold: HoldConstant = 'incidentAirKerma';
   @state() private target: number | null = null;
-  @state() private share_percent = 80;
+  @state() private share_percent = 95;
   @state() private thickTarget: number | null = null;
   @state() private thickest_mm = 400;
   @state() private asked: Readonly<Partial<Record<QuestionKind, Asked>>> = {};
@@ -115,7 +115,7 @@ export class SolveSection extends LitElement {
 
   private figure(label: string, value: number, take: (value: number) => void) {
     const text = formatEntry(value);
-    return html`<label class="bare"><span class="unseen">${label}</span><input type="text" inputmode="decimal" autocomplete="off" style="--chars:${Math.max(3, text.length + 1)}" .value=${text} @change=${(
+    return html`<label class="bare"><span class="unseen">${label}</span><input type="text" inputmode="decimal" autocomplete="off" style="--chars:${Math.max(2, text.length)}" .value=${text} @change=${(
       event: Event,
     ) => {
       const input = event.target as HTMLInputElement;
@@ -152,11 +152,11 @@ export class SolveSection extends LitElement {
       <h3>${heading}</h3>
       <p class="ask" @keydown=${(event: KeyboardEvent) => {
         if (event.key === 'Enter' && event.target instanceof HTMLInputElement) event.target.blur();
-      }}>${sentence}
-        <button type="button" class="plain" ?disabled=${this.pool === null} @click=${() =>
-          isRunning
-            ? this.cancel(question.what)
-            : void this.ask(question)}>${isRunning ? 'Cancel' : 'Solve'}</button></p>
+      }}>${sentence}</p>
+      <p class="go"><button type="button" class="plain" ?disabled=${this.pool === null} @click=${() =>
+        isRunning
+          ? this.cancel(question.what)
+          : void this.ask(question)}>${isRunning ? 'Cancel' : 'Solve'}</button></p>
       <div aria-live="polite">${asked ? this.answer(asked) : nothing}</div>
     </div>`;
   }

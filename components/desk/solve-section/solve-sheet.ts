@@ -2,6 +2,9 @@ import { css } from 'lit';
 
 /** Four questions, each a sentence with its answer below. */
 export const solveSheet = css`
+  .note {
+    margin-block-end: 1.1rem;
+  }
   .questions {
     display: grid;
     grid-template-columns: repeat(auto-fit, minmax(min(30rem, 100%), 1fr));
@@ -12,7 +15,7 @@ export const solveSheet = css`
     min-width: 0;
   }
   .ask {
-    margin: 0 0 0.5rem;
+    margin: 0 0 0.2rem;
     line-height: 1.9;
     max-width: 34rem;
   }
@@ -21,11 +24,10 @@ export const solveSheet = css`
     color: var(--ink);
   }
   .ask input[type='text'] {
-    width: calc(var(--chars, 5) * 1ch);
-    text-align: end;
+    width: calc(var(--chars, 5) * 1ch + 2px);
   }
-  .ask button.plain {
-    margin-inline-start: 0.8rem;
+  .go {
+    margin: 0 0 0.6rem;
   }
   .answer {
     border-inline-start: 2px solid var(--rule);

@@ -3,6 +3,7 @@ import { line } from 'd3-shape';
 import { html, nothing, type SVGTemplateResult, svg, type TemplateResult } from 'lit';
 import { formatEntry, formatNumber } from './format.js';
 import { techniqueInk } from './inks.js';
+import { wordsWidth } from './label-places.js';
 import { filterName } from './sweep-map.js';
 
 /** One technique in a patient of one thickness. */
@@ -106,29 +107,31 @@ function panel(
     ${ends.map((end) => svg`<text class="name" x=${width - margin.right + 7} y=${end.y + 4} fill=${techniqueInk(end.ink).color}>${end.name}</text>`)}`;
 }
 
-/** The setting in force along thickness, one line of words per technique. */
+/** One filter after the other as thickness grows; each holds up to where the next begins. */
+const filterRuns = (points: readonly ThicknessPoint[]) => {
+  const runs: { readonly filter: string; readonly from: number; to: number }[] = [];
+  for (const { filter, thickness_mm } of points) {
+    const last = runs.at(-1);
+    if (last) last.to = thickness_mm;
+    if (last?.filter !== filter) runs.push({ filter, from: thickness_mm, to: thickness_mm });
+  }
+  return runs;
+};
+
+/** The filter in force along thickness, one row per technique. */
 function settings(data: ThicknessData, top: number, x: Scale, width: number): SVGTemplateResult {
   return svg`<text class="axis-name" x="0" y=${top - 9}>filter in force</text>
     ${data.lines.map(({ ink, points }, row) => {
       const y = top + row * rowHeight + 6;
       const color = techniqueInk(ink).color;
-      const runs: { filter: string; from: number; to: number }[] = [];
-      for (const { filter, thickness_mm } of points) {
-        const last = runs.at(-1);
-        if (last?.filter === filter) last.to = thickness_mm;
-        else {
-          if (last) last.to = thickness_mm;
-          runs.push({ filter, from: thickness_mm, to: thickness_mm });
-        }
-      }
-      return runs.map(
-        ({
-          filter,
-          from,
-          to,
-        }) => svg`<line x1=${x(from)} x2=${Math.max(x(from) + 2, x(to) - 2)} y1=${y} y2=${y} stroke=${color} stroke-width="2.5" />
-          <text class="name" x=${Math.min(x(from), width - margin.right - 40)} y=${y + 4} fill=${color}>${filterName(filter)}</text>`,
-      );
+      return filterRuns(points).map(({ filter, from, to }) => {
+        const words = filterName(filter);
+        const left = Math.min(x(from), width - margin.right - wordsWidth(words));
+        const start = left + wordsWidth(words);
+        const end = x(to) - 4;
+        return svg`<text x=${left} y=${y + 4} fill=${color}>${words}</text>
+          ${end > start ? svg`<line x1=${start} x2=${end} y1=${y} y2=${y} stroke=${color} stroke-width="2" />` : nothing}`;
+      });
     })}`;
 }
 

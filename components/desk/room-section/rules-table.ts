@@ -4,6 +4,7 @@ import type { Draft } from '../../store/draft.js';
 import type { Json } from '../../store/path.js';
 import { choiceSpec, fieldOf, numberSpec, textSpec } from '../fields/field-specs.js';
 import { addButton, removeButton } from '../fields/list-buttons.js';
+import { shippedRules } from './shipped-rules.js';
 
 const provenances = ['measured', 'entered', 'assumed', 'published', 'recalled', 'computed'];
 
@@ -71,5 +72,5 @@ export function rulesTable(draft: Draft): TemplateResult {
           })}</tbody></table></div>`
         : null
     }
-    <p class="after">${addButton(draft, 'room.rules', rate, 'a kerma rate')} ${addButton(draft, 'room.rules', layer, 'a minimum half-value layer')}</p>`;
+    <p class="after">${addButton(draft, 'room.rules', rate, 'a kerma rate')} ${addButton(draft, 'room.rules', layer, 'a minimum half-value layer')} ${shippedRules()}</p>`;
 }

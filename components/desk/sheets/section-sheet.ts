@@ -85,7 +85,9 @@ export const sectionSheet = css`
   .number {
     text-align: end;
   }
-  button.plain {
+  button.plain,
+  select.plain {
+    appearance: none;
     font: inherit;
     font-size: var(--small);
     color: var(--ink);

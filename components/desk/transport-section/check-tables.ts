@@ -36,16 +36,16 @@ function cells(row: CheckRow, ink: number): TemplateResult {
   return html`<td class="number">${formatNumber(estimate)}</td>
     <td class="number">${formatNumber(value)}</td>
     <td class="number soft">${relative(transport)}</td>
-    <td>${
+    <td class="number">${
       isKnown
-        ? html`<span class="against">${differenceBar(
+        ? html`${differenceBar(
             {
               difference_percent,
               standardError_percent: (100 * standardError) / Math.abs(value),
               tolerance_percent,
             },
             ink,
-          )}<span>${signed(difference_percent, 1)} %</span></span>`
+          )}<span class="against">${signed(difference_percent, 1)} %</span>`
         : nothing
     }</td>
     <td class="number">${z === null ? '–' : signed(z, 1)}</td>`;

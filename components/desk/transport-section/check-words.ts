@@ -19,7 +19,7 @@ export function progressWords({ phase, report, request, message }: CheckState): 
   const flown = `${countText(report?.photons ?? 0)} of ${countText(request.photons)} photons`;
   if (phase === 'cancelled') return `${message}; incomplete: ${flown}`;
   const rate = report?.photonsPerSecond ?? null;
-  const speed = rate === null ? '' : `, ${countText(rate)} a second`;
+  const speed = rate === null ? '' : `, ${countText(Number(rate.toPrecision(3)))} a second`;
   if (phase === 'done') return `${countText(request.photons)} photons${speed}`;
   const left_s =
     rate === null ? null : Math.ceil((request.photons - (report?.photons ?? 0)) / rate);

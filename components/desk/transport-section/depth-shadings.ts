@@ -32,12 +32,15 @@ const depthInks: readonly DepthInk[] = [
       ),
   },
   {
-    quantity: 'first scatter at the detector, by depth',
-    unit: 'of primary per cm',
+    quantity: 'first scatter at the detector',
+    unit: '% of primary/cm',
     scale: 'linear',
     extent: 'beam',
     profileOf: ({ firstScatter }) =>
-      stepProfile(firstScatter.faces_mm, firstScatter.scatterToPrimary_per_cm),
+      stepProfile(
+        firstScatter.faces_mm,
+        firstScatter.scatterToPrimary_per_cm.map((ratio) => 100 * ratio),
+      ),
   },
 ];
 

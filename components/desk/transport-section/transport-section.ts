@@ -1,6 +1,6 @@
 import { html, LitElement, nothing } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
-import type { CheckRequest } from '../../../physics/check-by-transport/index.js';
+import type { CheckReport, CheckRequest } from '../../../physics/check-by-transport/index.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { convergenceChart } from '../../charts/transport-convergence.js';
 import { type DeskModel, sizeShown } from '../model/desk-model.js';
@@ -130,47 +130,49 @@ export class TransportSection extends LitElement {
     </div>`;
   }
 
-  private results(check: CheckState, isStale: boolean) {
-    const { report, fates, tracks, request } = check;
-    if (!report) return nothing;
-    const found = this.model.draft.case.techniques.findIndex(
-      ({ name }) => name === request.technique,
-    );
-    const ink = Math.max(0, found);
-    const charted =
-      this.charted ??
-      Math.max(
-        0,
-        report.rows.findIndex(({ quantity }) => quantity === 'sprBehindGrid'),
-      );
+  private chart(check: CheckState, report: CheckReport, ink: number) {
+    const usual = report.rows.findIndex(({ quantity }) => quantity === 'sprBehindGrid');
+    const charted = this.charted ?? Math.max(0, usual);
     const data = convergenceData(check, report, charted, ink);
+    const choose = (event: Event) => {
+      this.charted = Number((event.target as HTMLSelectElement).value);
+    };
+    return html`<div>
+      <h3><label><span class="unseen">Quantity charted</span><select @change=${choose}>${report.rows.map(
+        (row, i) =>
+          html`<option value=${i} .selected=${i === charted}>${[row.name, row.layer].filter(Boolean).join(', ')}</option>`,
+      )}</select></label></h3>
+      <p class="note">${data.unit ? `${data.unit} per frame as set; ` : ''}line: estimate and its stated band; sign: transport with one and two standard errors</p>
+      ${convergenceChart(data, { width: 360, height: 232 })}
+    </div>`;
+  }
+
+  private paths({ fates, tracks }: CheckState, isStale: boolean) {
+    if (!fates || tracks.length === 0) return nothing;
+    const draw = (event: Event) =>
+      this.tell('draw-tracks', (event.target as HTMLInputElement).checked);
+    return html`<div>
+      <label class="check"><input type="checkbox" .checked=${this.tracksDrawn} ?disabled=${isStale} @change=${draw} />draw the paths of these photons in the stack above</label>
+      ${fateTable(fates)}
+    </div>`;
+  }
+
+  private results(check: CheckState, isStale: boolean) {
+    const { report, request } = check;
+    if (!report) return nothing;
+    const { techniques } = this.model.draft.case;
+    const ink = Math.max(
+      0,
+      techniques.findIndex(({ name }) => name === request.technique),
+    );
     return html`<div class="results ${isStale ? 'stale' : ''}">
       <div class="tables">
         <div class="scroll" tabindex="0" role="region" aria-label="Estimate against transport">${quantityTable(report, ink)}</div>
         <div class="scroll" tabindex="0" role="region" aria-label="Absorbed dose by layer">${layerTable(report, ink)}</div>
         <finding-list .findings=${report.findings} ?stale=${isStale}></finding-list>
       </div>
-      <div>
-        <h3><label><span class="unseen">Quantity charted</span><select @change=${(event: Event) => {
-          this.charted = Number((event.target as HTMLSelectElement).value);
-        }}>${report.rows.map(
-          (row, i) =>
-            html`<option value=${i} .selected=${i === charted}>${[row.name, row.layer].filter(Boolean).join(', ')}</option>`,
-        )}</select></label></h3>
-        <p class="note">${data.unit ? `${data.unit} per frame as set; ` : ''}line: estimate and its stated band; sign: transport with one and two standard errors</p>
-        ${convergenceChart(data, { width: 360, height: 232 })}
-        ${balanceTable(report)}
-        ${
-          fates && tracks.length > 0
-            ? html`<label class="check"><input type="checkbox" .checked=${this.tracksDrawn} ?disabled=${isStale} @change=${(
-                event: Event,
-              ) =>
-                this.tell(
-                  'draw-tracks',
-                  (event.target as HTMLInputElement).checked,
-                )} />draw the paths of these photons in the stack above</label>${fateTable(fates)}`
-            : nothing
-        }
+      <div class="beside">
+        ${this.chart(check, report, ink)} ${balanceTable(report)} ${this.paths(check, isStale)}
       </div>
     </div>`;
   }

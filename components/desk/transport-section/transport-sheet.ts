@@ -25,15 +25,13 @@ export const transportSheet = css`
     line-height: 1.4;
     max-width: 46rem;
   }
-  .against {
-    display: flex;
-    justify-content: end;
-    align-items: center;
-    gap: 0.5em;
+  .difference {
+    overflow: visible;
+    vertical-align: -2px;
   }
-  .against span {
+  .against {
+    display: inline-block;
     min-width: 3.4rem;
-    text-align: end;
   }
   .stated {
     fill: var(--ink);
@@ -69,6 +67,7 @@ export const transportSheet = css`
   }
   .balance,
   .fates {
+    width: 100%;
     margin-block-start: 1rem;
   }
   h3 select {
@@ -84,6 +83,12 @@ export const transportSheet = css`
   @media (max-width: 1199px) {
     .results {
       grid-template-columns: minmax(0, 1fr);
+    }
+    .beside {
+      display: grid;
+      grid-template-columns: repeat(auto-fit, minmax(min(21rem, 100%), 1fr));
+      gap: 0 2rem;
+      align-items: start;
     }
   }
 `;

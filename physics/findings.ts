@@ -63,3 +63,12 @@ export const notYetComputed = (quantities: string): Finding => ({
   message: `Not yet computed: ${quantities}.`,
   value: null,
 });
+
+/** Each sentence once, in order of first saying. */
+export const distinctFindings = (findings: readonly Finding[]): Finding[] => [
+  ...new Map(findings.map((finding) => [finding.message, finding])).values(),
+];
+
+/** The findings that forbid. */
+export const limitsOf = (findings: readonly Finding[]): Finding[] =>
+  findings.filter(({ severity }) => severity === 'limit');

@@ -5,7 +5,7 @@ import { placementOf } from './placement.js';
 import { prepare } from './prepare.js';
 import { solveTubeLoad } from './readout/index.js';
 import type { Finding } from './results.js';
-import { type Setting, settingOf } from './setting.js';
+import { type Setting, settingLabel, settingOf } from './setting.js';
 import { type Yield, yieldOf } from './yield.js';
 
 /** Where a technique stands at a size: its setting in force, its yield, and the load of one frame. */
@@ -21,6 +21,9 @@ export interface OperatingPoint {
 export interface NoPoint {
   readonly findings: readonly Finding[];
 }
+
+/** Detector signal (keV or counts) below which a primary beam is none: no tube makes 10⁹ mAs. */
+const leastSignal_per_mm2_per_mAs = 1e-12;
 
 /**
  * What the room's own exposure control will deliver for a technique at a size: as set. A control
@@ -43,6 +46,10 @@ export const operatingPoint = (
   const { spectrum, findings } = outputBeam(prepare(c), setting.potential_kV, setting.filter);
   if (!spectrum) return { findings };
   const made = yieldOf(c, placement, setting, technique.acquisition, spectrum);
+  if (!(made.readout.signalPrimary_per_mm2_per_mAs > leastSignal_per_mm2_per_mAs)) {
+    const message = `${technique.name}: no primary photon of ${settingLabel(setting)} reaches the detector at ${size.thickness_mm} mm (${size.name}); nothing can be shown.`;
+    return { findings: [...findings, blocked('nothingArrives', message)] };
+  }
   if (isCurve(control)) {
     if (!curve) {
       return {

@@ -1,4 +1,5 @@
 import type { Case } from './case/schema.js';
+import { distinctFindings } from './findings.js';
 import { operatingPoint } from './operating-point.js';
 import type { Finding, HoldConstant } from './results.js';
 import { roomAxes, type SweepAxes } from './sweep/axes.js';
@@ -118,7 +119,7 @@ export const combineSweep = (request: SweepRequest, pieces: readonly SweepPiece[
     },
     investigationalAgent:
       pieces.find(({ investigationalAgent }) => investigationalAgent)?.investigationalAgent ?? null,
-    findings: distinct(pieces.flatMap((piece) => piece.findings)),
+    findings: distinctFindings(pieces.flatMap((piece) => piece.findings)),
   });
 };
 
@@ -128,7 +129,3 @@ export const sweep = (c: Case, request: SweepRequest = wholeRoom(c)): Sweep => {
   const pieces = Array.from({ length: count }, (_, index) => sweepPiece(c, request, index));
   return combineSweep(request, pieces);
 };
-
-const distinct = (findings: readonly Finding[]): Finding[] => [
-  ...new Map(findings.map((finding) => [finding.message, finding])).values(),
-];

@@ -1,6 +1,8 @@
 import { Command } from 'commander';
 import type { Case } from '../../physics/case/index.js';
+import { limitsOf } from '../../physics/findings.js';
 import type { Weighing } from '../../physics/results.js';
+import { sizesOf } from '../../physics/stack/sizes.js';
 import { weigh } from '../../physics/weigh.js';
 import type { Io } from './io.js';
 import { type Format, print } from './print.js';
@@ -37,11 +39,11 @@ const runWeigh = (io: Io, path: string, format: Format): void => {
 };
 
 /** True when a limit forbids a Proposed technique, or it cannot even be computed, at some size. */
-const isForbidden = ({ techniques }: Case, { evaluations }: Weighing): boolean => {
-  const sizes = new Set(evaluations.map(({ size }) => size));
+const isForbidden = ({ techniques, patient }: Case, { evaluations }: Weighing): boolean => {
+  const sizes = sizesOf(patient);
   return techniques.slice(1).some(({ name }) => {
     const own = evaluations.filter(({ technique }) => technique === name);
-    const limits = own.flatMap(({ findings }) => findings.filter((f) => f.severity === 'limit'));
-    return own.length < Math.max(1, sizes.size) || limits.length > 0;
+    const limits = own.flatMap(({ findings }) => limitsOf(findings));
+    return own.length < sizes.length || limits.length > 0;
   });
 };

@@ -8,7 +8,7 @@ import {
   examineReadings,
   requiredMaterial,
 } from './believed-readings.js';
-import { boundedMemo } from './bounded-memo.js';
+import { boundedMemo } from '../numeric/bounded-memo.js';
 import { calibrationFindings } from './calibration-findings.js';
 import { fitTube, outputFactorAt_kV, type TubeFit } from './calibration-fit.js';
 import {

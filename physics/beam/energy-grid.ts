@@ -1,4 +1,4 @@
-import { boundedMemo } from './bounded-memo.js';
+import { boundedMemo } from '../numeric/bounded-memo.js';
 import { kEdge_keV, kLines, lowestLinePotential_kV } from './tungsten-coefficients.js';
 
 /** The channels of a tube beam. One potential and edge set always yields the same object. */

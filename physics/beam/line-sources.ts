@@ -1,4 +1,4 @@
-import { boundedMemo } from './bounded-memo.js';
+import { boundedMemo } from '../numeric/bounded-memo.js';
 import type { Spectrum } from './spectrum.js';
 
 const channelsKept = 64;

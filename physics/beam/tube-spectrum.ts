@@ -1,5 +1,5 @@
 import { elementaryCharge_C, massAttenuationOn } from '../../materials/index.js';
-import { boundedMemo } from './bounded-memo.js';
+import { boundedMemo } from '../numeric/bounded-memo.js';
 import { bremsstrahlung } from './bremsstrahlung.js';
 import { characteristicLine } from './characteristic-lines.js';
 import { type EnergyGrid, energyGrid } from './energy-grid.js';

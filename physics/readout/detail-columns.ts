@@ -17,6 +17,15 @@ const perMm = (material: Material, energies_keV: Float64Array): Float64Array => 
   return massAttenuationOn(material, energies_keV).map((coefficient) => coefficient * scale);
 };
 
+/**
+ * A gas in dense matter gives back more mean free paths than a number can hold, at energies where
+ * the plain stack passes nothing: infinity times nothing is no number. e³⁰⁰ twice over still is one,
+ * and no photon that counts (above 15 keV behind a tube's filter) meets 300 mean free paths in a
+ * detail.
+ */
+const greatestGain = 300;
+const bounded = (exponent: number): number => Math.min(exponent, greatestGain);
+
 /** The central path and every path of a detail on an energy grid. */
 export const detailColumns = (
   detail: PlacedDetail,
@@ -26,8 +35,8 @@ export const detailColumns = (
   const reference = perMm(detail.reference, energies_keV);
   const matter = perMm(detail.matter, energies_keV);
   const along = ({ displaced_mm, detail_mm }: Omit<DetailPath, 'area_mm2'>): PathColumns => {
-    const inPlace = reference.map((mu, i) => Math.exp((layer[i] - mu) * displaced_mm));
-    const depth = matter.map((mu, i) => (mu - reference[i]) * detail_mm);
+    const inPlace = reference.map((mu, i) => Math.exp(bounded((layer[i] - mu) * displaced_mm)));
+    const depth = matter.map((mu, i) => -bounded((reference[i] - mu) * detail_mm));
     return {
       reference: inPlace,
       detail: inPlace.map((share, i) => share * Math.exp(-depth[i])),

@@ -1,4 +1,4 @@
-import { kept } from '../../materials/kept.js';
+import { boundedMemo } from '../numeric/bounded-memo.js';
 
 /** Incident energies the scatter responses are defined for; outside, the end value is held. */
 export const scatterRange_keV: readonly [number, number] = [10, 150];
@@ -28,17 +28,26 @@ export interface EnergyNodes {
   readonly fineIndex: Int32Array;
 }
 
-const made = new Map<string, EnergyNodes>();
+/** Edge sets remembered: a session sees a few; a threshold dragged along sees hundreds. */
+const setsKept = 16;
 
-/** Nodes from 10 to 150 keV with every edge as a doubled node; the same edges give the same object. */
+const nodesBetween = boundedMemo<readonly number[], EnergyNodes>(
+  setsKept,
+  (edges) => edges.join(' '),
+  makeNodes,
+);
+
+/**
+ * Nodes from 10 to 150 keV with every edge as a doubled node; the same edges give the same object
+ * while they are among the last asked for.
+ */
 export function energyNodes(edges_keV: readonly number[]): EnergyNodes {
   const [from, to] = scatterRange_keV;
   const edges = [...new Set(edges_keV)]
     .filter((edge) => edge > from * (1 + 2 * hair) && edge < to)
     .sort((a, b) => a - b)
     .filter((edge, i, all) => i === 0 || edge > all[i - 1] * (1 + 3 * hair));
-  const key = edges.join(' ');
-  return kept(made, key, () => makeNodes(edges));
+  return nodesBetween(edges);
 }
 
 /** True where nodes i and i + 1 enclose an edge, across which nothing is interpolated. */

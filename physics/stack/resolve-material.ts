@@ -18,6 +18,9 @@ interface Resolved {
   readonly mixtures: Map<string, AgentMixture>;
 }
 
+/** More than any case holds at once; what a search for an amount leaves behind is let go. */
+const mixturesKept = 64;
+
 const known = new WeakMap<UserMaterials, Resolved>();
 
 const resolvedIn = (entered: UserMaterials): Resolved =>
@@ -47,7 +50,7 @@ export const resolveMaterial =
 
 /**
  * An agent as it is in the lumen, in its own carrier, the one named, or the agent's usual one.
- * The same request in one case is always the same object.
+ * The same request in one case is the same object while it is among the last few dozen.
  *
  * @throws Error on an unknown agent or carrier, or an amount that would overfill the volume.
  */
@@ -59,7 +62,9 @@ export const resolveAgent = (
   const { name, amount } = request;
   const carrierName = request.carrier ?? carrier ?? agent(name)?.defaultCarrier ?? 'water';
   const key = JSON.stringify([name, amount.value, amount.unit, carrierName]);
-  return kept(resolvedIn(c.materials).mixtures, key, () =>
+  const { mixtures } = resolvedIn(c.materials);
+  if (mixtures.size >= mixturesKept) mixtures.clear();
+  return kept(mixtures, key, () =>
     agentMixture({ agent: name, amount, carrier: resolveMaterial(c)(carrierName) }),
   );
 };

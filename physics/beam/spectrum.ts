@@ -26,8 +26,9 @@ export const withFluence = (spectrum: Spectrum, fluence_per_mm2: Float64Array): 
 });
 
 /** The same beam with every channel multiplied by `factor` (mAs, inverse square, output). */
-export const scaleSpectrum = (spectrum: Spectrum, factor: number): Spectrum =>
-  withFluence(
-    spectrum,
-    spectrum.fluence_per_mm2.map((fluence) => fluence * factor),
-  );
+export const scaleSpectrum = (spectrum: Spectrum, factor: number): Spectrum => {
+  // A loop: `map` on typed arrays took a third of a sweep.
+  const scaled = new Float64Array(spectrum.fluence_per_mm2.length);
+  for (let i = 0; i < scaled.length; i++) scaled[i] = spectrum.fluence_per_mm2[i] * factor;
+  return withFluence(spectrum, scaled);
+};

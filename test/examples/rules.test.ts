@@ -27,7 +27,8 @@ const columns: Readonly<Record<string, RegExp>> = {
 const rowsOf = (file: string) =>
   readReference('min_hvl.csv').flatMap((row) => {
     const [, potential] = columns[file].exec(row.item) ?? [];
-    return potential === undefined ? [] : [{ ...row, potential_kV: Number(potential) }];
+    const { value, provenance } = row;
+    return potential === undefined ? [] : [{ value, provenance, potential_kV: Number(potential) }];
   });
 
 describe('the shipped rules', () => {

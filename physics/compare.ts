@@ -1,5 +1,6 @@
 import { type Weighed, weighedAt } from './at-load.js';
 import type { Case } from './case/schema.js';
+import { findingsOf } from './findings.js';
 import { numberText } from './number-text.js';
 import type { OperatingPoint } from './operating-point.js';
 import { sdnrAt, solveTubeLoad } from './readout/index.js';
@@ -36,7 +37,10 @@ export const compare = (c: Case, from: OperatingPoint, to: OperatingPoint): Comp
     size: from.size.name,
     from: from.technique.name,
     to: to.technique.name,
-    rows: withDisagreement(rows, to.technique.name, c.compare.sdnrMargin_percent),
+    rows: withDisagreement(rows, c.compare.sdnrMargin_percent).map((row) => ({
+      ...row,
+      findings: findingsOf(row.findings, to.technique.name, from.size.name),
+    })),
   };
 };
 
@@ -100,7 +104,7 @@ const compareRow = (
     const unreachable: Finding = {
       code: 'equalityUnreachable',
       severity: 'caution',
-      message: `${to.technique.name} cannot reach ${holdConstantWords[holdConstant]}: ${load.reason}`,
+      message: `Cannot reach ${holdConstantWords[holdConstant]}: ${load.reason}`,
       value: null,
     };
     return { holdConstant, ratio: ratiosOf(null, base), findings: [unreachable] };
@@ -118,7 +122,6 @@ const claimsSaving: readonly HoldConstant[] = ['asSet', 'detectorAirKerma', 'det
  */
 const withDisagreement = (
   rows: readonly ComparisonRow[],
-  name: string,
   sdnrMargin_percent: number,
 ): ComparisonRow[] => {
   const atEqualSdnr =
@@ -137,7 +140,7 @@ const withDisagreement = (
       findings.push({
         code: 'equalitiesDisagree',
         severity: 'caution',
-        message: `${name} has less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(row.holdConstant)}, ${otherwise}.`,
+        message: `Less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(row.holdConstant)}, ${otherwise}.`,
         value: incidentAirKerma,
         bound: atEqualSdnr,
       });

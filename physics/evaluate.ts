@@ -1,7 +1,7 @@
 import { doseAt, exposureAt, figureOfMeritAt } from './at-load.js';
 import { beamQuality } from './beam/index.js';
 import type { Case } from './case/schema.js';
-import { notYetComputed } from './findings.js';
+import { findingsOf, notYetComputed } from './findings.js';
 import { framesPerRun } from './frames.js';
 import { nearestAllowedWords } from './limits/nearest-allowed.js';
 import { isAllowedBySetting, isOfSetting, limitFindings } from './limits.js';
@@ -63,23 +63,27 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
     },
     exposure,
     figureOfMerit: figureOfMeritAt(c, made, dose, tubeLoad_mAs),
-    findings: withNearest(c, point, [
-      ...point.findings,
-      ...placement.findings,
-      ...limitFindings({
-        case: c,
-        setting,
-        mode: acquisition.mode,
-        framesPerRun: framesPerRun(acquisition),
-        exposure,
-        halfValueLayer_mmAl: beam.halfValueLayers[0].first_mm,
-        sourceToSkin_mm: stack.sourceToSkin_mm,
-        detectorAirKerma_uGy,
-        incidentAirKermaRate_mGy_per_min: dose.incidentAirKermaRate_mGy_per_min,
-        path,
-      }),
-      ...missing(dose.energyImparted_mJ),
-    ]),
+    findings: findingsOf(
+      withNearest(c, point, [
+        ...point.findings,
+        ...placement.findings,
+        ...limitFindings({
+          case: c,
+          setting,
+          mode: acquisition.mode,
+          framesPerRun: framesPerRun(acquisition),
+          exposure,
+          halfValueLayer_mmAl: beam.halfValueLayers[0].first_mm,
+          sourceToSkin_mm: stack.sourceToSkin_mm,
+          detectorAirKerma_uGy,
+          incidentAirKermaRate_mGy_per_min: dose.incidentAirKermaRate_mGy_per_min,
+          path,
+        }),
+        ...missing(dose.energyImparted_mJ),
+      ]),
+      technique.name,
+      size.name,
+    ),
   };
 };
 

@@ -51,7 +51,9 @@ export const techniqueFindings = (technique: Technique, path: string): Finding[]
         {
           code: 'controlNotModelled',
           severity: 'caution',
-          message: `${technique.name}: the room's exposure control is not modelled; every size is taken at the same setting. Enter a control curve to see where a filter is withdrawn.`,
+          technique: technique.name,
+          message:
+            "The room's exposure control is not modelled; every size is taken at the same setting. Enter a control curve to see where a filter is withdrawn.",
           path: `${path}.control`,
         },
       ];
@@ -64,9 +66,22 @@ export const notYetComputed = (quantities: string): Finding => ({
   value: null,
 });
 
+/** Whose a finding is, and where: the same finding said of a technique at a size. */
+export const findingsOf = (
+  findings: readonly Finding[],
+  technique: string,
+  size: string,
+): Finding[] => findings.map((finding) => ({ ...finding, technique, size }));
+
+/** A finding as it is read on its own: `Proposed, P75: needs 75.2 kW …`. */
+export const findingWords = ({ technique, size, message }: Finding): string => {
+  const whose = [technique, size].filter((name) => name !== undefined).join(', ');
+  return whose ? `${whose}: ${message}` : message;
+};
+
 /** Each sentence once, in order of first saying. */
 export const distinctFindings = (findings: readonly Finding[]): Finding[] => [
-  ...new Map(findings.map((finding) => [finding.message, finding])).values(),
+  ...new Map(findings.map((finding) => [findingWords(finding), finding])).values(),
 ];
 
 /** The findings that forbid. */

@@ -47,15 +47,13 @@ export const operatingPoint = (
   if (!spectrum) return { findings };
   const made = yieldOf(c, placement, setting, technique.acquisition, spectrum);
   if (!(made.readout.signalPrimary_per_mm2_per_mAs > leastSignal_per_mm2_per_mAs)) {
-    const message = `${technique.name}: no primary photon of ${settingLabel(setting)} reaches the detector at ${size.thickness_mm} mm (${size.name}); nothing can be shown.`;
+    const message = `No primary photon of ${settingLabel(setting)} reaches the detector at ${size.thickness_mm} mm; nothing can be shown.`;
     return { findings: [...findings, blocked('nothingArrives', message)] };
   }
   if (isCurve(control)) {
     if (!curve) {
       return {
-        findings: [
-          blocked('controlCurveEmpty', `${technique.name}: the control curve has no rows.`),
-        ],
+        findings: [blocked('controlCurveEmpty', 'The control curve has no rows.')],
       };
     }
     const { tubeCurrent_mA, exposureTime_ms } = curve;
@@ -74,7 +72,7 @@ export const operatingPoint = (
   const load = solveTubeLoad(made.readout, made.dose.incidentAirKerma_mGy, hold, target);
   return load.tubeLoad_mAs === null
     ? {
-        findings: [...findings, blocked('controlUnreachable', `${technique.name}: ${load.reason}`)],
+        findings: [...findings, blocked('controlUnreachable', load.reason)],
       }
     : { technique, size, made, tubeLoad_mAs: load.tubeLoad_mAs, findings };
 };
@@ -100,7 +98,7 @@ const withdrawn = (technique: Technique, setting: Setting, size: Size): Finding[
         {
           code: 'filterWithdrawn',
           severity: 'caution',
-          message: `${technique.name}: at ${size.thickness_mm} mm (${size.name}) the control curve uses filter ${setting.filter} instead of ${technique.filter}.`,
+          message: `At ${size.thickness_mm} mm the control curve uses filter ${setting.filter} instead of ${technique.filter}.`,
           value: setting.filter,
           bound: technique.filter,
         },

@@ -11,7 +11,10 @@ export type Severity = 'limit' | 'caution' | 'note';
 export interface Finding {
   readonly code: string;
   readonly severity: Severity;
+  /** A sentence that stands without its technique's and size's names; `findingWords` adds them. */
   readonly message: string;
+  readonly technique?: string;
+  readonly size?: string;
   readonly path?: string;
   readonly value?: number | string | null;
   readonly bound?: number | string | null;

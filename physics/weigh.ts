@@ -3,7 +3,7 @@ import type { ParsedCase } from './case/parse.js';
 import type { Size } from './case/schema.js';
 import { compare } from './compare.js';
 import { evaluate } from './evaluate.js';
-import { caseFindings, distinctFindings, techniqueFindings } from './findings.js';
+import { caseFindings, distinctFindings, findingsOf, techniqueFindings } from './findings.js';
 import { type OperatingPoint, operatingPoint } from './operating-point.js';
 import { prepare } from './prepare.js';
 import type { Comparison, Evaluation, Finding, Weighing } from './results.js';
@@ -32,7 +32,7 @@ export const weigh = (
     const points = c.techniques.map((technique) => operatingPoint(c, technique, size));
     points.forEach((point, index) => {
       if ('made' in point) evaluations.push(evaluate(c, point, index));
-      else findings.push(...point.findings);
+      else findings.push(...findingsOf(point.findings, c.techniques[index].name, size.name));
     });
     const [current, ...proposed] = points;
     if (!('made' in current)) continue;

@@ -1,3 +1,4 @@
+import { findingWords } from '../../physics/findings.js';
 import type {
   Calibration,
   Comparison,
@@ -84,20 +85,35 @@ const comparisonTable = ({ size, from, to, rows }: Comparison): string =>
   });
 
 const findingsText = ({ findings, evaluations, comparisons }: Weighing): string => {
-  const lines = [
-    ...findings.map((finding) => line(finding)),
-    ...evaluations.flatMap(({ technique, size, findings: own }) =>
-      own.map((finding) => line(finding, `${technique}, ${size}`)),
-    ),
-    ...comparisons.flatMap(({ to, size, rows }) =>
-      rows.flatMap(({ findings: own }) => own.map((finding) => line(finding, `${to}, ${size}`))),
-    ),
+  const said = [
+    ...findings,
+    ...evaluations.flatMap((evaluation) => evaluation.findings),
+    ...comparisons.flatMap(({ rows }) => rows.flatMap((row) => row.findings)),
   ];
-  return lines.length === 0 ? '' : `Findings\n${[...new Set(lines)].join('\n')}\n`;
+  const sizes = new Set(evaluations.map(({ size }) => size)).size;
+  const lines = alike(said).map((group) => line(group, sizes));
+  return lines.length === 0 ? '' : `Findings\n${lines.join('\n')}\n`;
 };
 
-const line = ({ severity, message }: Finding, about?: string): string =>
-  `  ${severity}: ${about ? `${about}: ` : ''}${message}`;
+/** Findings that say the same of one technique at several sizes, together; limits first. */
+const alike = (findings: readonly Finding[]): Finding[][] => {
+  const groups = new Map<string, Finding[]>();
+  for (const finding of findings) {
+    const key = `${finding.technique}|${finding.severity}|${finding.message}`;
+    groups.set(key, [...(groups.get(key) ?? []), finding]);
+  }
+  const rank = ['limit', 'caution', 'note'];
+  return [...groups.values()].sort(
+    ([a], [b]) => rank.indexOf(a.severity) - rank.indexOf(b.severity),
+  );
+};
+
+const line = (group: readonly Finding[], sizes: number): string => {
+  const [first] = group;
+  const names = [...new Set(group.flatMap(({ size }) => size ?? []))];
+  const where = names.length > 1 && names.length === sizes ? 'every size' : names.join(', ');
+  return `  ${first.severity}: ${findingWords({ ...first, size: where || undefined })}`;
+};
 
 const assumedText = (assumed: readonly string[]): string =>
   assumed.length === 0 ? '' : `Assumed because the case is silent\n  ${assumed.join('\n  ')}\n`;

@@ -163,6 +163,7 @@ function readRecord(
       if (value === null) return `${key}: ${cell}: is not a number`;
       // Fifteen digits: 0.295 cm is 2.95 mm, not 2.9499999999999997 mm.
       const converted = Number((value * place.factor).toPrecision(15));
+      if (!Number.isFinite(converted)) return `${key}: ${cell}: is too large`;
       const { min = Number.NEGATIVE_INFINITY, max = Number.POSITIVE_INFINITY } = column;
       if (!(converted >= min && converted <= max)) {
         return `${key}: ${cell}: must be ${min} to ${max} ${column.unit}`;

@@ -131,6 +131,15 @@ describe('the other tables of a case', () => {
 });
 
 describe('any table', () => {
+  test('refuses a number too large to be converted or rounded', () => {
+    const reason = (text: string) => parseSizesCsv(`thickness (m)\n${text}`).badRows[0]?.reason;
+    expect(reason('1.7976931348623157e308')).toBe(
+      'thickness_mm: 1.7976931348623157e308: is too large',
+    );
+    const columns = { a: { kind: 'number', names: [], unit: 'number' } } as const;
+    expect(readColumns('a\n1.7976931348623151e+308', columns).rows).toEqual([]);
+  });
+
   test('keeps every line: each is a row, a bad row, a comment or empty', () => {
     const cell = fc.oneof(fc.double({ noNaN: true }).map(String), fc.string({ maxLength: 8 }));
     const line = fc.array(cell, { minLength: 1, maxLength: 4 }).map((cells) => cells.join(','));

@@ -32,7 +32,7 @@ export function quantity(id: string): Quantity {
 export const ratioNames: readonly (readonly [keyof Ratios, string])[] = [
   ['incidentAirKerma', 'incident air kerma'],
   ['entranceSurfaceAirKerma', 'entrance surface air kerma'],
-  ['kermaAreaProduct', 'kerma-area product'],
+  ['kermaAreaProduct', 'kerma–area product'],
   ['energyImparted', 'energy imparted'],
   ['meanAbsorbedDose', 'mean absorbed dose'],
   ['tubeLoad', 'tube load'],

@@ -1,12 +1,6 @@
+import { holdConstantWords } from '../../physics/compare.js';
 import { findingWords } from '../../physics/findings.js';
-import type {
-  Calibration,
-  Comparison,
-  Finding,
-  HoldConstant,
-  Ratios,
-  Weighing,
-} from '../../physics/results.js';
+import type { Calibration, Comparison, Finding, Ratios, Weighing } from '../../physics/results.js';
 import { shown } from './numbers.js';
 import { plainTableText } from './plain-table.js';
 import { sizeTables } from './weigh-size-tables.js';
@@ -54,15 +48,6 @@ const calibrationTable = (calibration: Calibration): string =>
     ]),
   });
 
-const holdingWords: Readonly<Record<HoldConstant, string>> = {
-  asSet: 'as set',
-  sdnr: 'SdNR',
-  detectorAirKerma: 'detector air kerma',
-  detectorSignal: 'detector signal',
-  incidentAirKerma: 'incident air kerma',
-  tubeLoad: 'tube load',
-};
-
 const ratioColumns: readonly (readonly [keyof Ratios, string])[] = [
   ['sdnr', 'SdNR'],
   ['incidentAirKerma', 'incident kerma'],
@@ -77,9 +62,9 @@ const ratioColumns: readonly (readonly [keyof Ratios, string])[] = [
 const comparisonTable = ({ size, from, to, rows }: Comparison): string =>
   plainTableText({
     title: `${to} over ${from}, size ${size}`,
-    headings: ['held constant', ...ratioColumns.map(([, heading]) => heading)],
+    headings: ['condition', ...ratioColumns.map(([, heading]) => heading)],
     rows: rows.map(({ holdConstant, ratio }) => [
-      holdingWords[holdConstant],
+      holdConstantWords[holdConstant],
       ...ratioColumns.map(([key]) => shown(ratio[key], 3)),
     ]),
   });

@@ -8,6 +8,7 @@ import type { SweepSetting } from '../../physics/sweep/sweep-setting.js';
 import type { CheckStart } from './check-start.js';
 import type { EvaluationHost } from './evaluation-host.js';
 import type { ScanRequest } from './scan-slice.js';
+import { WorkerLost } from './worker-lost.js';
 
 /** The evaluation worker as async functions. Every promise settles, also when the worker dies. */
 export interface Evaluator {
@@ -19,9 +20,6 @@ export interface Evaluator {
   readonly check: (request: CheckRequest) => Promise<CheckStart | NoCheck>;
   readonly end: () => void;
 }
-
-/** The worker stopped: out of memory, or its script could not be had. */
-export class WorkerLost extends Error {}
 
 /**
  * Starts the worker that `make` gives, and another one whenever one is lost. Calls under way when

@@ -1,7 +1,7 @@
 import type { ParsedCase } from '../../physics/case/index.js';
 import { type AnswerTo, type RoomTask, thicknessOf } from '../../physics/sweep/room-task.js';
-import { WorkerLost } from './evaluator.js';
 import type { FromSweepWorker, SweepWorker } from './sweep-messages.js';
+import { WorkerLost } from './worker-lost.js';
 
 /** How a run of tasks is to be done. */
 export interface RunOptions<T extends RoomTask> {

@@ -5,8 +5,8 @@ import {
   transportBatches,
 } from '../../physics/jobs/index.js';
 import type { TransportInput, TransportScores } from '../../physics/transport/index.js';
-import { WorkerLost } from './evaluator.js';
 import type { FromTransportWorker, TransportWorker } from './transport-messages.js';
+import { WorkerLost } from './worker-lost.js';
 
 /** How far a run has come. */
 export interface TransportProgress {

@@ -35,7 +35,7 @@ export const doseQuantities = inGroup('dose', [
   },
   {
     id: 'kermaAreaProduct',
-    name: 'Kerma-area product',
+    name: 'Kerma–area product',
     unit: 'Gy cm²',
     per: 'per frame',
     of: (e) => e.dose.kermaAreaProduct_Gycm2,
@@ -83,10 +83,10 @@ export const doseQuantities = inGroup('dose', [
   },
   {
     id: 'runKermaAreaProduct',
-    name: 'Kerma-area product',
+    name: 'Kerma–area product',
     unit: 'Gy cm²',
     per: 'per run',
     of: (e) => e.dose.perRun.kermaAreaProduct_Gycm2,
-    words: 'Kerma-area product per frame times all frames of the run, masks counted.',
+    words: 'Kerma–area product per frame times all frames of the run, masks counted.',
   },
 ]);

@@ -12,10 +12,10 @@ export const meritQuantities = inGroup('merit', [
   },
   {
     id: 'meritKap',
-    name: 'SdNR² per kerma-area product',
+    name: 'SdNR² per kerma–area product',
     unit: '/(Gy cm²)',
     of: (e) => e.figureOfMerit.perKermaAreaProduct_per_Gycm2,
-    words: 'SdNR squared over kerma-area product per frame.',
+    words: 'SdNR squared over kerma–area product per frame.',
   },
   {
     id: 'meritTube',

@@ -1,6 +1,6 @@
 import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
-import type { HoldConstant } from '../../../physics/results.js';
+import { holdConstants, holdConstantWords } from '../../../physics/compare.js';
 import { formatNumber, formatRatio } from '../../charts/format.js';
 import { techniqueInk } from '../../charts/inks.js';
 import { ratioNames } from '../../charts/quantities.js';
@@ -11,15 +11,6 @@ import { comparisonOf, type DeskModel, evaluationOf, sizeShown } from '../model/
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { ratioSheet } from '../sheets/ratio-sheet.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
-
-const equalities: readonly (readonly [HoldConstant, string])[] = [
-  ['asSet', 'as set'],
-  ['sdnr', 'equal SdNR'],
-  ['detectorAirKerma', 'equal detector air kerma'],
-  ['detectorSignal', 'equal detector signal'],
-  ['incidentAirKerma', 'equal incident air kerma'],
-  ['tubeLoad', 'equal tube load'],
-];
 
 /**
  * The balance: what Proposed gains and costs under every equality, what reaches the detail, and what
@@ -59,10 +50,10 @@ export class BalanceSection extends LitElement {
     );
     return html`<div class="scroll" tabindex="0" role="region" aria-label="Ratios under every equality"><table>
       <caption>${comparison.to} over ${comparison.from}, size ${comparison.size}; bars about 1, a quarter to four times, logarithmic</caption>
-      <thead><tr><td></td>${equalities.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>
+      <thead><tr><td></td>${holdConstants.map((hold) => html`<th scope="col">${holdConstantWords[hold]}</th>`)}</tr></thead>
       <tbody>${known.map(
         ([key, name]) =>
-          html`<tr><th scope="row">${name}</th>${equalities.map(([hold]) => {
+          html`<tr><th scope="row">${name}</th>${holdConstants.map((hold) => {
             const ratio =
               comparison.rows.find((row) => row.holdConstant === hold)?.ratio[key] ?? null;
             return html`<td>${ratioBar(ratio, color)}</td>`;

@@ -1,18 +1,12 @@
 import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property } from 'lit/decorators.js';
+import { holdConstantWords } from '../../../physics/compare.js';
 import type { ComparisonRow, HoldConstant, Ratios } from '../../../physics/results.js';
 import { formatRatio } from '../../charts/format.js';
 import { ratioNames } from '../../charts/quantities.js';
 import { comparisonOf, type DeskModel } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
-
-/** The equalities the margin shows. */
-export const marginColumns: readonly (readonly [HoldConstant, string])[] = [
-  ['asSet', 'as set'],
-  ['sdnr', 'equal SdNR'],
-  ['detectorAirKerma', 'equal detector air kerma'],
-  ['incidentAirKerma', 'equal incident air kerma'],
-];
+import { marginHolds } from './margin-holds.js';
 
 /** What the margin has room for, besides the dose the case leads with; Balance shows all. */
 const inMargin: readonly (keyof Ratios)[] = [
@@ -73,11 +67,11 @@ export class ComparisonTable extends LitElement {
     );
     return html`<table class=${this.model.stale ? 'stale' : ''}>
       <caption class="unseen">Ratios of ${comparison.to} to ${comparison.from}, size ${comparison.size}</caption>
-      <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${marginColumns.map(([, words]) => html`<th scope="col">${words}</th>`)}</tr></thead>
+      <thead><tr><th scope="col">${comparison.to} over ${comparison.from}</th>${marginHolds.map((hold) => html`<th scope="col">${holdConstantWords[hold]}</th>`)}</tr></thead>
       <tbody>${known.map(
         ([key, name]) =>
-          html`<tr><th scope="row">${name}</th>${marginColumns.map(
-            ([hold]) => html`<td>${formatRatio(rowOf(hold)?.ratio[key]).replace('×', '')}</td>`,
+          html`<tr><th scope="row">${name}</th>${marginHolds.map(
+            (hold) => html`<td>${formatRatio(rowOf(hold)?.ratio[key]).replace('×', '')}</td>`,
           )}</tr>`,
       )}</tbody>
     </table>`;

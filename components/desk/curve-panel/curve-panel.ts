@@ -1,5 +1,9 @@
 import { css, html, LitElement, nothing } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import type { Case } from '../../../physics/case/schema.js';
+import { holdConstantWords } from '../../../physics/compare.js';
+import type { HoldConstant } from '../../../physics/results.js';
+import { costs } from '../../../physics/sweep/costs.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { type DoseCurveData, doseCurve, pointsAt } from '../../charts/dose-curve.js';
 import { doseCurveTable } from '../../charts/dose-curve-table.js';
@@ -14,20 +18,16 @@ const values = [
   { value: 'detectedContrast', words: 'detected contrast' },
   { value: 'subjectContrast', words: 'subject contrast' },
 ];
-const doses = [
-  { value: 'incidentAirKerma', words: 'incident air kerma' },
-  { value: 'kermaAreaProduct', words: 'kerma-area product' },
-  { value: 'entranceSurfaceAirKerma', words: 'entrance surface air kerma' },
-  { value: 'energyImparted', words: 'energy imparted' },
-  { value: 'meanAbsorbedDose', words: 'mean absorbed dose' },
+const primaryDoses: readonly Case['compare']['primaryDose'][] = [
+  'incidentAirKerma',
+  'kermaAreaProduct',
+  'entranceSurfaceAirKerma',
+  'energyImparted',
+  'meanAbsorbedDose',
 ];
+const doses = primaryDoses.map((value) => ({ value, words: costs[value].words }));
 /** What the scan can hold equal while potential varies. */
-export const holds = [
-  { value: 'detectorAirKerma', words: 'detector air kerma' },
-  { value: 'sdnr', words: 'SdNR' },
-  { value: 'incidentAirKerma', words: 'incident air kerma' },
-  { value: 'tubeLoad', words: 'tube load' },
-];
+const holds: readonly HoldConstant[] = ['detectorAirKerma', 'sdnr', 'incidentAirKerma', 'tubeLoad'];
 
 /**
  * The contrast-versus-dose curve: what is shown against what it costs as potential varies.
@@ -43,7 +43,7 @@ export const holds = [
 export class CurvePanel extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
   @property({ attribute: false }) scan: readonly SweepSetting[] | null = null;
-  @property() hold = 'detectorAirKerma';
+  @property() hold: HoldConstant = 'detectorAirKerma';
   @property({ type: Boolean }) stale = false;
   @property({ type: Number }) width = 360;
   @property({ type: Number }) height = 250;
@@ -112,23 +112,23 @@ export class CurvePanel extends LitElement {
     const potentials = this.range;
     const from = potentials[0] ?? 0;
     const to = potentials.at(-1) ?? 0;
-    const words = holds.find(({ value }) => value === this.hold)?.words ?? this.hold;
-    const data = curveData(model, scan ?? [], `equal ${words}`);
+    const words = holdConstantWords[this.hold];
+    const data = curveData(model, scan ?? [], words);
     const { value, dose } = curveAxes(draft.case);
     const choose = (chosen: Event) => {
       const detail = (chosen.target as HTMLSelectElement).value;
       this.dispatchEvent(new CustomEvent('choose-hold', { detail, bubbles: true, composed: true }));
     };
     return html`<section aria-labelledby="title">
-      <h2 id="title" aria-label="${value.name} of the ${draft.case.task.detail.shape}, by ${dose.name.toLowerCase()}, at equal ${words}">
+      <h2 id="title" aria-label="${value.name} of the ${draft.case.task.detail.shape}, by ${dose.name.toLowerCase()}, at ${words}">
         <choice-field inline .draft=${draft} path="compare.leading" label="Shown" .choices=${values}></choice-field>
         of the ${draft.case.task.detail.shape}, by
         <choice-field inline .draft=${draft} path="compare.primaryDose" label="Dose" .choices=${doses}></choice-field>
       </h2>
-      <p class="condition">each line: potential ${from ? `${from}–${to} kV` : ''} at equal
+      <p class="condition">each line: potential ${from ? `${from}–${to} kV` : ''} at
         <label class="bare"><span class="unseen">Held constant</span><select @change=${choose}>${holds.map(
           (entry) =>
-            html`<option value=${entry.value} ?selected=${entry.value === this.hold}>${entry.words}</option>`,
+            html`<option value=${entry} ?selected=${entry === this.hold}>${holdConstantWords[entry]}</option>`,
         )}</select></label>, size ${sizeShown(model).name}</p>
       ${
         scan === null
@@ -142,7 +142,7 @@ export class CurvePanel extends LitElement {
             <output>${this.reading(data)}</output>
             <details><summary>The same as a table</summary>${doseCurveTable(data)}</details>`
       }
-      ${data.marks.length === 0 && scan !== null ? html`<p class="condition">This dose is not computed yet.</p>` : nothing}
+      ${data.marks.length === 0 && scan !== null ? html`<p class="condition">No technique shown can be computed at this size.</p>` : nothing}
     </section>`;
   }
 }

@@ -12,13 +12,13 @@ const foldedFrom = 3;
  * Findings as sentences in the margin, limits first, notes folded where they are many; severity is a
  * word and a mark.
  *
- * Properties: `findings` (said once each), `techniques` (names sentences begin with), `stale`. Events: none.
+ * Properties: `findings` (said once each), `size` (the size looked at, which no sentence names), `stale`. Events: none.
  * Keyboard: none. Parts: none.
  */
 @customElement('finding-list')
 export class FindingList extends LitElement {
   @property({ attribute: false }) findings: readonly Finding[] = [];
-  @property({ attribute: false }) techniques: readonly string[] = [];
+  @property() size = '';
   @property({ type: Boolean, reflect: true }) stale = false;
 
   static override styles = css`
@@ -80,7 +80,7 @@ export class FindingList extends LitElement {
     html`<li class=${severity}><b>${words[severity]}.</b> ${message}</li>`;
 
   override render() {
-    const merged = mergedFindings(this.findings, this.techniques);
+    const merged = mergedFindings(this.findings, this.size);
     if (merged.length === 0) return nothing;
     const pressing = merged.filter(({ severity }) => severity !== 'note');
     const sorted = pressing.sort((a, b) => order.indexOf(a.severity) - order.indexOf(b.severity));

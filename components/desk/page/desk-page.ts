@@ -1,15 +1,15 @@
 import { html, LitElement, nothing } from 'lit';
 import { customElement, property, query, state } from 'lit/decorators.js';
 import type { Fault } from '../../../physics/case/index.js';
-import type { Evaluation, Finding } from '../../../physics/results.js';
+import type { HoldConstant } from '../../../physics/results.js';
 import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import type { SweepPool } from '../../workers/sweep-pool.js';
-import { marginColumns } from '../comparison-table/comparison-table.js';
 import type { DeskCommand } from '../desk-header/desk-header.js';
 import type { ExplainCard } from '../explain-card/explain-card.js';
 import type { ExplainRequest } from '../figure-value/figure-value.js';
-import { comparisonOf, type DeskModel, evaluationOf } from '../model/desk-model.js';
+import type { DeskModel } from '../model/desk-model.js';
 import type { CheckState } from '../transport-section/check-state.js';
+import { findingsShown } from './findings-shown.js';
 import type { Paper } from './paper.js';
 import { sectionInView } from './section-in-view.js';
 import { whenIdle } from './when-idle.js';
@@ -30,38 +30,6 @@ import '../sweep-section/sweep-section.js';
 import '../task-section/task-section.js';
 import '../techniques-section/techniques-section.js';
 import '../transport-section/transport-section.js';
-
-/** Whether a finding with this path is about the case or one of the techniques shown. */
-const concerns = ({ left, right }: DeskModel, path = ''): boolean => {
-  const technique = /^techniques\[(\d+)\]/.exec(path)?.[1];
-  return technique === undefined || [left, right].includes(Number(technique));
-};
-
-/** Findings of an evaluation, each saying whose it is; at another size than that looked at, also where. */
-const named = ({ technique, size, findings }: Evaluation, here: boolean): Finding[] =>
-  findings.map((finding) =>
-    here && finding.message.includes(technique)
-      ? finding
-      : {
-          ...finding,
-          message: `${technique}${here ? '' : `, size ${size}`}: ${lowerFirst(finding.message)}`,
-        },
-  );
-
-const lowerFirst = (text: string): string =>
-  /^[A-Z][a-z]/.test(text) ? text[0].toLowerCase() + text.slice(1) : text;
-
-/** What forbids the techniques shown at sizes other than the one looked at. */
-const elsewhere = ({ others, draft, left, right }: DeskModel): Finding[] => {
-  const shown = [left, right].map((index) =>
-    index === null ? null : draft.case.techniques[index].name,
-  );
-  return others
-    .flatMap(({ evaluations }) => evaluations)
-    .filter(({ technique }) => shown.includes(technique))
-    .flatMap((evaluation) => named(evaluation, false))
-    .filter(({ severity }) => severity === 'limit');
-};
 
 /** The sections of the working paper that are built, in their order. */
 export const sections = [
@@ -87,7 +55,7 @@ export class DeskPage extends LitElement {
   @property({ attribute: false }) model!: DeskModel;
   @property({ attribute: false }) scan: readonly SweepSetting[] | null = null;
   @property({ type: Boolean }) curveStale = false;
-  @property() hold = 'detectorAirKerma';
+  @property() hold: HoldConstant = 'detectorAirKerma';
   @property({ attribute: false }) examples: readonly string[] = [];
   @property({ type: Boolean }) canUndo = false;
   @property({ type: Boolean }) canRedo = false;
@@ -136,21 +104,6 @@ export class DeskPage extends LitElement {
     this.stopWatching();
   }
 
-  private findings(): Finding[] {
-    const { model } = this;
-    return [
-      ...[model.left, model.right].flatMap((index) => {
-        const evaluation = evaluationOf(model, index);
-        return evaluation ? named(evaluation, true) : [];
-      }),
-      ...(comparisonOf(model)?.rows ?? [])
-        .filter(({ holdConstant }) => marginColumns.some(([hold]) => hold === holdConstant))
-        .flatMap((row) => row.findings),
-      ...(model.weighing?.findings ?? []).filter(({ path }) => concerns(model, path)),
-      ...elsewhere(model),
-    ];
-  }
-
   private head() {
     const { faults } = this.model.draft;
     const count = faults.length === 1 ? 'One fault stands' : `${faults.length} faults stand`;
@@ -180,7 +133,7 @@ export class DeskPage extends LitElement {
           <curve-panel .model=${model} .scan=${this.scan} .hold=${this.hold} ?stale=${this.curveStale}></curve-panel>
           <div>
             <comparison-table .model=${model}></comparison-table>
-            <finding-list .findings=${this.findings()} .techniques=${model.draft.case.techniques.map(({ name }) => name)} ?stale=${model.stale}></finding-list>
+            <finding-list .findings=${findingsShown(model)} .size=${model.sizeName} ?stale=${model.stale}></finding-list>
           </div>
         </aside>
         <div class="sections">
@@ -208,7 +161,7 @@ declare global {
     command: CustomEvent<DeskCommand>;
     example: CustomEvent<string>;
     'choose-size': CustomEvent<string>;
-    'choose-hold': CustomEvent<string>;
+    'choose-hold': CustomEvent<HoldConstant>;
     'show-technique': CustomEvent<number>;
   }
 }

@@ -1,5 +1,4 @@
 import type { Fault } from '../../../physics/case/index.js';
-import type { HoldConstant } from '../../../physics/results.js';
 import { sizesOf } from '../../../physics/stack/sizes.js';
 import { usualSize } from '../../../physics/stack/usual-size.js';
 import { autosave } from '../../store/autosave.js';
@@ -57,7 +56,7 @@ export async function startDesk(page: DeskPage): Promise<void> {
     const { draft, revision } = store.state();
     page.curveStale = true;
     besidesChanged();
-    ask({ revision, parsed: draft, size: page.model.sizeName, hold: page.hold as HoldConstant });
+    ask({ revision, parsed: draft, size: page.model.sizeName, hold: page.hold });
   };
 
   let keeping: ReturnType<typeof setTimeout> | undefined;

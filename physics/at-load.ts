@@ -5,47 +5,50 @@ import { sdnrAt } from './readout/index.js';
 import type { DoseQuantities, Exposure, FigureOfMerit, Ratios } from './results.js';
 import type { Yield } from './yield.js';
 
-const scaled = (value: number | null, load: number): number | null =>
-  value === null ? null : value * load;
+/** The dose quantities of one frame, each by its own name. */
+export type FrameDose = Omit<
+  DoseQuantities,
+  'incidentAirKermaRate_mGy_per_min' | 'perRun' | 'layerAbsorbedDose_mGy'
+>;
+
+/** Every dose quantity of one frame at a tube load. */
+export const frameDose = ({ dose }: Yield, tubeLoad_mAs: number): FrameDose => ({
+  incidentAirKerma_mGy: dose.incidentAirKerma_mGy_per_mAs * tubeLoad_mAs,
+  backscatterFactor: dose.backscatterFactor,
+  entranceSurfaceAirKerma_mGy: dose.entranceSurfaceAirKerma_mGy_per_mAs * tubeLoad_mAs,
+  kermaAreaProduct_Gycm2: dose.kermaAreaProduct_Gycm2_per_mAs * tubeLoad_mAs,
+  referenceAirKerma_mGy: dose.referenceAirKerma_mGy_per_mAs * tubeLoad_mAs,
+  energyImparted_mJ: dose.energyImparted_mJ_per_mAs * tubeLoad_mAs,
+  meanAbsorbedDose_mGy: dose.meanAbsorbedDose_mGy_per_mAs * tubeLoad_mAs,
+  skinAbsorbedDose_mGy: dose.skinAbsorbedDose_mGy_per_mAs * tubeLoad_mAs,
+});
 
 /** Every dose quantity of a yield at a tube load, per frame, per run and per minute. */
 export const doseAt = (
-  { dose, placement }: Yield,
+  made: Yield,
   acquisition: Acquisition,
   tubeLoad_mAs: number,
 ): DoseQuantities => {
-  const incidentAirKerma_mGy = dose.incidentAirKerma_mGy * tubeLoad_mAs;
-  const referenceAirKerma_mGy = dose.referenceAirKerma_mGy * tubeLoad_mAs;
-  const kermaAreaProduct_Gycm2 = dose.kermaAreaProduct_Gycm2 * tubeLoad_mAs;
-  const energyImparted_mJ = scaled(dose.energyImparted_mJ, tubeLoad_mAs);
+  const frame = frameDose(made, tubeLoad_mAs);
   const frames = framesPerRun(acquisition);
   return {
-    incidentAirKerma_mGy,
-    backscatterFactor: dose.backscatterFactor,
-    entranceSurfaceAirKerma_mGy: scaled(dose.entranceSurfaceAirKerma_mGy, tubeLoad_mAs),
-    kermaAreaProduct_Gycm2,
-    referenceAirKerma_mGy,
-    energyImparted_mJ,
-    meanAbsorbedDose_mGy: scaled(dose.meanAbsorbedDose_mGy, tubeLoad_mAs),
-    layerAbsorbedDose_mGy:
-      dose.layerAbsorbedDose_mGy &&
-      placement.stack.layers.map(({ name }, k) => ({
-        layer: name,
-        value: (dose.layerAbsorbedDose_mGy as Float64Array)[k] * tubeLoad_mAs,
-      })),
-    skinAbsorbedDose_mGy: scaled(dose.skinAbsorbedDose_mGy, tubeLoad_mAs),
-    incidentAirKermaRate_mGy_per_min: rate_mGy_per_min(acquisition, incidentAirKerma_mGy),
+    ...frame,
+    layerAbsorbedDose_mGy: made.placement.stack.layers.map(({ name }, k) => ({
+      layer: name,
+      value: made.dose.layerAbsorbedDose_mGy_per_mAs[k] * tubeLoad_mAs,
+    })),
+    incidentAirKermaRate_mGy_per_min: rate_mGy_per_min(acquisition, frame.incidentAirKerma_mGy),
     perRun: {
-      incidentAirKerma_mGy: incidentAirKerma_mGy * frames,
-      referenceAirKerma_mGy: referenceAirKerma_mGy * frames,
-      kermaAreaProduct_Gycm2: kermaAreaProduct_Gycm2 * frames,
-      energyImparted_mJ: scaled(energyImparted_mJ, frames),
+      incidentAirKerma_mGy: frame.incidentAirKerma_mGy * frames,
+      referenceAirKerma_mGy: frame.referenceAirKerma_mGy * frames,
+      kermaAreaProduct_Gycm2: frame.kermaAreaProduct_Gycm2 * frames,
+      energyImparted_mJ: frame.energyImparted_mJ * frames,
     },
   };
 };
 
 /** A single radiograph has no rate. */
-const rate_mGy_per_min = (acquisition: Acquisition, perFrame_mGy: number): number | null =>
+export const rate_mGy_per_min = (acquisition: Acquisition, perFrame_mGy: number): number | null =>
   acquisition.mode === 'radiography' && acquisition.frames === 1
     ? null
     : perFrame_mGy * acquisition.frameRate_per_s * 60;
@@ -77,8 +80,8 @@ export const figureOfMeritAt = (
   const square = sdnrAt(made.readout, tubeLoad_mAs) ** 2;
   const tubeEnergy_kJ = c.room.source ? null : (made.setting.potential_kV * tubeLoad_mAs) / 1000;
   return {
-    perIncidentAirKerma_per_mGy: per(square, dose.incidentAirKerma_mGy) ?? 0,
-    perKermaAreaProduct_per_Gycm2: per(square, dose.kermaAreaProduct_Gycm2) ?? 0,
+    perIncidentAirKerma_per_mGy: per(square, dose.incidentAirKerma_mGy),
+    perKermaAreaProduct_per_Gycm2: per(square, dose.kermaAreaProduct_Gycm2),
     perEnergyImparted_per_mJ: per(square, dose.energyImparted_mJ),
     perMeanAbsorbedDose_per_mGy: per(square, dose.meanAbsorbedDose_mGy),
     perTubeEnergy_per_kJ: per(square, tubeEnergy_kJ),
@@ -95,13 +98,14 @@ export const weighedAt = (
   acquisition: Acquisition,
   tubeLoad_mAs: number,
 ): Weighed => {
-  const { dose, readout } = made;
+  const { readout } = made;
+  const dose = frameDose(made, tubeLoad_mAs);
   return {
-    incidentAirKerma: dose.incidentAirKerma_mGy * tubeLoad_mAs,
-    entranceSurfaceAirKerma: scaled(dose.entranceSurfaceAirKerma_mGy, tubeLoad_mAs),
-    kermaAreaProduct: dose.kermaAreaProduct_Gycm2 * tubeLoad_mAs,
-    energyImparted: scaled(dose.energyImparted_mJ, tubeLoad_mAs),
-    meanAbsorbedDose: scaled(dose.meanAbsorbedDose_mGy, tubeLoad_mAs),
+    incidentAirKerma: dose.incidentAirKerma_mGy,
+    entranceSurfaceAirKerma: dose.entranceSurfaceAirKerma_mGy,
+    kermaAreaProduct: dose.kermaAreaProduct_Gycm2,
+    energyImparted: dose.energyImparted_mJ,
+    meanAbsorbedDose: dose.meanAbsorbedDose_mGy,
     tubeLoad: tubeLoad_mAs,
     power: exposureAt(c, acquisition, made.setting.potential_kV, tubeLoad_mAs).power_kW,
     sdnr: sdnrAt(readout, tubeLoad_mAs),

@@ -3,8 +3,9 @@ import type { Case } from './case/schema.js';
 import { findingsOf } from './findings.js';
 import { numberText } from './number-text.js';
 import type { OperatingPoint } from './operating-point.js';
-import { sdnrAt, solveTubeLoad } from './readout/index.js';
+import { sdnrAt } from './readout/index.js';
 import type { Comparison, ComparisonRow, Finding, HoldConstant, Ratios } from './results.js';
+import { loadFor } from './yield.js';
 
 /** The equalities every comparison shows, in this order. */
 export const holdConstants: readonly HoldConstant[] = [
@@ -47,8 +48,7 @@ export const compare = (c: Case, from: OperatingPoint, to: OperatingPoint): Comp
 /** The load of `to` at which the held quantity equals that of `from` as set. */
 export const heldLoad = (from: OperatingPoint, to: OperatingPoint, hold: HoldConstant) => {
   if (hold === 'asSet') return { tubeLoad_mAs: to.tubeLoad_mAs, reason: null };
-  const { readout, dose } = to.made;
-  return solveTubeLoad(readout, dose.incidentAirKerma_mGy, hold, heldTarget(from, hold));
+  return loadFor(to.made, hold, heldTarget(from, hold));
 };
 
 /** The value of the held quantity that the first operating point has as set. */
@@ -64,7 +64,7 @@ export const heldTarget = (
     case 'detectorSignal':
       return made.readout.signalTotal_per_mm2_per_mAs * tubeLoad_mAs;
     case 'incidentAirKerma':
-      return made.dose.incidentAirKerma_mGy * tubeLoad_mAs;
+      return made.dose.incidentAirKerma_mGy_per_mAs * tubeLoad_mAs;
     case 'tubeLoad':
       return tubeLoad_mAs;
   }

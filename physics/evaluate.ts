@@ -1,7 +1,7 @@
 import { doseAt, exposureAt, figureOfMeritAt } from './at-load.js';
 import { beamQuality } from './beam/index.js';
 import type { Case } from './case/schema.js';
-import { findingsOf, notYetComputed } from './findings.js';
+import { findingsOf } from './findings.js';
 import { framesPerRun } from './frames.js';
 import { nearestAllowedWords } from './limits/nearest-allowed.js';
 import { isAllowedBySetting, isOfSetting, limitFindings } from './limits.js';
@@ -20,7 +20,7 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
   const { technique, size, made, tubeLoad_mAs } = point;
   const { acquisition } = technique;
   const { setting, placement, output, skin, primary, readout, chain } = made;
-  const { responses, stack } = placement;
+  const { stack } = placement;
 
   const beam = beamQuality(output, c.room.source ? null : setting.potential_kV);
   const dose = doseAt(made, acquisition, tubeLoad_mAs);
@@ -38,7 +38,7 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
       spr: readout.spr,
       scatterFraction: readout.spr / (1 + readout.spr),
       sprBehindGrid: readout.sprBehindGrid,
-      method: responses.method,
+      method: 'estimate',
     },
     grid: readout.grid,
     contrast: {
@@ -79,7 +79,6 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
           incidentAirKermaRate_mGy_per_min: dose.incidentAirKermaRate_mGy_per_min,
           path,
         }),
-        ...missing(dose.energyImparted_mJ),
       ]),
       technique.name,
       size.name,
@@ -97,12 +96,3 @@ const withNearest = (c: Case, point: OperatingPoint, findings: Finding[]): Findi
       : finding,
   );
 };
-
-const missing = (energyImparted_mJ: number | null): Finding[] =>
-  energyImparted_mJ === null
-    ? [
-        notYetComputed(
-          'multiple scatter (the ratios shown hold first-order scatter only), layer absorbed dose, backscatter and energy imparted',
-        ),
-      ]
-    : [];

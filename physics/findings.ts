@@ -58,14 +58,6 @@ export const techniqueFindings = (technique: Technique, path: string): Finding[]
         },
       ];
 
-/** Values this version does not compute yet stand as null with this finding. */
-export const notYetComputed = (quantities: string): Finding => ({
-  code: 'notYetComputed',
-  severity: 'note',
-  message: `Not yet computed: ${quantities}.`,
-  value: null,
-});
-
 /** Whose a finding is, and where: the same finding said of a technique at a size. */
 export const findingsOf = (
   findings: readonly Finding[],

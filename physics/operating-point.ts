@@ -1,12 +1,9 @@
 import type { Case, Size, Technique } from './case/schema.js';
 import { curvePointAt, isCurve } from './control.js';
-import { outputBeam } from './output-beam.js';
 import { placementOf } from './placement.js';
-import { prepare } from './prepare.js';
-import { solveTubeLoad } from './readout/index.js';
 import type { Finding } from './results.js';
-import { type Setting, settingLabel, settingOf } from './setting.js';
-import { type Yield, yieldOf } from './yield.js';
+import { type Setting, settingOf } from './setting.js';
+import { deliver, loadFor, type Yield } from './yield.js';
 
 /** Where a technique stands at a size: its setting in force, its yield, and the load of one frame. */
 export interface OperatingPoint {
@@ -21,9 +18,6 @@ export interface OperatingPoint {
 export interface NoPoint {
   readonly findings: readonly Finding[];
 }
-
-/** Detector signal (keV or counts) below which a primary beam is none: no tube makes 10⁹ mAs. */
-const leastSignal_per_mm2_per_mAs = 1e-12;
 
 /**
  * What the room's own exposure control will deliver for a technique at a size: as set. A control
@@ -43,13 +37,8 @@ export const operatingPoint = (
     ? curvePointAt(control, size.thickness_mm, c.room.tube.potential_kV)
     : null;
   const setting: Setting = curve ? { ...written, ...curve.setting } : written;
-  const { spectrum, findings } = outputBeam(prepare(c), setting.potential_kV, setting.filter);
-  if (!spectrum) return { findings };
-  const made = yieldOf(c, placement, setting, technique.acquisition, spectrum);
-  if (!(made.readout.signalPrimary_per_mm2_per_mAs > leastSignal_per_mm2_per_mAs)) {
-    const message = `No primary photon of ${settingLabel(setting)} reaches the detector at ${size.thickness_mm} mm; nothing can be shown.`;
-    return { findings: [...findings, blocked('nothingArrives', message)] };
-  }
+  const { made, findings } = deliver(c, placement, setting, technique.acquisition);
+  if (!made) return { findings };
   if (isCurve(control)) {
     if (!curve) {
       return {
@@ -69,7 +58,7 @@ export const operatingPoint = (
     };
   }
   const [hold, target] = heldBy(control);
-  const load = solveTubeLoad(made.readout, made.dose.incidentAirKerma_mGy, hold, target);
+  const load = loadFor(made, hold, target);
   return load.tubeLoad_mAs === null
     ? {
         findings: [...findings, blocked('controlUnreachable', load.reason)],

@@ -58,7 +58,8 @@ export interface Transmission {
   readonly exitMeanEnergy_keV: number;
 }
 
-export type ScatterMethod = 'first-order' | 'estimate' | 'transport';
+/** How scatter was had: first order exact, multiple scatter by adjoint discrete ordinates. */
+export type ScatterMethod = 'estimate';
 
 export interface Scatter {
   /** Scatter-to-primary ratio of detector signal at the field centre, without grid. */
@@ -107,19 +108,19 @@ export interface RunTotals {
   readonly incidentAirKerma_mGy: number;
   readonly referenceAirKerma_mGy: number;
   readonly kermaAreaProduct_Gycm2: number;
-  readonly energyImparted_mJ: number | null;
+  readonly energyImparted_mJ: number;
 }
 
 export interface DoseQuantities {
   readonly incidentAirKerma_mGy: number;
-  readonly backscatterFactor: number | null;
-  readonly entranceSurfaceAirKerma_mGy: number | null;
+  readonly backscatterFactor: number;
+  readonly entranceSurfaceAirKerma_mGy: number;
   readonly kermaAreaProduct_Gycm2: number;
   readonly referenceAirKerma_mGy: number;
-  readonly energyImparted_mJ: number | null;
-  readonly meanAbsorbedDose_mGy: number | null;
-  readonly layerAbsorbedDose_mGy: readonly LayerAbsorbedDose[] | null;
-  readonly skinAbsorbedDose_mGy: number | null;
+  readonly energyImparted_mJ: number;
+  readonly meanAbsorbedDose_mGy: number;
+  readonly layerAbsorbedDose_mGy: readonly LayerAbsorbedDose[];
+  readonly skinAbsorbedDose_mGy: number;
   readonly incidentAirKermaRate_mGy_per_min: number | null;
   readonly perRun: RunTotals;
 }
@@ -131,10 +132,10 @@ export interface Exposure {
   readonly power_kW: number | null;
 }
 
-/** SdNR² per named cost. */
+/** SdNR² per named cost; null where that cost is nothing or there is none. */
 export interface FigureOfMerit {
-  readonly perIncidentAirKerma_per_mGy: number;
-  readonly perKermaAreaProduct_per_Gycm2: number;
+  readonly perIncidentAirKerma_per_mGy: number | null;
+  readonly perKermaAreaProduct_per_Gycm2: number | null;
   readonly perEnergyImparted_per_mJ: number | null;
   readonly perMeanAbsorbedDose_per_mGy: number | null;
   readonly perTubeEnergy_per_kJ: number | null;

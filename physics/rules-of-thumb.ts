@@ -1,9 +1,7 @@
 import type { Case, Size } from './case/schema.js';
 import { operatingPoint } from './operating-point.js';
-import { outputBeam } from './output-beam.js';
-import { prepare } from './prepare.js';
 import { roomPotentials_kV } from './scan.js';
-import { yieldOf } from './yield.js';
+import { deliver } from './yield.js';
 
 /** One rule of thumb at one potential: the factor it promises and the factor the model finds. */
 export interface RuleDeparture {
@@ -37,11 +35,9 @@ export const rulesOfThumb = (c: Case, size: Size): RuleDeparture[] => {
   const kermaPerLoad = (potential_kV: number, at: Size): number | null => {
     const point = operatingPoint(c, technique, at);
     if (!('made' in point)) return null;
-    const { spectrum } = outputBeam(prepare(c), potential_kV, technique.filter);
-    if (!spectrum) return null;
     const setting = { potential_kV, filter: technique.filter, grid: technique.grid };
-    const made = yieldOf(c, point.made.placement, setting, technique.acquisition, spectrum);
-    return made.readout.detectorAirKerma_uGy_per_mAs;
+    const { made } = deliver(c, point.made.placement, setting, technique.acquisition);
+    return made?.readout.detectorAirKerma_uGy_per_mAs ?? null;
   };
   const thicker: Size = {
     name: `${size.name} + 30 mm`,

@@ -1,5 +1,6 @@
 import { type Fault, faultLine } from '../case/fault.js';
 import type { Reading } from '../case/schema.js';
+import { boundedMemo } from '../numeric/bounded-memo.js';
 import type { Calibration, Finding, Residual } from '../results.js';
 import type { MaterialLayer } from './attenuate.js';
 import {
@@ -8,7 +9,6 @@ import {
   examineReadings,
   requiredMaterial,
 } from './believed-readings.js';
-import { boundedMemo } from '../numeric/bounded-memo.js';
 import { calibrationFindings } from './calibration-findings.js';
 import { fitTube, outputFactorAt_kV, type TubeFit } from './calibration-fit.js';
 import {

@@ -1,6 +1,6 @@
+import { boundedMemo } from '../numeric/bounded-memo.js';
 import { aluminiumForHalfValueLayer_mm } from './aluminium-equivalent.js';
 import { attenuate } from './attenuate.js';
-import { boundedMemo } from '../numeric/bounded-memo.js';
 import { type ReferenceQuality, referenceQualities } from './reference-beam-table.js';
 import { referenceMaterial } from './reference-materials.js';
 import type { Spectrum } from './spectrum.js';

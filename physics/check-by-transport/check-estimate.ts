@@ -7,8 +7,8 @@ export interface CheckEstimate extends TransportEstimate {
   readonly spr: number;
   readonly sprBehindGrid: number | null;
   readonly scatterFraction: number;
-  readonly energyImparted_mJ: number | null;
-  readonly layerAbsorbedDose_mGy: readonly number[] | null;
+  readonly energyImparted_mJ: number;
+  readonly layerAbsorbedDose_mGy: readonly number[];
 }
 
 /** The values `weigh` prints for an operating point. */
@@ -20,17 +20,15 @@ export const checkEstimate = ({ made, tubeLoad_mAs }: OperatingPoint): CheckEsti
     sprBehindGrid: chain.grid ? readout.sprBehindGrid : null,
     scatterFraction: readout.spr / (1 + readout.spr),
     backscatterFactor: dose.backscatterFactor,
-    energyImparted_mJ: dose.energyImparted_mJ === null ? null : perFrame(dose.energyImparted_mJ),
-    layerAbsorbedDose_mGy:
-      dose.layerAbsorbedDose_mGy && [...dose.layerAbsorbedDose_mGy].map(perFrame),
+    energyImparted_mJ: perFrame(dose.energyImparted_mJ_per_mAs),
+    layerAbsorbedDose_mGy: [...dose.layerAbsorbedDose_mGy_per_mAs].map(perFrame),
     layerAbsorbedFraction: layerAbsorbedFractions(made),
   };
 };
 
 /** Energy absorbed by each layer over the energy incident on the skin. */
-const layerAbsorbedFractions = ({ placement, skin }: OperatingPoint['made']): number[] | null => {
+const layerAbsorbedFractions = ({ placement, skin }: OperatingPoint['made']): number[] => {
   const { layerAbsorbedFraction } = responsesOn(placement.responses, skin.energies_keV);
-  if (layerAbsorbedFraction === null) return null;
   const energies = skin.fluence_per_mm2.map((photons, i) => photons * skin.energies_keV[i]);
   const incident = energies.reduce((sum, energy) => sum + energy, 0);
   return layerAbsorbedFraction.map(

@@ -79,7 +79,7 @@ const setUp = (
     measuredGridShare: grid?.measured
       ? grid.measured.scatterTransmission / grid.measured.primaryTransmission
       : null,
-    incidentAirKerma_mGy: dose.incidentAirKerma_mGy * tubeLoad_mAs,
+    incidentAirKerma_mGy: dose.incidentAirKerma_mGy_per_mAs * tubeLoad_mAs,
     pencilField_cm2: isPencil ? fieldArea_cm2(stack, stack.sourceToSkin_mm) : 1,
     column: column.layers,
     findings: checkFindings(c, point),

@@ -30,9 +30,8 @@ function interpolate(responses: ScatterResponses, energies_keV: Float64Array): S
     energies_keV,
     withoutGrid: scatter(responses.withoutGrid),
     behindGrid: responses.behindGrid && scatter(responses.behindGrid),
-    backscatter: responses.backscatter && column(responses.backscatter),
-    layerAbsorbedFraction: responses.layerAbsorbedFraction?.map(column) ?? null,
-    method: responses.method,
+    backscatter: column(responses.backscatter),
+    layerAbsorbedFraction: responses.layerAbsorbedFraction.map(column),
   };
 }
 

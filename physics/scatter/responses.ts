@@ -23,9 +23,14 @@ export interface ScatterResponses {
   readonly withoutGrid: DetectorScatter;
   /** Scatter behind the grid over primary behind the grid; null without a grid. */
   readonly behindGrid: DetectorScatter | null;
-  /** Backscattered over incident air kerma at the skin (B − 1); null where not computed. */
-  readonly backscatter: Float64Array | null;
-  /** Per layer, energy absorbed over incident energy (infinite width); null where not computed. */
-  readonly layerAbsorbedFraction: readonly Float64Array[] | null;
-  readonly method: 'first-order' | 'estimate';
+  /** Backscattered over incident air kerma at the skin: B − 1. */
+  readonly backscatter: Float64Array;
+  /** Per layer, energy absorbed over incident energy, infinite width. */
+  readonly layerAbsorbedFraction: readonly Float64Array[];
 }
+
+/** Scatter at the detector from one collision only. */
+export type FirstOrderScatter = Pick<
+  ScatterResponses,
+  'energies_keV' | 'withoutGrid' | 'behindGrid'
+>;

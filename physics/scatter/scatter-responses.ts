@@ -6,7 +6,7 @@ import { estimate } from './estimate.js';
 import { firstOrder } from './first-order.js';
 import { scatterGeometry } from './geometry.js';
 import { infiniteField } from './infinite-field.js';
-import type { DetectorScatter, ScatterResponses } from './responses.js';
+import type { DetectorScatter, FirstOrderScatter, ScatterResponses } from './responses.js';
 import { type ScatterDetector, type ScatterGrid, scoreCount, scoreTable } from './scores.js';
 import { type Slab, slabsOf } from './slabs.js';
 
@@ -26,12 +26,15 @@ export function nodesFor(
   return energyNodes([...ofSlabs, ...detector.edges_keV, ...ofGrid]);
 }
 
-/** First-order scatter only: the quick answer shown while the estimate is computed. */
+/**
+ * Scatter from one collision only, exact. No answer to a user; what the estimate starts from, held
+ * against published single-scatter values and laws.
+ */
 export function firstOrderResponses(
   stack: Stack,
   detector: ScatterDetector,
   grid: ScatterGrid | null,
-): ScatterResponses {
+): FirstOrderScatter {
   const slabs = slabsOf(stack);
   const nodes = nodesFor(slabs, detector, grid);
   const table = scoreTable(detector, grid, nodes);
@@ -41,9 +44,6 @@ export function firstOrderResponses(
     energies_keV: nodes.energies_keV,
     withoutGrid: detectorScatter(both, 0),
     behindGrid: grid && detectorScatter(both, scoreCount),
-    backscatter: null,
-    layerAbsorbedFraction: null,
-    method: 'first-order',
   };
 }
 
@@ -77,6 +77,5 @@ export function scatterResponses(
     behindGrid: grid && detectorScatter(scores, scoreCount),
     backscatter: infinite.backscatter.map((value, i) => value * share[i]),
     layerAbsorbedFraction: infinite.layerAbsorbedFraction,
-    method: 'estimate',
   };
 }

@@ -1,15 +1,13 @@
+import { rate_mGy_per_min } from '../at-load.js';
 import type { Acquisition, Case, Technique } from '../case/schema.js';
 import { heldTarget } from '../compare.js';
 import { isCurve } from '../control.js';
 import { framesPerRun } from '../frames.js';
 import { limitFindings } from '../limits.js';
 import { type OperatingPoint, operatingPoint } from '../operating-point.js';
-import { outputBeam } from '../output-beam.js';
-import { prepare } from '../prepare.js';
-import { solveTubeLoad } from '../readout/index.js';
 import type { Finding, HoldConstant } from '../results.js';
 import type { Setting } from '../setting.js';
-import { type Yield, yieldOf } from '../yield.js';
+import { deliver, loadFor, type Yield } from '../yield.js';
 import { type SweepValues, sweepValues } from './values.js';
 
 /** One setting of a sweep at one size; values are null where its condition cannot be met. */
@@ -61,15 +59,9 @@ const heldEqual = (
 ): SweepSetting => {
   const { size, technique } = reference;
   const { acquisition } = technique;
-  const { spectrum, findings } = outputBeam(prepare(c), setting.potential_kV, setting.filter);
-  if (!spectrum) return withoutValues(setting, size.name, findings);
-  const made = yieldOf(c, reference.made.placement, setting, acquisition, spectrum);
-  const { tubeLoad_mAs, reason } = solveTubeLoad(
-    made.readout,
-    made.dose.incidentAirKerma_mGy,
-    hold,
-    heldTarget(reference, hold),
-  );
+  const { made, findings } = deliver(c, reference.made.placement, setting, acquisition);
+  if (!made) return withoutValues(setting, size.name, findings);
+  const { tubeLoad_mAs, reason } = loadFor(made, hold, heldTarget(reference, hold));
   return tubeLoad_mAs === null
     ? withoutValues(setting, size.name, [...findings, unreachable(reason)])
     : atLoad(c, made, acquisition, size.name, { tubeLoad_mAs, findings });
@@ -107,7 +99,6 @@ const atLoad = (
   const values = sweepValues(c, made, acquisition, tubeLoad_mAs);
   const { exposureTime_ms, tubeCurrent_mA, power_kW } = values;
   const { setting, placement } = made;
-  const isSingle = acquisition.mode === 'radiography' && acquisition.frames === 1;
   const limits = limitFindings({
     case: c,
     setting,
@@ -117,9 +108,7 @@ const atLoad = (
     halfValueLayer_mmAl: values.halfValueLayer_mmAl,
     sourceToSkin_mm: placement.stack.sourceToSkin_mm,
     detectorAirKerma_uGy: values.detectorAirKerma_uGy,
-    incidentAirKermaRate_mGy_per_min: isSingle
-      ? null
-      : values.incidentAirKerma_mGy * acquisition.frameRate_per_s * 60,
+    incidentAirKermaRate_mGy_per_min: rate_mGy_per_min(acquisition, values.incidentAirKerma_mGy),
     path: 'setting',
   });
   return {

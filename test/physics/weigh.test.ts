@@ -72,7 +72,8 @@ describe('weighing a case', () => {
     const limited = weigh(sampleCase({ room: quiet }));
     const [a, b] = limited.evaluations;
     expect(rowOf('sdnr', limited).ratio.incidentAirKerma).toBeCloseTo(
-      a.figureOfMerit.perIncidentAirKerma_per_mGy / b.figureOfMerit.perIncidentAirKerma_per_mGy,
+      (a.figureOfMerit.perIncidentAirKerma_per_mGy ?? 0) /
+        (b.figureOfMerit.perIncidentAirKerma_per_mGy ?? 0),
       10,
     );
   });

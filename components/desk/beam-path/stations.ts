@@ -49,15 +49,8 @@ function figureIfKnown(id: string) {
       : nothing;
 }
 
-const methodWords: Record<Evaluation['scatter']['method'], string> = {
-  'first-order': 'first order',
-  estimate: 'estimate',
-  transport: 'transport',
-};
-
 const scatterStation: Station['content'] = (model, technique) => {
-  const method = evaluationOf(model, technique)?.scatter.method;
-  const unit = method ? methodWords[method] : '';
+  const unit = evaluationOf(model, technique)?.scatter.method ?? '';
   return figure('sprBehindGrid', 'Scatter to primary, behind grid', unit)(model, technique);
 };
 

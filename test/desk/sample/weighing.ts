@@ -78,7 +78,7 @@ const evaluation = (
     spr: own.spr,
     scatterFraction: own.spr / (1 + own.spr),
     sprBehindGrid: own.spr / 5.6,
-    method: 'first-order',
+    method: 'estimate',
   },
   grid: {
     primaryTransmission: 0.69,
@@ -100,20 +100,20 @@ const evaluation = (
   sdnr: own.sdnr,
   dose: {
     incidentAirKerma_mGy: own.kerma_mGy,
-    backscatterFactor: null,
-    entranceSurfaceAirKerma_mGy: null,
+    backscatterFactor: 1.5,
+    entranceSurfaceAirKerma_mGy: own.kerma_mGy * 1.5,
     kermaAreaProduct_Gycm2: own.kerma_mGy * 0.31,
     referenceAirKerma_mGy: own.kerma_mGy * 1.6,
-    energyImparted_mJ: null,
-    meanAbsorbedDose_mGy: null,
-    layerAbsorbedDose_mGy: null,
-    skinAbsorbedDose_mGy: null,
+    energyImparted_mJ: own.kerma_mGy * 3.1,
+    meanAbsorbedDose_mGy: own.kerma_mGy * 0.34,
+    layerAbsorbedDose_mGy: [],
+    skinAbsorbedDose_mGy: own.kerma_mGy * 1.46,
     incidentAirKermaRate_mGy_per_min: own.kerma_mGy * 180,
     perRun: {
       incidentAirKerma_mGy: own.kerma_mGy * 13,
       referenceAirKerma_mGy: own.kerma_mGy * 20.8,
       kermaAreaProduct_Gycm2: own.kerma_mGy * 4.03,
-      energyImparted_mJ: null,
+      energyImparted_mJ: own.kerma_mGy * 40.3,
     },
   },
   detector: { airKerma_uGy: 2.5, absorbedFraction: 0.71, signal_keV_per_mm2: 1.9e6 },
@@ -151,9 +151,9 @@ interface Own {
 }
 
 const later: Finding = {
-  code: 'notYetComputed',
+  code: 'lateralInfinite',
   severity: 'note',
-  message: 'Energy imparted and layer doses are not yet computed.',
+  message: 'Layers are laterally infinite.',
 };
 const current: Own = {
   potential_kV: 80,

@@ -25,9 +25,10 @@ const pad = 2;
 /**
  * Filled contours of one filter's figure of merit along potential. Filters are discrete: nothing is
  * interpolated between them, so each band's contours run straight across it. A region may reach
- * beyond the band; the drawing clips it.
+ * beyond the band; the drawing clips it, and covers what has no value.
  *
- * @param shares figure of merit over the best, by potential; null where there is none.
+ * @param shares figure of merit over the best, by potential; null where there is none: taken as its
+ *   nearest neighbour's there.
  * @param x place of a potential by its index, also between two.
  * @param band top and bottom of the row.
  */
@@ -36,13 +37,11 @@ export const levelRegions = (
   x: (index: number) => number,
   band: { readonly top: number; readonly bottom: number },
 ): LevelRegion[] => {
-  if (shares.length === 0) return [];
-  const first = shares[0];
-  const last = shares[shares.length - 1];
-  const line = [...Array(pad).fill(first), ...shares, ...Array(pad).fill(last)];
-  const values = Array.from({ length: lines }, () => line)
-    .flat()
-    .map((share) => share ?? Number.NaN);
+  const filled = withoutGaps(shares);
+  if (filled.length === 0) return [];
+  const ends = [filled[0], filled[filled.length - 1]];
+  const line = [...Array(pad).fill(ends[0]), ...filled, ...Array(pad).fill(ends[1])];
+  const values: number[] = Array.from({ length: lines }, () => line).flat();
   const perLine = (band.bottom - band.top) / (lines - 2);
   const made = contours()
     .size([line.length, lines])
@@ -59,6 +58,16 @@ export const levelRegions = (
       })
       .join('');
     return [{ level: i + 1, path }];
+  });
+};
+
+/** Every gap filled with the value nearest to it, the lower one first; empty without any value. */
+const withoutGaps = (shares: readonly (number | null)[]): number[] => {
+  const known = shares.flatMap((share, i) => (share === null ? [] : [i]));
+  if (known.length === 0) return [];
+  return shares.map((share, i) => {
+    const nearest = known.reduce((a, b) => (Math.abs(b - i) < Math.abs(a - i) ? b : a));
+    return share ?? (shares[nearest] as number);
   });
 };
 

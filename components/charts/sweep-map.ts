@@ -1,4 +1,5 @@
 import { html, nothing, type SVGTemplateResult, svg, type TemplateResult } from 'lit';
+import { guard } from 'lit/directives/guard.js';
 import { formatEntry, formatNumber } from './format.js';
 import { techniqueInk } from './inks.js';
 import { placeLabels, wordsWidth } from './label-places.js';
@@ -59,10 +60,14 @@ function bandOf(
     return layout.x(potentials_kV[low] + (index - low) * step);
   };
   const shares = cells.map(({ merit }) => (merit === null || !(best > 0) ? null : merit / best));
-  const known = cells.flatMap(({ merit }, i) => (merit === null ? [] : [i]));
-  return svg`${known.length > 0 ? svg`<rect x=${edges[known[0]]} y=${top} width=${edges[known[known.length - 1] + 1] - edges[known[0]]} height=${height} style="fill:${levelFill(0)}" />` : nothing}
+  const missing = cells.flatMap(({ merit }, i) => (merit === null ? [i] : []));
+  return svg`<rect x=${left} y=${top} width=${right - left} height=${height} style="fill:${levelFill(0)}" />
     ${levelRegions(shares, place, { top, bottom: top + height }).map(
       ({ level, path }) => svg`<path d=${path} style="fill:${levelFill(level)}" />`,
+    )}
+    ${missing.map(
+      (i) =>
+        svg`<rect class="missing" x=${edges[i]} y=${top} width=${edges[i + 1] - edges[i]} height=${height} />`,
     )}
     ${forbiddenRuns(cells).map(
       ({ from, to }) =>
@@ -173,24 +178,34 @@ export function sweepMap(
 ): TemplateResult {
   const layout = mapLayout(data, width);
   const { height } = layout;
+  return html`<svg class="chart map" viewBox="0 0 ${width} ${height}" width=${width} height=${height} role="img" aria-label=${mapWords(data)}>
+    ${guard([data, width], () => ground(data, layout))}
+    ${cursor ? svg`<rect class="reading" x=${layout.edges[cursor.column] - 1} y=${layout.rowTop(cursor.row) - 1} width=${Math.max(4, layout.edges[cursor.column + 1] - layout.edges[cursor.column] + 2)} height=${layout.rowHeight + 2} />` : nothing}
+    ${guard([data, width], () => signs(data, layout))}
+  </svg>`;
+}
+
+/** What lies under the reading: axes, shading, hatches, and the names of limits. */
+function ground(data: SweepMapData, layout: MapLayout): SVGTemplateResult {
   const merits = data.rows.flatMap(({ cells }) => cells.map(({ merit }) => merit ?? 0));
   const best = data.best?.merit ?? Math.max(0, ...merits);
-  return html`<svg class="chart map" viewBox="0 0 ${width} ${height}" width=${width} height=${height} role="img" aria-label=${mapWords(data)}>
-    ${definitions(data, layout)}
+  return svg`${definitions(data, layout)}
     ${axes(data, layout)}
     ${data.rows.map((row, i) => svg`<g clip-path="url(#map-band-${i})">${bandOf(row, i, data, layout, best)}</g>`)}
     ${limitLabels(data, layout)}
-    ${bestSign(data, layout)}
-    ${cursor ? svg`<rect class="reading" x=${layout.edges[cursor.column] - 1} y=${layout.rowTop(cursor.row) - 1} width=${Math.max(4, layout.edges[cursor.column + 1] - layout.edges[cursor.column] + 2)} height=${layout.rowHeight + 2} />` : nothing}
-    ${names(data, layout)}
+    ${bestSign(data, layout)}`;
+}
+
+/** What lies over it: names and signs of the techniques, the warning. */
+function signs(data: SweepMapData, layout: MapLayout): SVGTemplateResult {
+  return svg`${names(data, layout)}
     ${data.marks.map(({ ink, potential_kV, filter }) => {
       const row = data.rows.findIndex((entry) => entry.filter === filter);
       return row < 0
         ? nothing
         : techniqueMark(ink, layout.x(potential_kV), layout.rowTop(row) + layout.rowHeight / 2);
     })}
-    ${data.investigational ? svg`<text class="warning" x=${layout.left} y=${layout.top - 9}>${data.investigational}</text>` : nothing}
-  </svg>`;
+    ${data.investigational ? svg`<text class="warning" x=${layout.left} y=${layout.top - 9}>${data.investigational}</text>` : nothing}`;
 }
 
 /** What the ink says, as shares of the best allowed setting. */

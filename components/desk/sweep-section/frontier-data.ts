@@ -2,8 +2,8 @@ import { holdConstantWords } from '../../../physics/compare.js';
 import { isAllowed } from '../../../physics/limits.js';
 import type { HoldConstant } from '../../../physics/results.js';
 import { type CostName, costs } from '../../../physics/sweep/costs.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import type { SweepValues } from '../../../physics/sweep/values.js';
-import type { MappedSetting } from '../../../physics/sweep.js';
 import type { FrontierData } from '../../charts/frontier-chart.js';
 import { investigationalWords } from '../curve-panel/curve-data.js';
 import type { DeskModel } from '../model/desk-model.js';
@@ -45,14 +45,15 @@ export const pointOf = (
 export function frontierData(
   model: DeskModel,
   size: string,
-  settings: readonly MappedSetting[],
+  settings: readonly SweepSetting[],
+  isMember: ReadonlySet<number>,
   chosen: readonly CostName[],
   hold: HoldConstant,
 ): FrontierData {
   const axes = frontierAxes(chosen, hold);
-  const points = settings.flatMap(({ values, findings, onFrontier }) => {
+  const points = settings.flatMap(({ values, findings }, i) => {
     const at = isAllowed(findings) ? pointOf(axes, values) : null;
-    return at ? [{ ...at, onFrontier }] : [];
+    return at ? [{ ...at, onFrontier: isMember.has(i) }] : [];
   });
   const marks = techniqueMarks(model).flatMap(({ ink, name, potential_kV, filter }) => {
     const setting = settings.find(

@@ -1,7 +1,7 @@
 import { html, nothing, type TemplateResult } from 'lit';
 import { settingLabel } from '../../../physics/setting.js';
 import { type CostName, costs } from '../../../physics/sweep/costs.js';
-import type { MappedSetting } from '../../../physics/sweep.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { formatNumber } from '../../charts/format.js';
 
 /** More rows than this no one reads; the CSV holds all. */
@@ -13,16 +13,17 @@ const most = 120;
  * @param read told of the member the pointer or focus is on, null when it leaves.
  */
 export function frontierList(
-  settings: readonly MappedSetting[],
+  settings: readonly SweepSetting[],
+  isMember: ReadonlySet<number>,
   chosen: readonly CostName[],
-  adopt: (member: MappedSetting) => void,
-  read: (member: MappedSetting | null) => void,
+  adopt: (member: SweepSetting) => void,
+  read: (member: SweepSetting | null) => void,
 ): TemplateResult {
   const [first] = chosen;
-  const paid = ({ values }: MappedSetting, cost: CostName): number | null =>
+  const paid = ({ values }: SweepSetting, cost: CostName): number | null =>
     values && costs[cost].of(values);
   const members = settings
-    .filter(({ onFrontier }) => onFrontier)
+    .filter((_, i) => isMember.has(i))
     .sort((a, b) => (paid(a, first) ?? 0) - (paid(b, first) ?? 0));
   if (members.length === 0) return html`<p class="note">No setting is allowed at this size.</p>`;
   return html`<div class="scroll members" tabindex="0" role="region" aria-label="Members of the frontier"><table>

@@ -1,8 +1,11 @@
-import { html, LitElement, nothing } from 'lit';
+import { html, LitElement, nothing, type PropertyValues } from 'lit';
 import { customElement, property, state } from 'lit/decorators.js';
+import { guard } from 'lit/directives/guard.js';
 import type { CostName } from '../../../physics/sweep/costs.js';
-import { type MappedSetting, usualCosts } from '../../../physics/sweep.js';
-import { frontierChart } from '../../charts/frontier-chart.js';
+import { frontierOf } from '../../../physics/sweep/frontier.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
+import { usualCosts } from '../../../physics/sweep.js';
+import { type FrontierData, frontierChart } from '../../charts/frontier-chart.js';
 import type { DeskModel } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
@@ -25,7 +28,7 @@ export class FrontierPanel extends LitElement {
   @property({ attribute: false }) sweep!: SweepState;
   @property() size = '';
   @state() private picked: readonly (CostName | '')[] = [...usualCosts, ''];
-  @state() private read: MappedSetting | null = null;
+  @state() private read: SweepSetting | null = null;
 
   static override styles = [chartSheet, sectionSheet, sweepSheet, panelSheet];
 
@@ -47,29 +50,55 @@ export class FrontierPanel extends LitElement {
       <p class="by">least ${this.chooser(0)}, ${this.chooser(1)}, ${this.chooser(2)}, most SdNR</p>`;
   }
 
-  override render() {
+  /** What is drawn, found again only when the settings, the costs or the techniques changed. */
+  private found: {
+    readonly costs: readonly CostName[];
+    readonly settings: readonly SweepSetting[];
+    readonly isMember: ReadonlySet<number>;
+    readonly data: FrontierData;
+  } | null = null;
+
+  protected override willUpdate(changed: PropertyValues) {
+    if (changed.size === 1 && changed.has('read')) return;
+    const { settings, isWhole } = settingsOfSize(this.sweep, this.size);
+    if (!isWhole) {
+      this.found = null;
+      return;
+    }
     const costs = chosenCosts(this.picked);
-    const { settings, isWhole } = settingsOfSize(this.sweep, this.size, costs);
-    if (!isWhole)
-      return html`${this.heading}<p class="note">incomplete: waits for every filter at this size</p>`;
+    const isSame = this.found?.settings === settings && this.found.costs.join() === costs.join();
+    const isMember =
+      isSame && this.found ? this.found.isMember : new Set(frontierOf(settings, costs));
     const { holdConstant } = this.sweep.request;
-    const data = frontierData(this.model, this.size, settings, costs, holdConstant);
-    const cursor = this.read && pointOf(frontierAxes(costs, holdConstant), this.read.values);
-    const beaten = data.points.length - data.points.filter(({ onFrontier }) => onFrontier).length;
+    const data = frontierData(this.model, this.size, settings, isMember, costs, holdConstant);
+    this.found = { costs, settings, isMember, data };
+  }
+
+  override render() {
+    if (!this.found) {
+      return html`${this.heading}<p class="note">incomplete: waits for every filter at this size</p>`;
+    }
+    const { costs, settings, isMember, data } = this.found;
+    const axes = frontierAxes(costs, this.sweep.request.holdConstant);
+    const cursor = this.read && pointOf(axes, this.read.values);
+    const isBeaten = data.points.some(({ onFrontier }) => !onFrontier);
     return html`${this.heading}
       ${data.points.length > 0 ? frontierChart(data, { width: 384, height: 250 }, cursor) : nothing}
       ${
-        data.points.length > 1 && beaten === 0
+        data.points.length > 1 && !isBeaten
           ? html`<p class="note">Nothing is beaten: ${data.holdConstant}, every setting trades one of these against another.</p>`
           : nothing
       }
-      ${frontierList(
-        settings,
-        costs,
-        (member) => this.dispatchEvent(new CustomEvent('adopt', { detail: member })),
-        (member) => {
-          this.read = member;
-        },
+      ${guard([this.found], () =>
+        frontierList(
+          settings,
+          isMember,
+          costs,
+          (member) => this.dispatchEvent(new CustomEvent('adopt', { detail: member })),
+          (member) => {
+            this.read = member;
+          },
+        ),
       )}`;
   }
 }

@@ -2,8 +2,8 @@ import { holdConstantWords } from '../../../physics/compare.js';
 import { isAllowed } from '../../../physics/limits.js';
 import type { Finding } from '../../../physics/results.js';
 import { type CostName, costs, figureOfMerit } from '../../../physics/sweep/costs.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { window90_kV } from '../../../physics/sweep/window.js';
-import type { MappedSetting } from '../../../physics/sweep.js';
 import { limitName } from '../../charts/limit-names.js';
 import type { MapBest, MapCell, MapMark, SweepMapData } from '../../charts/sweep-map-layout.js';
 import { investigationalWords } from '../curve-panel/curve-data.js';
@@ -25,8 +25,8 @@ export const techniqueMarks = (model: DeskModel): MapMark[] =>
   });
 
 /** The best allowed setting by a cost; null where none is allowed or known. */
-export const bestOf = (settings: readonly MappedSetting[], cost: CostName): MapBest | null => {
-  let best: { setting: MappedSetting; merit: number } | null = null;
+export const bestOf = (settings: readonly SweepSetting[], cost: CostName): MapBest | null => {
+  let best: { setting: SweepSetting; merit: number } | null = null;
   for (const setting of settings) {
     const merit = setting.values && figureOfMerit(setting.values, cost);
     if (merit === null || !isAllowed(setting.findings) || merit <= (best?.merit ?? 0)) continue;
@@ -51,7 +51,7 @@ export function mapData(
   model: DeskModel,
   { request }: SweepState,
   size: string,
-  settings: readonly MappedSetting[],
+  settings: readonly SweepSetting[],
   cost: CostName,
 ): SweepMapData {
   const { potentials_kV, filters } = request.axes;

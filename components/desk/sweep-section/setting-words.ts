@@ -1,11 +1,11 @@
 import { settingLabel } from '../../../physics/setting.js';
 import { type CostName, costs, figureOfMerit } from '../../../physics/sweep/costs.js';
-import type { MappedSetting } from '../../../physics/sweep.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { formatNumber, formatPercent } from '../../charts/format.js';
 
 /** A setting read off the map, in words: what it gives, what it costs, what forbids it. */
 export function settingWords(
-  setting: MappedSetting,
+  setting: SweepSetting,
   cost: CostName,
   best: number | null,
 ): { readonly name: string; readonly values: string; readonly limits: string } {

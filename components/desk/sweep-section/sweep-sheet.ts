@@ -23,7 +23,11 @@ export const sweepSheet = css`
     stroke-width: 1;
     opacity: 0.5;
   }
+  .missing {
+    fill: var(--paper);
+  }
   .forbidden,
+  .missing,
   .uncomputed {
     shape-rendering: crispEdges;
   }

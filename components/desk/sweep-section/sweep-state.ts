@@ -1,10 +1,10 @@
 import type { Case } from '../../../physics/case/schema.js';
 import type { HoldConstant } from '../../../physics/results.js';
 import type { CostName } from '../../../physics/sweep/costs.js';
+import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
+import { withNearest } from '../../../physics/sweep/with-nearest.js';
 import {
   combineSweep,
-  type MappedSetting,
-  mappedSettings,
   type Sweep,
   type SweepPiece,
   type SweepRequest,
@@ -44,21 +44,34 @@ export const piecesOfSize = (
   return at < 0 ? [] : pieces.slice(at * filters.length, (at + 1) * filters.length);
 };
 
-/** The settings of one size as far as they are computed, and whether that is all of them. */
-export const settingsOfSize = (
-  state: SweepState,
-  size: string,
-  costs: readonly CostName[],
-): { readonly settings: readonly MappedSetting[]; readonly isWhole: boolean } => {
+/** The settings of one size as far as they are computed, limits naming the nearest allowed. */
+export interface SizeSettings {
+  readonly settings: readonly SweepSetting[];
+  /** False while a filter is missing. */
+  readonly isWhole: boolean;
+}
+
+const made = new WeakMap<SweepPiece, { own: readonly (SweepPiece | null)[]; of: SizeSettings }>();
+
+/** The settings of one size; the same object while the pieces of that size are the same. */
+export const settingsOfSize = (state: SweepState, size: string): SizeSettings => {
   const own = piecesOfSize(state, size);
+  const first = own.find((piece) => piece !== null);
+  if (!first) return nothingYet;
+  const before = made.get(first);
+  if (before?.own.every((piece, i) => piece === own[i])) return before.of;
   const known = own.flatMap((piece) => piece?.settings ?? []);
-  return {
-    settings: mappedSettings(known, state.request.axes.filters, costs),
-    isWhole: own.length > 0 && own.every((piece) => piece !== null),
+  const of = {
+    settings: withNearest(known, state.request.axes.filters),
+    isWhole: own.every((piece) => piece !== null),
   };
+  made.set(first, { own, of });
+  return of;
 };
 
-/** The whole sweep, once every piece is there. */
+const nothingYet: SizeSettings = { settings: [], isWhole: false };
+
+/** The whole sweep with its frontier, once every piece is there: for files, not for every frame. */
 export const wholeSweep = (state: SweepState, costs: readonly CostName[]): Sweep | null => {
   const pieces = state.pieces.filter((piece) => piece !== null);
   return pieces.length === state.pieces.length

@@ -4,7 +4,6 @@ import type { Acquisition, Case } from './case/schema.js';
 import { backscatterFactor } from './dose/backscatter.js';
 import { deposition } from './dose/deposition.js';
 import { fieldArea_cm2 } from './dose/field-area.js';
-import { beamAtSkin, beamInFreeAir, primaryAtDetector } from './dose/path.js';
 import { skinToAirRatio } from './dose/skin.js';
 import { numberText } from './number-text.js';
 import { outputBeam } from './output-beam.js';
@@ -22,6 +21,7 @@ import {
 import type { Finding } from './results.js';
 import { responsesOn } from './scatter/index.js';
 import { type Setting, settingLabel } from './setting.js';
+import { beamAtSkin, beamInFreeAir, primaryAtDetector } from './stack/beam-path.js';
 
 /** Dose quantities of one frame for each mAs. */
 export interface DosePerLoad {

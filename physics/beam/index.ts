@@ -13,7 +13,7 @@ export { type ReferenceBeamName, referenceBeam } from './reference-beam.js';
 export { referenceQualities, referenceQualitySource } from './reference-beam-table.js';
 export { rippleVoltages_kV } from './ripple.js';
 export { sourceBeam } from './source-beam.js';
-export { type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
+export { outputDistance_mm, type TubeSetting, tungstenSpectrum } from './tube-spectrum.js';
 export {
   rescaleToAirKerma,
   type SourceBeam,

@@ -7,10 +7,7 @@ import { halfValueLayer_mm } from './half-value-layer.js';
 import { kEdges_keV } from './k-edges.js';
 import { referenceMaterial } from './reference-materials.js';
 import { type Spectrum, scaleSpectrum } from './spectrum.js';
-import { tungstenSpectrum } from './tube-spectrum.js';
-
-/** Distance at which the model gives the output. */
-const outputDistance_mm = 1000;
+import { outputDistance_mm, tungstenSpectrum } from './tube-spectrum.js';
 
 /** A reading's beam as the model makes it with output scale 1, before the inherent filter. */
 export interface ModelledReading {

@@ -28,6 +28,9 @@ export interface TubeSetting {
   readonly grid?: EnergyGrid;
 }
 
+/** Tube output is quoted at this distance from the focal spot. */
+export const outputDistance_mm = 1000;
+
 /** Electrons in one mAs: 10⁻³ C over the elementary charge. */
 const electrons_per_mAs = 1e-3 / elementaryCharge_C.value;
 /** One steradian at 1 m covers 10⁶ mm². */

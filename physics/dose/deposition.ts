@@ -1,9 +1,9 @@
+import { joulePerKeV } from '../../materials/index.js';
 import type { Spectrum } from '../beam/spectrum.js';
 import type { Stack } from '../stack/stack.js';
 import { fieldArea_cm2 } from './field-area.js';
 
-/** 1 keV in mJ, from the exact elementary charge (SI 2019). */
-export const mJ_per_keV = 1.602176634e-13;
+export const mJ_per_keV = joulePerKeV.value * 1e3;
 
 export interface Deposition {
   /** Energy imparted to the patient inside the field, mJ. */

@@ -53,11 +53,11 @@ export const leastAgentAmount = (
   if (!('made' in without)) return noAnswer(targetSdnr, without.findings);
   if (as.signedSdnr(0) >= targetSdnr) {
     const note = notNeeded(agent.name, as.signedSdnr(0), targetSdnr);
-    const findings = [note, ...limitsOf(settingAsSet(c, without).findings)];
+    const findings = [note, ...limitsOf(settingAsSet(withAgentAmount(c, 0), without).findings)];
     const value = { amount: 0, unit };
     return { value, target: targetSdnr, forward: as.signedSdnr(0), findings };
   }
-  const most = as.greatestPlaceable(greatest);
+  const most = Math.min(greatest, greatestHeld(c));
   const reached = as.signedSdnr(most);
   if (!(reached >= targetSdnr)) {
     const message = `SdNR ${numberText(targetSdnr)} is not reached with ${numberText(most)} ${unit} of ${agent.name}, the most that ${most < greatest ? 'the volume holds' : 'is allowed here'}; that gives ${numberText(reached)}.`;
@@ -66,7 +66,8 @@ export const leastAgentAmount = (
       blockedBy('agentAmount', message, { path, value: reached, bound: most }),
     ]);
   }
-  const amount = findRoot((x) => as.signedSdnr(x) - targetSdnr, 0, most, tolerance) ?? most;
+  const amount = findRoot((x) => as.signedSdnr(x) - targetSdnr, 0, most, tolerance);
+  if (amount === null) return noAnswer(targetSdnr, [notBracketed(agent.name)]);
   const found = as.point(amount);
   return {
     value: { amount, unit },
@@ -91,6 +92,28 @@ const greatestAmount = (c: Case): number => {
     : 10 * Math.max(value, 1);
 };
 
+/** The most the volume holds, in the case's own unit: the solute's volume is in proportion to it. */
+const greatestHeld = (c: Case): number => {
+  const { agent } = c.task.detail;
+  if (!agent) return 0;
+  const value = agent.amount.value > 0 ? agent.amount.value : least;
+  const { soluteVolumeFraction } = resolveAgent(c, {
+    ...agent,
+    amount: { ...agent.amount, value },
+  });
+  return value / soluteVolumeFraction;
+};
+
+/** An amount any carrier holds, to ask its volume of where the case's own is nothing. */
+const least = 1e-3;
+
+const notBracketed = (name: string): Finding =>
+  blockedBy(
+    'agentAmount',
+    `Between none and the greatest amount of ${name} some cannot be computed, so no smallest one is found.`,
+    { path: 'task.detail.agent.amount.value' },
+  );
+
 const notNeeded = (name: string, value: number, bound: number): Finding => ({
   code: 'agentNotNeeded',
   severity: 'note',
@@ -105,26 +128,9 @@ const pointsOf = (c: Case, technique: Technique, size: Size) => {
     operatingPoint(withAgentAmount(c, amount), technique, size);
   const signedSdnr = (amount: number): number => {
     const made = point(amount);
-    return 'made' in made ? sdnrOf(made) * Math.sign(made.made.readout.contrast.subject) : 0;
+    return 'made' in made
+      ? sdnrOf(made) * Math.sign(made.made.readout.contrast.subject)
+      : Number.NaN;
   };
-  const isPlaceable = (amount: number): boolean => {
-    try {
-      return 'made' in point(amount);
-    } catch {
-      // The volume cannot hold this amount.
-      return false;
-    }
-  };
-  /** The greatest amount, or the most of it that the carrier's volume holds (to a hundredth). */
-  const greatestPlaceable = (greatest: number): number => {
-    if (isPlaceable(greatest)) return greatest;
-    let [low, high] = [0, greatest];
-    while (high - low > 0.01 * high && high > 1e-9 * greatest) {
-      const middle = (low + high) / 2;
-      if (isPlaceable(middle)) low = middle;
-      else high = middle;
-    }
-    return low;
-  };
-  return { point, signedSdnr, greatestPlaceable };
+  return { point, signedSdnr };
 };

@@ -1,9 +1,6 @@
-import { airPath, attenuate } from '../beam/index.js';
+import { airPath, attenuate, outputDistance_mm } from '../beam/index.js';
 import { type Spectrum, scaleSpectrum } from '../beam/spectrum.js';
-import type { Stack } from '../stack/stack.js';
-
-/** Tube output is quoted at this distance from the focal spot. */
-export const outputDistance_mm = 1000;
+import type { Stack } from './stack.js';
 
 /**
  * Inverse square from the output distance; 1 in a parallel beam, whose fluence is the same all the

@@ -1,40 +1,55 @@
 import { type DBSchema, type IDBPDatabase, openDB } from 'idb';
 import type { Sheet } from './case-store.js';
 
-/** What is kept in the browser so that a crash loses nothing. */
-export interface KeptSheet extends Sheet {
-  readonly fileName: string | null;
-}
-
 interface DeskDatabase extends DBSchema {
-  sheets: { key: string; value: KeptSheet };
+  sheets: { key: string; value: Sheet };
 }
 
-const open = (): Promise<IDBPDatabase<DeskDatabase>> =>
-  openDB<DeskDatabase>('stratabeam', 1, {
-    upgrade: (database) => {
-      database.createObjectStore('sheets');
-    },
-  });
+/** Keeps the sheet on the desk in this browser, and finds it again. */
+export interface Autosave {
+  /** False when the browser would not keep it. */
+  readonly keep: (sheet: Sheet) => Promise<boolean>;
+  readonly recover: () => Promise<Sheet | null>;
+}
 
 /**
- * Keeps the sheet on the desk in this browser (IndexedDB). Where the browser refuses storage, keeping
- * does nothing and recovering finds nothing; the desk works all the same.
+ * Keeping in IndexedDB over one connection, opened when first needed and again after it was lost.
+ * Where the browser refuses storage, keeping says so and recovering finds nothing; the desk works
+ * all the same.
  */
-export const autosave = {
-  keep: async (sheet: KeptSheet): Promise<boolean> => {
+export function autosave(database: string): Autosave {
+  let connection: Promise<IDBPDatabase<DeskDatabase>> | null = null;
+  const forget = () => {
+    connection = null;
+  };
+  const connected = (): Promise<IDBPDatabase<DeskDatabase>> => {
+    connection ??= openDB<DeskDatabase>(database, 1, {
+      upgrade: (fresh) => {
+        fresh.createObjectStore('sheets');
+      },
+      // Another page wants to change the database: it must not wait for this one.
+      blocking: (_, __, event) => {
+        (event.target as IDBDatabase).close();
+        forget();
+      },
+      terminated: forget,
+    });
+    return connection;
+  };
+  const unlessRefused = async <T>(work: () => Promise<T>): Promise<T | null> => {
     try {
-      await (await open()).put('sheets', sheet, 'desk');
-      return true;
+      return await work();
     } catch {
-      return false;
-    }
-  },
-  recover: async (): Promise<KeptSheet | null> => {
-    try {
-      return (await (await open()).get('sheets', 'desk')) ?? null;
-    } catch {
+      // The next attempt begins afresh, over a connection of its own.
+      connection?.then((open) => open.close()).catch(() => undefined);
+      forget();
       return null;
     }
-  },
-};
+  };
+  return {
+    keep: async (sheet) =>
+      (await unlessRefused(async () => (await connected()).put('sheets', sheet, 'desk'))) !== null,
+    recover: async () =>
+      (await unlessRefused(async () => (await connected()).get('sheets', 'desk'))) ?? null,
+  };
+}

@@ -2,10 +2,11 @@ import { fileOpen, fileSave } from 'browser-fs-access';
 import { type Fault, longestCase, readCaseText } from '../../physics/case/index.js';
 import type { Sheet } from './case-store.js';
 import type { Json } from './path.js';
+import { unlessLeft } from './unless-left.js';
 
 /** What came out of files handed in: a case with its tables, tables alone, or faults. */
 export type Handed =
-  | { readonly kind: 'case'; readonly sheet: Sheet; readonly fileName: string }
+  | { readonly kind: 'case'; readonly sheet: Sheet }
   | { readonly kind: 'tables'; readonly files: Readonly<Record<string, string>> }
   | { readonly kind: 'faults'; readonly fileName: string; readonly faults: readonly Fault[] };
 
@@ -38,24 +39,24 @@ export async function readHanded(files: readonly File[]): Promise<Handed> {
   if ('fault' in read) return refuse([read.fault]);
   return {
     kind: 'case',
-    fileName: file.name,
-    sheet: { document: read.value as Json, files: tables },
+    sheet: { document: read.value as Json, files: tables, fileName: file.name },
   };
 }
 
-/** Asks for files through the browser; null when the person thinks better of it. */
-export async function chooseFiles(): Promise<File[] | null> {
-  try {
-    return await fileOpen({
+/**
+ * Asks for files through the browser; null when the person thinks better of it.
+ *
+ * @throws whatever the browser throws when it cannot ask.
+ */
+export const chooseFiles = (): Promise<File[] | null> =>
+  unlessLeft(() =>
+    fileOpen({
       description: 'Case file and its tables',
       extensions: ['.json', '.csv'],
       multiple: true,
       id: 'stratabeam',
-    });
-  } catch {
-    return null;
-  }
-}
+    }),
+  );
 
 /** `Aortography, abdomen` → `aortography-abdomen.case.json`. */
 export function fileNameFor(title: string): string {
@@ -67,13 +68,20 @@ export function fileNameFor(title: string): string {
   return `${plain.replace(/[\s_]+/g, '-').slice(0, 60) || 'untitled'}.case.json`;
 }
 
-/** Writes the document as a case file; false when the person thinks better of it. */
-export async function saveCase(document: Json, fileName: string): Promise<boolean> {
+/**
+ * Writes the document as a case file.
+ *
+ * @returns the name it was saved under, where the person may choose one; null when they think better.
+ * @throws whatever the browser throws when the file cannot be written.
+ */
+export function saveCase(
+  document: Json,
+  fileName: string,
+  write: typeof fileSave = fileSave,
+): Promise<string | null> {
   const blob = new Blob([`${JSON.stringify(document, null, 2)}\n`], { type: 'application/json' });
-  try {
-    await fileSave(blob, { fileName, extensions: ['.json'], id: 'stratabeam' });
-    return true;
-  } catch {
-    return false;
-  }
+  return unlessLeft(async () => {
+    const handle = await write(blob, { fileName, extensions: ['.json'], id: 'stratabeam' });
+    return handle?.name ?? fileName;
+  });
 }

@@ -63,3 +63,11 @@ export function redo<T>(history: History<T>): History<T> {
     lastTime_ms: Number.NEGATIVE_INFINITY,
   };
 }
+
+/** Every step changed in place, with no step added: what was, is, and was undone alike. */
+export const mapSteps = <T>(history: History<T>, change: (step: T) => T): History<T> => ({
+  ...history,
+  past: history.past.map(change),
+  present: change(history.present),
+  future: history.future.map(change),
+});

@@ -99,7 +99,7 @@ describe('the desk', () => {
 
   it('stands with three techniques', async () => {
     const store = createCaseStore(
-      { document: sampleDocument as unknown as Json, files: {} },
+      { document: sampleDocument as unknown as Json, files: {}, fileName: null },
       () => 0,
     );
     store.change(addTechnique(1));
@@ -109,7 +109,10 @@ describe('the desk', () => {
 
   it('stands with one technique alone', async () => {
     const alone = { ...sampleDocument, techniques: [sampleDocument.techniques[0]] };
-    const store = createCaseStore({ document: alone as unknown as Json, files: {} }, () => 0);
+    const store = createCaseStore(
+      { document: alone as unknown as Json, files: {}, fileName: null },
+      () => 0,
+    );
     const one = await page({ model: { ...sampleModel, draft: store.state().draft, right: null } });
     expect(await axeFaults(one)).to.deep.equal([]);
     expect(wordsOf(one)).to.contain('nothing to weigh');

@@ -88,7 +88,7 @@ export function type(input: HTMLInputElement, text: string): void {
 /** The sample desk, its case edited as given. */
 export function modelWith(...edits: [path: string, value: Json][]): DeskModel {
   const store = createCaseStore(
-    { document: sampleDocument as unknown as Json, files: {} },
+    { document: sampleDocument as unknown as Json, files: {}, fileName: null },
     () => 0,
   );
   for (const [path, value] of edits) store.setAt(path, value);

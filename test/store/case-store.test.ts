@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { createCaseStore } from '../../components/store/case-store.js';
+import { canStand, createCaseStore } from '../../components/store/case-store.js';
 import { faultAt, isAssumed, shownAt } from '../../components/store/draft.js';
 import { removeLayer } from '../../components/store/layer-changes.js';
 import type { Json } from '../../components/store/path.js';
@@ -8,7 +8,7 @@ import { sampleDocument } from '../desk/sample/case.js';
 const document = sampleDocument as unknown as Json;
 const newStore = () => {
   let now = 0;
-  return createCaseStore({ document, files: {} }, () => (now += 10_000));
+  return createCaseStore({ document, files: {}, fileName: null }, () => (now += 10_000));
 };
 
 describe('the case on the desk', () => {
@@ -66,7 +66,7 @@ describe('the case on the desk', () => {
       ...sampleDocument,
       room: { ...sampleDocument.room, tube: { anodeAngle_deg: 95 } },
     } as unknown as Json;
-    expect(store.open({ document: broken, files: {} })).toEqual([]);
+    expect(store.open({ document: broken, files: {}, fileName: null })).toEqual([]);
     expect(store.state().draft.faults.map(({ path }) => path)).toEqual([
       'room.tube.anodeAngle_deg',
     ]);
@@ -83,7 +83,7 @@ describe('the case on the desk', () => {
       { format: 'other' },
       { format: 'stratabeam.case', version: 1 },
     ] as Json[]) {
-      expect(store.open({ document: bad, files: {} }).length).toBeGreaterThan(0);
+      expect(store.open({ document: bad, files: {}, fileName: null }).length).toBeGreaterThan(0);
       expect(store.state().draft).toBe(before);
     }
   });
@@ -93,10 +93,71 @@ describe('the case on the desk', () => {
     store.open({
       document: { ...(sampleDocument as object), title: 'Another' } as Json,
       files: {},
+      fileName: null,
     });
     expect(store.state().draft.case.title).toBe('Another');
     store.undo();
     expect(store.state().draft.case.title).toBe(sampleDocument.title);
+  });
+
+  test('faulty values of a case opened are never stood in for by the case before it', () => {
+    const store = newStore();
+    store.setAt('room.tube.anodeAngle_deg', 9);
+    const room = { ...sampleDocument.room, tube: { anodeAngle_deg: 95 } };
+    const broken = { ...sampleDocument, room } as unknown as Json;
+    store.open({ document: broken, files: {}, fileName: null });
+    expect(store.state().draft.case.room.tube.anodeAngle_deg).toBe(12);
+  });
+
+  test('a document that cannot be read any more stands with its faults over the case last good', () => {
+    const store = newStore();
+    const good = store.state().draft.case;
+    store.change(() => 'nothing of a case');
+    const { draft } = store.state();
+    expect(draft.document).toBe('nothing of a case');
+    expect(draft.case).toBe(good);
+    expect(draft.faults.length).toBeGreaterThan(0);
+    store.undo();
+    expect(store.state().draft.faults).toEqual([]);
+  });
+
+  test('parts of the case that an edit left alone stay the very same objects', () => {
+    const store = newStore();
+    const before = store.state().draft.case;
+    store.setAt('techniques[1].potential_kV', 75);
+    const after = store.state().draft.case;
+    expect(after.room).toBe(before.room);
+    expect(after.techniques[0]).toBe(before.techniques[0]);
+    expect(after.techniques[1]).not.toBe(before.techniques[1]);
+  });
+
+  test('a sheet says whether it leaves anything to start from', () => {
+    expect(canStand({ document, files: {}, fileName: null })).toBe(true);
+    expect(canStand({ document: {}, files: {}, fileName: null })).toBe(false);
+  });
+
+  test('the name of the file goes back with the case that undo brings back', () => {
+    const store = newStore();
+    store.named('a.case.json');
+    store.open({
+      document: { ...sampleDocument } as unknown as Json,
+      files: {},
+      fileName: 'b.case.json',
+    });
+    expect(store.state().fileName).toBe('b.case.json');
+    store.undo();
+    expect(store.state().fileName).toBe('a.case.json');
+    store.redo();
+    expect(store.state().fileName).toBe('b.case.json');
+  });
+
+  test('a case saved keeps its name when edits before the saving are undone', () => {
+    const store = newStore();
+    store.setAt('title', 'one');
+    store.named('one.case.json');
+    store.undo();
+    expect(store.state().fileName).toBe('one.case.json');
+    expect(store.state().canUndo).toBe(false);
   });
 
   test('listeners hear every change with a rising revision until they leave', () => {

@@ -18,7 +18,7 @@ export interface SectionLink {
  * The head of the page: case title and question, the sections, the case menu and the size shown.
  *
  * Properties: `model`, `sections`, `here` (id of the section in view), `canUndo`, `canRedo`,
- * `examples` (names), `status` (a short sentence on saving), `paper` (auto, light, dark).
+ * `examples` (names), `status` (a short sentence on saving), `isKept` (whether the browser keeps the case), `paper` (auto, light, dark).
  * Events: `command` (a DeskCommand), `example` (its name), `choose-size` (its name), `case-edit`.
  * Keyboard: native; the desk itself listens for Ctrl+Z, Ctrl+Shift+Z, Ctrl+S, Ctrl+O.
  * Parts: none.
@@ -32,6 +32,8 @@ export class DeskHeader extends LitElement {
   @property({ type: Boolean }) canRedo = false;
   @property({ attribute: false }) examples: readonly string[] = [];
   @property() status = '';
+  /** False while the browser does not keep the case against a crash. */
+  @property({ attribute: false }) isKept = true;
   @property() paper = 'auto';
 
   static override styles = css`
@@ -178,7 +180,7 @@ export class DeskHeader extends LitElement {
         ${this.command('open', 'Open…', true, 'Ctrl+O')} ${this.command('save', 'Save', true, 'Ctrl+S')}
         <label>Examples <select @change=${this.chosen('example')}><option value="">choose</option>${this.examples.map((name) => html`<option value=${name}>${name}</option>`)}</select></label>
         ${this.command('undo', 'Undo', this.canUndo, 'Ctrl+Z')} ${this.command('redo', 'Redo', this.canRedo, 'Ctrl+Shift+Z')}
-        <span class="status" role="status">${this.status}</span>
+        <span class="status" role="status">${this.status}${this.isKept ? '' : `${this.status ? '; ' : ''}not kept in this browser: save to a file`}</span>
         <label>size <select @change=${this.chosen('choose-size')}>${sizesOf(draft.case.patient).map(
           ({ name, thickness_mm }) =>
             html`<option value=${name} ?selected=${name === sizeName} .selected=${name === sizeName}>${name}, ${formatEntry(thickness_mm)} mm</option>`,

@@ -45,7 +45,7 @@ export const sections = [
  * paper below, cautions. Lives in the page itself, not in a shadow, so that sections have addresses.
  *
  * Properties: `model` (nothing is drawn before it is set), `scan`, `curveStale`, `hold`, and what the
- * head shows: `examples`, `canUndo`, `canRedo`, `status`, `paper`; `refused` (a file not opened and
+ * head shows: `examples`, `canUndo`, `canRedo`, `status`, `isKept`, `paper`; `refused` (a file not opened or saved and
  * why), `trouble` (why there is no answer); `check` and `tracksDrawn` of the check by transport; `pool`, the
  * workers of sweep, sizes and solving. Events: `case-edit`, `command`, `example`,
  * `choose-size`, `choose-hold`, `show-technique` from what it holds.
@@ -60,6 +60,8 @@ export class DeskPage extends LitElement {
   @property({ type: Boolean }) canUndo = false;
   @property({ type: Boolean }) canRedo = false;
   @property() status = '';
+  /** False while the browser does not keep the case against a crash. */
+  @property({ attribute: false }) isKept = true;
   @property() paper: Paper = 'auto';
   @property({ attribute: false }) refused: { heading: string; faults: readonly Fault[] } | null =
     null;
@@ -109,7 +111,7 @@ export class DeskPage extends LitElement {
     const count = faults.length === 1 ? 'One fault stands' : `${faults.length} faults stand`;
     return html`<div class="head">
       <desk-header .model=${this.model} .sections=${sections} .here=${this.here} .examples=${this.examples}
-        .canUndo=${this.canUndo} .canRedo=${this.canRedo} .status=${this.status} .paper=${this.paper}></desk-header>
+        .canUndo=${this.canUndo} .canRedo=${this.canRedo} .status=${this.status} .isKept=${this.isKept} .paper=${this.paper}></desk-header>
       ${
         this.refused
           ? html`<fault-list closable .heading=${this.refused.heading} .faults=${this.refused.faults} @close=${() => {

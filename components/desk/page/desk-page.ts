@@ -46,7 +46,8 @@ export const sections = [
  *
  * Properties: `model` (nothing is drawn before it is set), `scan`, `curveStale`, `hold`, and what the
  * head shows: `examples`, `canUndo`, `canRedo`, `status`, `isKept`, `paper`; `refused` (a file not opened or saved and
- * why), `trouble` (why there is no answer); `check` and `tracksDrawn` of the check by transport; `pool`, the
+ * why), `trouble` and `depthTrouble` (why there is
+ * no answer, none along the depth); `check` and `tracksDrawn` of the check by transport; `pool`, the
  * workers of sweep, sizes and solving. Events: `case-edit`, `command`, `example`,
  * `choose-size`, `choose-hold`, `show-technique` from what it holds.
  */
@@ -66,6 +67,7 @@ export class DeskPage extends LitElement {
   @property({ attribute: false }) refused: { heading: string; faults: readonly Fault[] } | null =
     null;
   @property() trouble = '';
+  @property() depthTrouble = '';
   @property({ attribute: false }) check: CheckState | null = null;
   @property({ type: Boolean }) tracksDrawn = false;
   @property({ attribute: false }) pool: SweepPool | null = null;
@@ -120,7 +122,7 @@ export class DeskPage extends LitElement {
           : nothing
       }
       <fault-list .heading="${count}; results use the last good values in their place" .faults=${faults}></fault-list>
-      ${this.trouble ? html`<p class="trouble" role="alert">${this.trouble}</p>` : nothing}
+      ${[this.trouble, this.depthTrouble].map((words) => (words ? html`<p class="trouble" role="alert">${words}</p>` : nothing))}
     </div>`;
   }
 

@@ -5,11 +5,10 @@ import { isCurve } from '../../../physics/control.js';
 import { mixOutcomes, outcomeSentence } from '../../../physics/sizes.js';
 import { techniqueCsv, techniqueTable } from '../../charts/technique-table.js';
 import { thicknessChart } from '../../charts/thickness-chart.js';
-import { fileNameFor } from '../../store/case-files.js';
-import { saveTable } from '../../store/save-table.js';
 import { controlOfKind } from '../../store/technique-changes.js';
 import type { SweepPool } from '../../workers/sweep-pool.js';
 import { requestEdit } from '../fields/case-edit.js';
+import { saveCsv } from '../fields/save-csv.js';
 import { type DeskModel, evaluationOf } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { ratioSheet } from '../sheets/ratio-sheet.js';
@@ -138,8 +137,7 @@ export class SizesSection extends LitElement {
     const { table } = mixOutcomes(c, mix.evaluations, mix.comparisons);
     if (table.length === 0) return nothing;
     const names = c.techniques.map(({ name }) => name);
-    const save = () =>
-      saveTable(techniqueCsv(table), fileNameFor(this.sheetTitle).replace('.case.json', '.csv'));
+    const save = () => saveCsv(this, this.sheetTitle, techniqueCsv(table));
     const print = () =>
       printSheet(
         this.sheetTitle,

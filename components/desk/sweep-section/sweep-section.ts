@@ -8,10 +8,9 @@ import { usualCosts, wholeRoom } from '../../../physics/sweep.js';
 import { sweepCsv } from '../../charts/sweep-csv.js';
 import { filterName } from '../../charts/sweep-map.js';
 import type { SweepMapData } from '../../charts/sweep-map-layout.js';
-import { fileNameFor } from '../../store/case-files.js';
-import { saveTable } from '../../store/save-table.js';
 import type { SweepPool } from '../../workers/sweep-pool.js';
 import { requestEdit } from '../fields/case-edit.js';
+import { saveCsv } from '../fields/save-csv.js';
 import { type DeskModel, sizeShown } from '../model/desk-model.js';
 import { runSheet } from '../sheets/run-sheet.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
@@ -150,11 +149,8 @@ export class SweepSection extends LitElement {
   private save(sweep: SweepState) {
     const whole = wholeSweep(sweep, usualCosts);
     if (!whole) return;
-    const name = fileNameFor(`${this.model.draft.case.title} sweep`);
-    void saveTable(
-      sweepCsv(whole.settings, whole.holdConstant, whole.investigationalAgent),
-      name.replace('.case.json', '.csv'),
-    );
+    const table = sweepCsv(whole.settings, whole.holdConstant, whole.investigationalAgent);
+    void saveCsv(this, `${this.model.draft.case.title} sweep`, table);
   }
 
   private chooser() {

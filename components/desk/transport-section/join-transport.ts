@@ -1,10 +1,10 @@
 import type { ParsedCase } from '../../../physics/case/index.js';
 import { startEvaluator } from '../../workers/evaluator.js';
-import { latestWins, superseded } from '../../workers/latest-wins.js';
 import { makeEvaluationWorker } from '../../workers/make-evaluation-worker.js';
 import { makeTransportWorker } from '../../workers/make-transport-worker.js';
 import { transportPool } from '../../workers/transport-pool.js';
 import type { DeskPage } from '../page/desk-page.js';
+import { askDepths } from './ask-depths.js';
 import { checkRunner } from './check-runner.js';
 import { type CheckState, checkBasis, isRunning } from './check-state.js';
 import { isDepthInk } from './depth-shadings.js';
@@ -47,18 +47,16 @@ export function joinTransport(page: DeskPage, parsed: () => ParsedCase): () => v
   };
 
   let ink = '';
-  const depths = latestWins(async ({ size }: { readonly size: string }) => {
-    const [, profiles] = await Promise.all([aside().load(parsed()), aside().depths(size)]);
-    return profiles;
+  const ask = askDepths(aside, parsed, {
+    depths: (depths) => {
+      page.model = { ...page.model, depths };
+    },
+    trouble: (words) => {
+      page.depthTrouble = words;
+    },
   });
-  const askDepths = async () => {
-    if (!isDepthInk(ink)) return;
-    const asked = parsed();
-    const profiles = await depths({ size: page.model.sizeName }).catch(
-      (): typeof superseded => superseded,
-    );
-    if (profiles === superseded || asked !== parsed()) return;
-    page.model = { ...page.model, depths: profiles };
+  const askAgain = () => {
+    if (isDepthInk(ink)) void ask(page.model.sizeName);
   };
 
   page.addEventListener('run-check', ({ detail }) => void runner.run(parsed(), detail));
@@ -69,12 +67,12 @@ export function joinTransport(page: DeskPage, parsed: () => ParsedCase): () => v
   });
   page.addEventListener('choose-ink', ({ detail }) => {
     ink = detail;
-    void askDepths();
+    askAgain();
   });
   return () => {
     const { check } = page;
     if (check && isRunning(check) && !isCurrent(check)) runner.cancel('the case has changed');
     drawTracks();
-    void askDepths();
+    askAgain();
   };
 }

@@ -17,23 +17,29 @@ import { tubeChecks } from './tube-checks.js';
 
 export type { CheckRow, Verdict } from './check-row.js';
 
+let made: readonly CheckRow[] | undefined;
+
 /**
- * Every check, in the order of the beam path. A check falls short when the computed value is farther
- * from the published one than its tolerance, which is the model's own and never widened to fit.
+ * Every check, in the order of the beam path, computed once. A check falls short when the computed
+ * value is farther from the published one than its tolerance, which is the model's own and never
+ * widened to fit.
  */
-export const publishedChecks = (): readonly CheckRow[] => [
-  ...attenuationChecks(),
-  ...edgeChecks(),
-  ...compositionChecks(),
-  ...agentChecks(),
-  ...gadoliniumChecks(),
-  ...tubeChecks(),
-  ...qualityChecks(),
-  ...monoChecks(),
-  ...detectorChecks(),
-  ...scatterChecks(),
-  ...backscatterChecks(),
-  ...optimumChecks(),
-  ...tradeChecks(),
-  ...ruleChecks(),
-];
+export const publishedChecks = (): readonly CheckRow[] => {
+  made ??= [
+    ...attenuationChecks(),
+    ...edgeChecks(),
+    ...compositionChecks(),
+    ...agentChecks(),
+    ...gadoliniumChecks(),
+    ...tubeChecks(),
+    ...qualityChecks(),
+    ...monoChecks(),
+    ...detectorChecks(),
+    ...scatterChecks(),
+    ...backscatterChecks(),
+    ...optimumChecks(),
+    ...tradeChecks(),
+    ...ruleChecks(),
+  ];
+  return made;
+};

@@ -4,8 +4,9 @@ import { sampleJson } from '../physics/sample-case.js';
 import { runCommand } from './run-command.js';
 
 const text = JSON.stringify(sampleJson);
+/** One worker unless told otherwise: a thread that runs from source takes a second to start. */
 const answered = (...words: string[]) =>
-  runCommand(['transport', 'x.json', ...words], { 'x.json': text });
+  runCommand(['transport', 'x.json', '--workers', '1', ...words], { 'x.json': text });
 
 /** An answer with everything but the speed, which no two runs share. */
 const bits = (out: string): CheckReport => ({ ...JSON.parse(out), photonsPerSecond: null });
@@ -128,7 +129,7 @@ describe('stratabeam transport', () => {
       ],
     };
     const room = { ...sampleJson.room, source, grid: null };
-    const { code, err } = await runCommand(['transport', 'x.json'], {
+    const { code, err } = await runCommand(['transport', 'x.json', '--workers', '1'], {
       'x.json': JSON.stringify({ ...sampleJson, room }),
     });
     expect(code).toBe(2);

@@ -5,10 +5,12 @@ import { findingsOf } from './findings.js';
 import { framesPerRun } from './frames.js';
 import { nearestAllowedWords } from './limits/nearest-allowed.js';
 import { isAllowedBySetting, isOfSetting, limitFindings } from './limits.js';
+import { numberText } from './number-text.js';
 import type { OperatingPoint } from './operating-point.js';
 import { iodineEquivalent_mg_per_cm2, noiseAt, readoutWeights, sdnrAt } from './readout/index.js';
 import type { Evaluation, Finding } from './results.js';
 import { layerTransmission } from './stack/layer-transmission.js';
+import { unsharpnessFindings, unsharpnessOf } from './unsharpness.js';
 
 /**
  * All results of one technique at one size, from its operating point: what the beam is, what the
@@ -25,6 +27,8 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
   const beam = beamQuality(output, c.room.source ? null : setting.potential_kV);
   const dose = doseAt(made, acquisition, tubeLoad_mAs);
   const exposure = exposureAt(c, acquisition, setting.potential_kV, tubeLoad_mAs);
+  const sdnr = sdnrAt(readout, tubeLoad_mAs);
+  const unsharpness = unsharpnessOf(c, placement.detail, exposure.exposureTime_ms);
   const detectorAirKerma_uGy = readout.detectorAirKerma_uGy_per_mAs * tubeLoad_mAs;
   const path = `techniques[${index}]`;
   return {
@@ -54,7 +58,7 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
       ),
     },
     noise: noiseAt(readout, tubeLoad_mAs),
-    sdnr: sdnrAt(readout, tubeLoad_mAs),
+    sdnr,
     dose,
     detector: {
       airKerma_uGy: detectorAirKerma_uGy,
@@ -62,11 +66,14 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
       signal_keV_per_mm2: readout.signalTotal_per_mm2_per_mAs * tubeLoad_mAs,
     },
     exposure,
+    unsharpness,
     figureOfMerit: figureOfMeritAt(c, made, dose, tubeLoad_mAs),
     findings: findingsOf(
       withNearest(c, point, [
         ...point.findings,
         ...placement.findings,
+        ...belowRose(c, sdnr),
+        ...unsharpnessFindings(c, unsharpness),
         ...limitFindings({
           case: c,
           setting,
@@ -85,6 +92,21 @@ export const evaluate = (c: Case, point: OperatingPoint, index: number): Evaluat
     ),
   };
 };
+
+/** A detail below the Rose threshold is not seen with confidence, whatever it costs. */
+const belowRose = ({ task }: Case, sdnr: number): Finding[] =>
+  sdnr >= task.roseThreshold
+    ? []
+    : [
+        {
+          code: 'belowRose',
+          severity: 'caution',
+          message: `SdNR ${numberText(sdnr)} is below the Rose threshold of ${numberText(task.roseThreshold)}: the detail is not seen with confidence.`,
+          path: 'task.roseThreshold',
+          value: sdnr,
+          bound: task.roseThreshold,
+        },
+      ];
 
 /** A limit without a remedy of its own names the nearest setting of the room that is allowed. */
 const withNearest = (c: Case, point: OperatingPoint, findings: Finding[]): Finding[] => {

@@ -22,6 +22,7 @@ export const caseFindings = (c: Case): Finding[] => {
       path: 'room.readings',
     });
   }
+  findings.push(...unruled(c), ...notUsed(c));
   const [width_mm, height_mm] = c.room.geometry.field_mm;
   if (Math.max(width_mm, height_mm) > 1.001 * Math.min(width_mm, height_mm)) {
     findings.push({
@@ -41,6 +42,41 @@ export const caseFindings = (c: Case): Finding[] => {
     });
   }
   return findings;
+};
+
+/** What no rule is entered for is not tested, and silence is no pass. */
+const unruled = (c: Case): Finding[] => {
+  const kinds = c.room.rules.map(({ kind }) => kind);
+  const isRated = c.techniques.some(({ acquisition }) => acquisition.mode === 'fluoroscopy');
+  const missing = [
+    ...(c.room.source || kinds.includes('minimum-hvl') ? [] : ['minimum half-value layer']),
+    ...(isRated && !kinds.includes('kerma-rate') ? ['kerma rate'] : []),
+  ];
+  return missing.map((words) => ({
+    code: 'noRuleEntered',
+    severity: 'caution' as const,
+    message: `No rule for the ${words} is entered, so none is tested; enter the one that binds this room with its source and date.`,
+    path: 'room.rules',
+    value: null,
+  }));
+};
+
+/** Parts of a case that are kept and checked for form, but enter no number of this version. */
+const notUsed = (c: Case): Finding[] => {
+  const entered = {
+    agentsCompared: c.agentsCompared.length,
+    priors: c.priors.length,
+    measuredChecks: c.measuredChecks.length,
+    monitoring: c.monitoring === null ? 0 : 1,
+  };
+  return Object.entries(entered)
+    .filter(([, count]) => count > 0)
+    .map(([path]) => ({
+      code: 'enteredNotUsed',
+      severity: 'caution' as const,
+      message: `${path}: is kept with the case, but no number of this version rests on it.`,
+      path,
+    }));
 };
 
 /** Said with every result of a technique. */

@@ -132,6 +132,15 @@ export interface Exposure {
   readonly power_kW: number | null;
 }
 
+/** Blur in the plane of the detail; not part of SdNR. */
+export interface Unsharpness {
+  readonly focalSpot_mm: number;
+  readonly pixel_mm: number;
+  readonly motion_mm: number;
+  /** Root sum square of the three. */
+  readonly total_mm: number;
+}
+
 /** SdNR² per named cost; null where that cost is nothing or there is none. */
 export interface FigureOfMerit {
   readonly perIncidentAirKerma_per_mGy: number | null;
@@ -167,6 +176,7 @@ export interface Evaluation {
     readonly signal_keV_per_mm2: number;
   };
   readonly exposure: Exposure;
+  readonly unsharpness: Unsharpness;
   readonly figureOfMerit: FigureOfMerit;
   readonly findings: readonly Finding[];
 }

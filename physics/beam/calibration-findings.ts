@@ -30,6 +30,9 @@ const named = {
   },
 } as const;
 
+/** A residual beyond this contradicts the model: no kerma rests on such a calibration. */
+const contradiction_percent = 20;
+
 /** Cautions about a calibration: parameters outside what tubes show, readings not met. */
 export function calibrationFindings(
   fit: TubeFit,
@@ -69,7 +72,10 @@ function residualFindings(
     return [
       {
         code: 'readingNotMet',
-        severity: 'caution' as const,
+        severity:
+          Math.abs(relative_percent) > contradiction_percent
+            ? ('limit' as const)
+            : ('caution' as const),
         message: `${path}: measured ${numberText(measured)}, the calibrated model says ${numberText(model)} (${numberText(relative_percent)} %, beyond ${numberText(bound)} %); repeat the reading or check its potential and filter.`,
         path,
         value: relative_percent,

@@ -1,5 +1,6 @@
 import { numberText } from '../number-text.js';
 import type { Finding } from '../results.js';
+import { smallestSide_mm } from '../unsharpness.js';
 import { apartTexts } from './apart-texts.js';
 import type { LimitInputs } from './limit-inputs.js';
 
@@ -27,14 +28,15 @@ const detectorLimits = ({ case: c, detectorAirKerma_uGy: value, path }: LimitInp
   ];
 };
 
-/** Share of the detail's size that motion may blur before the exposure is too slow (assumed). */
+/** Share of the detail's smallest side across the beam that motion may blur before the exposure is too slow (assumed). */
 const motionShare = 0.5;
 
 const motionLimits = ({ case: c, exposure }: LimitInputs): Finding[] => {
-  const { motion_mm_per_s, detail } = c.task;
+  const { motion_mm_per_s } = c.task;
   const value = exposure.exposureTime_ms;
   if (value === null || motion_mm_per_s <= 0) return [];
-  const bound = ((motionShare * detail.size_mm) / motion_mm_per_s) * 1000;
+  const side_mm = smallestSide_mm(c);
+  const bound = ((motionShare * side_mm) / motion_mm_per_s) * 1000;
   if (value <= bound) return [];
   const [is, most] = apartTexts(value, bound);
   const blur_mm = (motion_mm_per_s * value) / 1000;
@@ -42,7 +44,7 @@ const motionLimits = ({ case: c, exposure }: LimitInputs): Finding[] => {
     {
       code: 'motion',
       severity: 'limit',
-      message: `Motion of ${motion_mm_per_s} mm/s blurs ${numberText(blur_mm)} mm in ${is} ms, more than half the detail's ${detail.size_mm} mm; the exposure must not exceed ${most} ms.`,
+      message: `Motion of ${motion_mm_per_s} mm/s blurs ${numberText(blur_mm)} mm in ${is} ms, more than half the detail's smallest side of ${numberText(side_mm)} mm; the exposure must not exceed ${most} ms.`,
       path: 'task.motion_mm_per_s',
       value,
       bound,

@@ -2,7 +2,7 @@
 
 export { scatterRange_keV } from './energy-nodes.js';
 export { equivalentSquare_mm } from './geometry.js';
-export { responsesOn } from './on-channels.js';
+export { responsesOn, toChannels } from './on-channels.js';
 export type { DetectorScatter, ScatterResponses } from './responses.js';
 export { firstOrderResponses, scatterResponses } from './scatter-responses.js';
 export type { ScatterDetector, ScatterGrid } from './scores.js';

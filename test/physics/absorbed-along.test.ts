@@ -27,7 +27,7 @@ const sum = (values: readonly number[]) =>
 
 describe('absorbed energy along the depth', () => {
   it('adds up to the energy imparted, and to what each layer gets', () => {
-    const imparted = (point.made.dose.energyImparted_mJ ?? 0) * point.tubeLoad_mAs;
+    const imparted = point.made.dose.energyImparted_mJ_per_mAs * point.tubeLoad_mAs;
     expect(sum(along.energy_mJ_per_mm) / imparted).toBeCloseTo(1, 3);
     const { stack } = point.made.placement;
     stack.layers.forEach(({ material, thickness_mm }, layer) => {
@@ -35,7 +35,7 @@ describe('absorbed energy along the depth', () => {
       const middle_mm = along.faces_mm[along.layers.indexOf(layer)] + thickness_mm / 2;
       const area_cm2 = fieldArea_cm2(stack, stack.sourceToSkin_mm + middle_mm);
       const mass_g = (material.density_g_per_cm3 * thickness_mm * area_cm2) / 10;
-      const dose_mGy = (point.made.dose.layerAbsorbedDose_mGy?.[layer] ?? 0) * point.tubeLoad_mAs;
+      const dose_mGy = point.made.dose.layerAbsorbedDose_mGy_per_mAs[layer] * point.tubeLoad_mAs;
       // 1 mJ/g is 1000 mGy.
       expect((sum(own) / mass_g) * 1000).toBeCloseTo(dose_mGy, 3);
     });

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { firstScatterAlong } from '../../physics/first-scatter-along.js';
 import { operatingPoint } from '../../physics/operating-point.js';
 import { prepare } from '../../physics/prepare.js';
-import { firstOrderResponses, responsesOn } from '../../physics/scatter/index.js';
+import { firstOrderResponses, toChannels } from '../../physics/scatter/index.js';
 import { sizesOf } from '../../physics/stack/sizes.js';
 import { sampleCase } from './sample-case.js';
 
@@ -34,8 +34,8 @@ describe('first scatter along the depth', () => {
       const { energies_keV } = made.output;
       const table = made.chain.grid?.table ?? null;
       const whole = firstOrderResponses(made.placement.stack, prepare(c).detector, table);
-      const on = responsesOn(whole, energies_keV);
-      const ratio = (table ? on.behindGrid : on.withoutGrid)?.signal ?? new Float64Array();
+      const { signal } = (table ? whole.behindGrid : whole.withoutGrid) ?? whole.withoutGrid;
+      const ratio = toChannels(whole.energies_keV, energies_keV)(signal);
       const { epsilon } = made.chain.detector.on(energies_keV);
       const passed = table?.primaryOn(energies_keV) ?? energies_keV.map(() => 1);
       let scatter = 0;

@@ -153,3 +153,37 @@ describe('weighing a case', () => {
     expect(mixed.findings.some(({ severity }) => severity === 'limit')).toBe(true);
   });
 });
+
+describe('what a reader must be told', () => {
+  it('says when the detail is below the Rose threshold', () => {
+    const faint = weigh(
+      sampleCase({
+        task: { roseThreshold: 100 },
+        techniques: [{ ...sampleJson.techniques[0], control: { detectorAirKerma_uGy: 0.02 } }],
+      }),
+    );
+    expect(faint.evaluations[0].findings.map(({ code }) => code)).toContain('belowRose');
+  });
+
+  it('says when blur is no longer small against the detail, and shows it in mm', () => {
+    const [sharp] = answer.evaluations;
+    expect(sharp.findings.map(({ code }) => code)).not.toContain('blurNotInSdnr');
+    const blurred = weigh(sampleCase({ room: { detector: { pixel_mm: 5 } } })).evaluations[0];
+    expect(blurred.findings.map(({ code }) => code)).toContain('blurNotInSdnr');
+    const { focalSpot_mm, pixel_mm, motion_mm, total_mm } = blurred.unsharpness;
+    expect(total_mm).toBeCloseTo(Math.hypot(focalSpot_mm, pixel_mm, motion_mm), 12);
+    expect(motion_mm).toBe(0);
+  });
+
+  it('says which rules are not entered and which entries are not used', () => {
+    const codes = answer.findings.map(({ code }) => code);
+    expect(codes).toContain('noRuleEntered');
+    expect(codes).not.toContain('enteredNotUsed');
+    const told = weigh(
+      sampleCase({
+        measuredChecks: [{ quantity: 'sdnr', technique: 'Current', values: [1] }],
+      }),
+    ).findings.filter(({ code }) => code === 'enteredNotUsed');
+    expect(told.map(({ path }) => path)).toEqual(['measuredChecks']);
+  });
+});

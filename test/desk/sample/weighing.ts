@@ -117,6 +117,7 @@ const evaluation = (
     },
   },
   detector: { airKerma_uGy: 2.5, absorbedFraction: 0.71, signal_keV_per_mm2: 1.9e6 },
+  unsharpness: { focalSpot_mm: 0.2, pixel_mm: 0.15, motion_mm: 0, total_mm: 0.25 },
   exposure: {
     tubeLoad_mAs: own.load_mAs,
     tubeCurrent_mA: own.load_mAs / 0.08,

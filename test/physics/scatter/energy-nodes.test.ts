@@ -49,7 +49,6 @@ describe('responses on the channels of a spectrum', () => {
     behindGrid: null,
     backscatter: step,
     layerAbsorbedFraction: [step],
-    method: 'estimate',
   };
   const channels = Float64Array.of(5, 21.3, 33.1, 33.2, 77, 149, 200);
   const on = responsesOn(responses, channels);

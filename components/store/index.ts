@@ -9,6 +9,7 @@ export * from './history.js';
 export * from './keep-soon.js';
 export * from './layer-changes.js';
 export * from './list-changes.js';
+export * from './pair-changes.js';
 export * from './path.js';
 export * from './save-table.js';
 export * from './stand-in.js';

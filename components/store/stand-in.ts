@@ -38,10 +38,15 @@ export function readDocument(
   return { unreadable: first.faults };
 }
 
-/** One faulty value put right: the last good one, or its key taken away. */
+/**
+ * One faulty value put right: the last good one, or its key taken away. Part of something that was
+ * last good as none at all, such as a pair half entered, goes back to none.
+ */
 function standIn(document: Json, path: string, lastGood: Case | null): Json {
   const good = lastGood ? valueAtPath(lastGood, path) : undefined;
   const parent = path.replace(/(\.[^.[\]]+|\[\d+\])$/, '');
+  if (lastGood && valueAtPath(lastGood, parent) === null)
+    return withValueAt(document, parent, null);
   const missing = valueAtPath(document, parent) === undefined;
   if (good === undefined && missing) return document;
   return withValueAt(document, path, good);

@@ -78,10 +78,10 @@ describe('the contrast-versus-dose curve', () => {
     expect(edits).to.deep.equal([{ path: 'compare.primaryDose', value: 'kermaAreaProduct' }]);
   });
 
-  it('says so when the dose on its axis is not computed yet', async () => {
-    expect(
-      textOf(await panel({ model: modelWith(['compare.primaryDose', 'energyImparted']) })),
-    ).to.contain('not computed yet');
+  it('says so when no technique shown can be computed', async () => {
+    const none = { ...sampleModel, weighing: null };
+    expect(textOf(await panel({ model: none }))).to.contain('No technique shown can be computed');
+    expect(textOf(await panel())).not.to.contain('No technique shown');
   });
 
   it('labels an investigational agent on the plot', async () => {

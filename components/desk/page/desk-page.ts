@@ -153,7 +153,7 @@ export class DeskPage extends LitElement {
         </div>
       </main>
       <caution-footer></caution-footer>
-      <explain-card></explain-card>`;
+      <explain-card .model=${model}></explain-card>`;
   }
 }
 

@@ -6,13 +6,24 @@ import { addItems } from '../../store/list-changes.js';
 import { requestEdit } from '../fields/case-edit.js';
 import { fieldOf, numberSpec, textSpec } from '../fields/field-specs.js';
 import { removeButton } from '../fields/list-buttons.js';
+import { type PairSpec, pairFields } from '../fields/pair-fields.js';
 import { layerEdits } from '../layer-fields/layer-edits.js';
 import { type DeskModel, placed } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import './layer-row.js';
 
+/** Width and height of the body: both or neither. */
+const sides: PairSpec = {
+  path: 'patient.lateral_mm',
+  keys: [0, 1],
+  labels: ['Width of the body', 'Height of the body'],
+  unit: 'mm',
+  step: 10,
+  empty: 'without end',
+};
+
 /**
- * The patient: layers from entrance to exit, and the size mix.
+ * The patient: layers from entrance to exit, its sides, and the size mix.
  *
  * Properties: `model`. Events: `case-edit`.
  * Keyboard: in a layer's row Alt+ArrowUp/Down moves it, Alt+Delete removes it, Alt+Insert adds one.
@@ -83,6 +94,14 @@ export class PatientSection extends LitElement {
     </div>`;
   }
 
+  private sides() {
+    return html`<div>
+      <h3>Sides</h3>
+      <p class="note">Width and height of the body that transport flies through; the estimate takes the layers without sides.</p>
+      <div class="fields">${pairFields(this.model.draft, sides)}</div>
+    </div>`;
+  }
+
   private sizes() {
     const { draft } = this.model;
     const { sizes } = draft.case.patient;
@@ -124,7 +143,7 @@ export class PatientSection extends LitElement {
   override render() {
     return html`<section aria-labelledby="name">
       <h2 id="name">Patient</h2>
-      <div class="groups">${this.layers()} ${this.sizes()}</div>
+      <div class="groups">${this.layers()} ${this.sides()} ${this.sizes()}</div>
     </section>`;
   }
 }

@@ -3,15 +3,18 @@ import { customElement, property } from 'lit/decorators.js';
 import { formatNumber } from '../../charts/format.js';
 import { requestEdit } from '../fields/case-edit.js';
 import { fieldOf, textSpec } from '../fields/field-specs.js';
+import { pairFields } from '../fields/pair-fields.js';
 import type { DeskModel } from '../model/desk-model.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
 import { filtersTable } from './filters-table.js';
+import { ratingTable } from './rating-table.js';
 import { readingsTable } from './readings-table.js';
 import {
   detectorGroup,
   type FieldGroup,
   geometryGroup,
   gridGroup,
+  measuredGrid,
   tubeGroup,
 } from './room-specs.js';
 import { rulesTable } from './rules-table.js';
@@ -19,7 +22,7 @@ import { slabsTable } from './slabs-table.js';
 import { sourceFields } from './source-fields.js';
 
 /**
- * The room: tube, readings, filters, support, geometry, grid, detector, rules, all editable.
+ * The room: tube and its rating chart, readings, filters, support, geometry, grid, detector, rules, all editable.
  *
  * Shows: assumed values in italics, residuals of the calibration beside the readings.
  * Properties: `model`. Events: `case-edit`. Keyboard: that of its fields. Parts: none.
@@ -47,7 +50,8 @@ export class RoomSection extends LitElement {
     }
     return html`<div>
       <h3>Grid</h3>
-      <div class="fields">${gridGroup.fields.map((spec) => fieldOf(draft, spec))}</div>
+      <div class="fields">${gridGroup.fields.map((spec) => fieldOf(draft, spec))} ${pairFields(draft, measuredGrid)}</div>
+      <h3 class="next">Grid cover</h3>${slabsTable(draft, 'room.grid.cover', 'Grid cover')}
       <p class="after"><button class="plain" type="button" @click=${setGrid(null)}>take the grid out of the room</button></p>
     </div>`;
   }
@@ -73,6 +77,7 @@ export class RoomSection extends LitElement {
           <h3 class="next">Support</h3>${slabsTable(draft, 'room.support', 'Support', true)}
         </div>
         <div><h3>Added filters</h3>${filtersTable(draft)}</div>
+        <div><h3>Tube rating chart</h3>${ratingTable(draft)}</div>
         <div class="two"><h3>Readings</h3>${this.calibration()}${readingsTable(this.model)}</div>
         ${this.group(detectorGroup)} ${this.gridGroup()}
         <div class="wide"><h3>Rules</h3>${rulesTable(draft)}</div>

@@ -1,5 +1,6 @@
 import { materialNames } from '../../../materials/index.js';
 import { choiceSpec, type FieldSpec, numberSpec } from '../fields/field-specs.js';
+import type { PairSpec } from '../fields/pair-fields.js';
 
 /** A group of fields under one heading. */
 export interface FieldGroup {
@@ -58,6 +59,16 @@ export const gridGroup: FieldGroup = {
     numberSpec(`${grid}.strip.thickness_um`, 'Strip thickness', 'µm'),
     choiceSpec(`${grid}.interspace.material`, 'Interspace', materialNames),
   ],
+};
+
+/** Transmissions the user measured, which stand in for the model's: both or neither. */
+export const measuredGrid: PairSpec = {
+  path: `${grid}.measured`,
+  keys: ['primaryTransmission', 'scatterTransmission'],
+  labels: ['Primary transmission, measured', 'Scatter transmission, measured'],
+  unit: '',
+  step: 0.01,
+  empty: 'not measured',
 };
 
 export const detectorGroup: FieldGroup = {

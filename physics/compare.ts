@@ -113,49 +113,59 @@ const compareRow = (
   return { holdConstant, ratio: ratiosOf(value, base), findings: [] };
 };
 
-/** Conditions under which a lower dose is reported as a saving. */
+/** Conditions under which a lower dose is reported as a saving, the first that applies to be told. */
 const claimsSaving: readonly HoldConstant[] = ['asSet', 'detectorAirKerma', 'detectorSignal'];
 
 /**
- * A dose that falls as set while SdNR falls too has not been shown to be a saving: the equalities
- * disagree on who wins, and the row says so.
+ * A dose that falls as set while SdNR falls too has not been shown to be a saving: where the
+ * equalities disagree on who wins, the first row that claims a saving says so.
  */
 const withDisagreement = (
   rows: readonly ComparisonRow[],
   sdnrMargin_percent: number,
 ): ComparisonRow[] => {
-  const atEqualSdnr =
-    rows.find((row) => row.holdConstant === 'sdnr')?.ratio.incidentAirKerma ?? null;
-  return rows.map((row) => {
-    const { incidentAirKerma, sdnr } = row.ratio;
-    if (!claimsSaving.includes(row.holdConstant) || incidentAirKerma === null || sdnr === null) {
-      return row;
-    }
-    const findings: Finding[] = [];
-    if (incidentAirKerma < 1 && (atEqualSdnr === null || atEqualSdnr > 1)) {
-      const otherwise =
-        atEqualSdnr === null
-          ? 'but reaches equal SdNR at no tube load'
-          : `but more (×${numberText(atEqualSdnr)}) at equal SdNR`;
-      findings.push({
-        code: 'equalitiesDisagree',
-        severity: 'caution',
-        message: `Less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(row.holdConstant)}, ${otherwise}.`,
-        value: incidentAirKerma,
-        bound: atEqualSdnr,
-      });
-    }
-    if (incidentAirKerma < 1 && sdnr < 1 - sdnrMargin_percent / 100) {
-      findings.push({
-        code: 'sdnrLost',
-        severity: 'caution',
-        message: `${holdConstantPhrase(row.holdConstant, true)} the saving looks larger because SdNR falls by ${numberText(100 * (1 - sdnr), 2)} %.`,
-        value: sdnr,
-        bound: 1 - sdnrMargin_percent / 100,
-      });
-    }
-    return findings.length > 0 ? { ...row, findings: [...row.findings, ...findings] } : row;
-  });
+  const rowOf = (hold: HoldConstant) => rows.find((row) => row.holdConstant === hold);
+  const atEqualSdnr = rowOf('sdnr')?.ratio.incidentAirKerma ?? null;
+  for (const hold of claimsSaving) {
+    const claim = rowOf(hold);
+    const doubt = claim && doubtOf(claim, atEqualSdnr, sdnrMargin_percent);
+    if (!doubt) continue;
+    return rows.map((row) =>
+      row === claim ? { ...row, findings: [...row.findings, doubt] } : row,
+    );
+  }
+  return [...rows];
+};
+
+/** What speaks against reading a row's lower incident air kerma as a saving, if anything does. */
+const doubtOf = (
+  { holdConstant, ratio: { incidentAirKerma, sdnr } }: ComparisonRow,
+  atEqualSdnr: number | null,
+  sdnrMargin_percent: number,
+): Finding | null => {
+  if (incidentAirKerma === null || sdnr === null || incidentAirKerma >= 1) return null;
+  if (atEqualSdnr === null || atEqualSdnr > 1) {
+    const otherwise =
+      atEqualSdnr === null
+        ? 'but reaches equal SdNR at no tube load'
+        : `but more (×${numberText(atEqualSdnr)}) at equal SdNR`;
+    return {
+      code: 'equalitiesDisagree',
+      severity: 'caution',
+      message: `Less incident air kerma (×${numberText(incidentAirKerma)}) ${holdConstantPhrase(holdConstant)}, ${otherwise}: SdNR falls to ×${numberText(sdnr)}.`,
+      value: incidentAirKerma,
+      bound: atEqualSdnr,
+    };
+  }
+  const bound = 1 - sdnrMargin_percent / 100;
+  if (sdnr >= bound) return null;
+  return {
+    code: 'sdnrLost',
+    severity: 'caution',
+    message: `${holdConstantPhrase(holdConstant, true)} the saving looks larger because SdNR falls by ${numberText(100 * (1 - sdnr), 2)} %.`,
+    value: sdnr,
+    bound,
+  };
 };
 
 const holdConstantPhrase = (hold: HoldConstant, isStart = false): string => {

@@ -71,52 +71,49 @@ describe('check by transport', () => {
     await close();
   });
 
-  test('is cancelled within a second and leaves no busy worker', async () => {
+  test('is cancelled at once and leaves no busy worker', async () => {
     const { page, complaints, close } = await opened();
     const session = await browser.newBrowserCDPSession();
     await photons(page).selectOption('10 000 000');
     await runButton(page).click();
     await section(page).locator('.results').waitFor();
-    const busy = await rendererSeconds(session, page, 1000);
-    const begun = performance.now();
-    await cancelButton(page).click();
-    await section(page)
-      .locator('.run')
-      .getByText(/cancelled; incomplete: /)
-      .waitFor();
-    await runButton(page).waitFor();
-    expect(performance.now() - begun).toBeLessThan(1000);
-    await page.waitForTimeout(500);
-    const idle = await rendererSeconds(session, page, 1000);
-    expect(busy).toBeGreaterThan(0.3);
-    expect(idle).toBeLessThan(0.25 * busy);
+    expect(await rendererSeconds(session, page, 1500)).toBeGreaterThan(0.1);
+    // Said in the same turn of the page: cancelling waits for no worker.
+    const said = await section(page).evaluate(async (element) => {
+      const root = element.shadowRoot as ShadowRoot;
+      root.querySelector<HTMLButtonElement>('button.plain')?.click();
+      await Promise.all([
+        (document.querySelector('desk-page') as unknown as { updateComplete: Promise<unknown> })
+          .updateComplete,
+        (element as unknown as { updateComplete: Promise<unknown> }).updateComplete,
+      ]);
+      return root.querySelector('.run')?.textContent ?? '';
+    });
+    expect(said).toContain('cancelled; incomplete: ');
+    // Ten million photons would keep a worker busy for longer than this waits.
+    await expect
+      .poll(() => rendererSeconds(session, page, 500), { timeout: 12_000 })
+      .toBeLessThan(0.05);
     expect(complaints).toEqual([]);
     await close();
   });
 
-  test('leaves the page answering while photons fly', async () => {
-    const { page, close } = await opened();
+  test('answers edits while photons fly', async () => {
+    const { page, complaints, close } = await opened();
     await photons(page).selectOption('10 000 000');
     await runButton(page).click();
     await section(page).locator('.results').waitFor();
-    const longest_ms = await page.evaluate(
-      () =>
-        new Promise<number>((done) => {
-          let longest = 0;
-          let last = performance.now();
-          const begun = last;
-          const look = () => {
-            const now = performance.now();
-            longest = Math.max(longest, now - last);
-            last = now;
-            if (now - begun > 1500) done(longest);
-            else setTimeout(look);
-          };
-          look();
-        }),
-    );
-    expect(longest_ms).toBeLessThan(250);
+    // The run is of Current: an edit of Proposed leaves it flying.
+    const side = page.locator('beam-path .side.right');
+    const kerma = side.locator('[data-station="incident"] figure-value button');
+    const before = await kerma.textContent();
+    const potential = side.locator('[data-station="potential"] input');
+    await potential.fill('84');
+    await potential.press('Enter');
+    await expect.poll(() => kerma.textContent(), { timeout: 20_000 }).not.toBe(before);
+    expect(await cancelButton(page).isVisible()).toBe(true);
     await cancelButton(page).click();
+    expect(complaints).toEqual([]);
     await close();
   });
 

@@ -1,7 +1,7 @@
 import type { Stack } from '../stack/stack.js';
 import { equivalentWater } from './equivalent-water.js';
 import { backscatterFieldShare } from './field-table.js';
-import { scatterGeometry } from './geometry.js';
+import { fieldAtSkin } from './geometry.js';
 import type { Slab } from './slabs.js';
 
 /** Depth whose scattering decides how far backscatter spreads along the skin. */
@@ -16,11 +16,7 @@ export function backscatterShare(
   slabs: readonly Slab[],
   energies_keV: Float64Array,
 ): Float64Array {
-  const { halfSide_cm } = scatterGeometry(stack);
-  const atSkin =
-    stack.beam === 'point'
-      ? (halfSide_cm * stack.sourceToSkin_mm) / stack.sourceToDetector_mm
-      : halfSide_cm;
+  const { halfSide_cm } = fieldAtSkin(stack);
   const near = uppermost(
     slabs.filter(({ layerIndex }) => layerIndex !== null),
     backscatterDepth_cm,
@@ -28,7 +24,7 @@ export function backscatterShare(
   const depth_cm = near.reduce((sum, { thickness_cm }) => sum + thickness_cm, 0);
   const water = equivalentWater(near, energies_keV);
   return water.energy_keV.map((energy, i) =>
-    backscatterFieldShare(energy, atSkin * (depth_cm > 0 ? water.thickness_cm[i] / depth_cm : 1)),
+    backscatterFieldShare(energy, halfSide_cm * (depth_cm > 0 ? water.thickness_cm[i] / depth_cm : 1)),
   );
 }
 

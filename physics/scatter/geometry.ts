@@ -20,6 +20,18 @@ export function scatterGeometry(stack: Stack): ScatterGeometry {
   };
 }
 
+/** The field at the skin, as if the detector stood there. */
+export function fieldAtSkin(stack: Stack): ScatterGeometry {
+  const { beam, halfSide_cm } = scatterGeometry(stack);
+  const narrowing = beam === 'point' ? stack.sourceToSkin_mm / stack.sourceToDetector_mm : 1;
+  return {
+    beam,
+    sourceToDetector_cm: stack.sourceToSkin_mm / 10,
+    gap_cm: 0,
+    halfSide_cm: halfSide_cm * narrowing,
+  };
+}
+
 /** The same stack in a parallel field without end. */
 export const broadened = (geometry: ScatterGeometry): ScatterGeometry => ({
   ...geometry,

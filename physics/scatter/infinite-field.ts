@@ -10,7 +10,7 @@ import type { Slab } from './slabs.js';
 export interface InfiniteField {
   /** Scatter of the second order and above, K fluorescence included, over primary; by score. */
   readonly multiple: readonly Float64Array[];
-  /** Backscattered over incident air kerma. */
+  /** Air kerma of scattered photons at the skin, both ways, over that incident behind the support. */
   readonly backscatter: Float64Array;
   /** Energy left in each layer over incident energy; support scatters but is not listed. */
   readonly layerAbsorbedFraction: readonly Float64Array[];

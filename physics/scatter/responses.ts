@@ -23,7 +23,10 @@ export interface ScatterResponses {
   readonly withoutGrid: DetectorScatter;
   /** Scatter behind the grid over primary behind the grid; null without a grid. */
   readonly behindGrid: DetectorScatter | null;
-  /** Backscattered over incident air kerma at the skin: B − 1. */
+  /**
+   * Air kerma of scatter at the skin over that of the primary, which has passed any support: B − 1. It
+   * counts what the patient sends back and what a support before the patient sends forward.
+   */
   readonly backscatter: Float64Array;
   /** Per layer, energy absorbed over incident energy, infinite width. */
   readonly layerAbsorbedFraction: readonly Float64Array[];

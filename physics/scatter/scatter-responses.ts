@@ -1,6 +1,5 @@
 import { absorptionEdges } from '../../materials/index.js';
 import type { Stack } from '../stack/stack.js';
-import { backscatterShare } from './backscatter-share.js';
 import { type EnergyNodes, energyNodes, scatterRange_keV } from './energy-nodes.js';
 import { estimate } from './estimate.js';
 import { firstOrder } from './first-order.js';
@@ -8,6 +7,7 @@ import { scatterGeometry } from './geometry.js';
 import { infiniteField } from './infinite-field.js';
 import type { DetectorScatter, FirstOrderScatter, ScatterResponses } from './responses.js';
 import { type ScatterDetector, type ScatterGrid, scoreCount, scoreTable } from './scores.js';
+import { skinScatter } from './skin-scatter.js';
 import { type Slab, slabsOf } from './slabs.js';
 
 /** L edges of lead strips lie at 13–16 keV, where they are opaque on either side: left out. */
@@ -70,12 +70,11 @@ export function scatterResponses(
   const infinite = infiniteField(slabs, stack.layers.length, nodes, detector, grid);
   const geometry = scatterGeometry(stack);
   const scores = estimate({ slabs, geometry, nodes, table, grid }, infinite);
-  const share = backscatterShare(stack, slabs, nodes.energies_keV);
   return {
     energies_keV: nodes.energies_keV,
     withoutGrid: detectorScatter(scores, 0),
     behindGrid: grid && detectorScatter(scores, scoreCount),
-    backscatter: infinite.backscatter.map((value, i) => value * share[i]),
+    backscatter: skinScatter(stack, slabs, nodes, infinite.backscatter),
     layerAbsorbedFraction: infinite.layerAbsorbedFraction,
   };
 }

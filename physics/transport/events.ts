@@ -47,7 +47,7 @@ export const collision = {
 } as const;
 export const collisionLength = 12;
 
-/** Values of `crossing.face`. `skin` is a backward passage of the skin plane, not an end. */
+/** Values of `crossing.face`. `skin` is a scattered passage of the skin plane either way, not an end. */
 export const face = { entrance: 0, side: 1, detector: 2, skin: 3, none: 4 } as const;
 
 /** Values of `collision.kind`. */

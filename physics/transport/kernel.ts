@@ -33,7 +33,7 @@ export interface KernelOutput {
   readonly absorbed_keV: Float64Array;
   /** Energy that ended at each face (`faces` order), scattered photons, and unscattered last, keV. */
   readonly escaped_keV: Float64Array;
-  /** Scattered photons at the detector and backwards through the skin. */
+  /** Scattered photons at the detector and through the plane of the skin, either way. */
   readonly crossings: EventBuffer;
   /** Report the end of every photon that leaves, at whatever face, scattered or not. */
   readonly everyEnd: boolean;
@@ -119,6 +119,10 @@ export function flyPhotons(
               ended = face.detector;
               break;
             }
+            if (slab === skinPlane && past !== history.primary) {
+              setFlight(photon, x + way * u, y + way * v, z, u, v, w, energy, lastZ);
+              recordCrossing(crossings, photon, face.skin, past, number);
+            }
           } else {
             z = planes[slab];
             if (slab === skinPlane) {
@@ -140,7 +144,9 @@ export function flyPhotons(
         do {
           ended = marchBounded(geometry, bounds, attenuation_per_cm, photon, where);
           if (ended === face.skin) {
-            recordCrossing(crossings, photon, face.skin, past, number);
+            if (past !== history.primary) {
+              recordCrossing(crossings, photon, face.skin, past, number);
+            }
             if (where[place.slab] < 0) ended = face.entrance;
           }
         } while (ended === face.skin);

@@ -6,7 +6,7 @@ import { type Insert, insertDistance, insertHolds } from './insert.js';
 
 /**
  * Flies a photon through slabs with finite sides or an insert until its mean free paths are used up,
- * it leaves, or it passes the skin plane backwards. Changes `photon` and `where`, returns the face.
+ * it leaves, or it passes the skin plane. Changes `photon` and `where`, returns the face.
  */
 export function marchBounded(
   geometry: TransportGeometry,
@@ -63,6 +63,7 @@ export function marchBounded(
         photon[flight.z] = planes[slab + 1];
         where[place.slab] = slab + 1;
         if (slab + 1 === geometry.slabMatter.length) return face.detector;
+        if (slab + 1 === geometry.skinPlane) return face.skin;
       } else {
         photon[flight.z] = planes[slab];
         where[place.slab] = slab - 1;

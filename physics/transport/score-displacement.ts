@@ -20,7 +20,8 @@ export interface DisplacementScoring {
 
 /**
  * Adds crossings to the scores, each in the smallest field that holds it; `nestFields` then makes
- * them totals. Air kerma over all passages backwards through the skin counts as backscatter.
+ * them totals. Air kerma over all scattered passages through the skin counts into the
+ * backscatter factor, downward ones (support above the patient) as upward ones.
  */
 export function displacementScorer(
   scoring: DisplacementScoring,
@@ -40,7 +41,7 @@ export function displacementScorer(
       const w = values[at + crossing.w];
       const energy_keV = values[at + crossing.energy];
       if (values[at + crossing.face] === face.skin) {
-        const kerma = airKermaAt(airKerma, energy_keV) * fluenceWeight(-w);
+        const kerma = airKermaAt(airKerma, energy_keV) * fluenceWeight(Math.abs(w));
         scores[layout.backscatter + smallestField(scoring, x, y)] += kerma;
       } else if (values[at + crossing.face] === face.detector) {
         for (let i = 0; i < photon.length; i++) photon[i] = values[at + crossing.x + i];

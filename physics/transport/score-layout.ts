@@ -7,7 +7,7 @@ export const componentCount = components.length;
 
 /**
  * Where the scores of a batch stand in its one array: scatter by gap, field, component, quantity;
- * backscattered air kerma by field; absorbed energy by region; escaped energy; emitted energy; boxes.
+ * scattered air kerma at the skin by field; absorbed energy by region; escaped energy; emitted energy; boxes.
  * Fields are nested; the last one is infinite.
  */
 export interface ScoreLayout {

@@ -5,7 +5,7 @@ import { fluenceWeight, quantityCount, respond } from './response-table.js';
 import type { ForcedTarget } from './score-forced.js';
 import { scatterAt } from './score-layout.js';
 
-/** Crossings: photons from near collisions into the central square, and backscatter at the skin. */
+/** Crossings: photons from near collisions into the central square, and scatter at the skin, both ways. */
 export function nearScorer(target: ForcedTarget): EventBuffer['take'] {
   const { scoring, response, airKerma, layout, scores } = target;
   const { detector_cm, near_cm, halfRegion_cm, halfSkinRegion_cm } = scoring;
@@ -21,7 +21,7 @@ export function nearScorer(target: ForcedTarget): EventBuffer['take'] {
       const energy_keV = values[at + crossing.energy];
       if (which === face.skin && isWithin(values, at, halfSkinRegion_cm, 0)) {
         scores[layout.backscatter] +=
-          perSkinArea * airKermaAt(airKerma, energy_keV) * fluenceWeight(-w);
+          perSkinArea * airKermaAt(airKerma, energy_keV) * fluenceWeight(Math.abs(w));
       } else if (
         which === face.detector &&
         detector_cm - values[at + crossing.lastZ] <= near_cm &&

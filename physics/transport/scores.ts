@@ -70,7 +70,10 @@ export function scatterToPrimary(
   );
 }
 
-/** B: air kerma at the skin with the patient's backscatter over without. */
+/**
+ * B: air kerma of all photons at the skin over that of the primary, which has passed any support. As in
+ * the estimate it counts scatter both ways: back from the patient, forward from a support before it.
+ */
 export function backscatterFactor(
   input: TransportInput,
   scores: TransportScores,

@@ -10,7 +10,7 @@ export interface Mesh {
   readonly after: Int32Array;
   /** Cell width over the distance between the middles of those two cells. */
   readonly slopeFactor: Float64Array;
-  /** The plane of the skin: photons cross it upward between cells `skinCell − 1` and `skinCell`. */
+  /** The plane of the skin lies between cells `skinCell − 1` and `skinCell`. */
   readonly skinCell: number;
 }
 

@@ -67,7 +67,7 @@ export function solveAdjoint(
 
     source.even.fill(0);
     const direct = exit.slice();
-    sweepDown(mesh, factors, width, source.even, direct, group.uncollided);
+    sweepDown(mesh, factors, width, source.even, null, direct, group.uncollided);
     takeRay(direct, solution.uncollided, i * width);
     // The neighbour's answer is a better start than the uncollided one: a sweep or two less.
     group.even.set(i > 0 ? groups[i - 1].even : group.uncollided);
@@ -89,7 +89,7 @@ export function solveAdjoint(
       splitHemispheres(mesh, factors, width, source);
       const face = exit.slice();
       // ψ towards the exit lands in `even`, then both hemispheres are combined in place.
-      sweepDown(mesh, factors, width, source.even, face, group.even);
+      sweepDown(mesh, factors, width, source.even, skin, face, group.even);
       sweepUp(mesh, factors, width, source.odd, skin, meanUp);
       combineHemispheres(group, meanUp);
       if (settle(solution.total, i * width, face, sources, energies_keV[i])) break;
@@ -184,6 +184,6 @@ function firstAlongRay(
     }
   });
   const face = new Float64Array(width * rows);
-  sweepDown(mesh, factors, width, scratch.even, face, scratch.odd, ray);
+  sweepDown(mesh, factors, width, scratch.even, null, face, scratch.odd, ray);
   takeRay(face, into, at);
 }

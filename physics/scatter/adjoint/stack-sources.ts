@@ -1,7 +1,6 @@
 import { gaussLegendre } from '../../numeric/gauss-legendre.js';
 import {
   airKermaPerFluence,
-  airKermaScore,
   photonScores,
   type ScatterDetector,
   type ScatterGrid,
@@ -9,11 +8,11 @@ import {
 } from '../scores.js';
 import type { Slab } from '../slabs.js';
 import { cosines, ordinateCell, ordinates, ray, rows } from './directions.js';
-import { type AdjointSources, emptySources } from './sources.js';
+import { type AdjointSources, emptySources, scoreAtSkin } from './sources.js';
 
 /**
  * The responses of one stack, side by side: the four detector scores, with a grid the same four behind
- * it, then backscattered air kerma at the skin, then energy left in each slab of the patient.
+ * it, then scattered air kerma at the skin, then energy left in each slab of the patient.
  */
 export interface StackSources {
   readonly sources: AdjointSources;
@@ -46,9 +45,9 @@ export function stackSources(
         sources.exit[(i * width + r) * rows + d] = score;
         if (grid) sources.exit[(i * width + scoreCount + r) * rows + d] = score * transmission;
       });
-      if (d !== ray) sources.skin[(i * width + backscatter) * rows + d] = scores[airKermaScore];
     }
   });
+  scoreAtSkin(sources, backscatter, airKerma);
   layers.forEach((response, layer) => {
     if (response >= 0) sources.slab[response] = slabs.findIndex((s) => s.layerIndex === layer);
   });

@@ -38,9 +38,10 @@ export function sweepFactors(mesh: Mesh, kernels: readonly Kernel[], i: number):
 
 /**
  * Carries ψ of photons travelling towards the exit from the exit face to the entrance, all directions
- * from `firstDirection` on, through a source linear in each cell.
+ * from `firstDirection` on, through a source linear in each cell; those that pass the skin score `skin`.
  *
  * @param source Q/μt, `[(cell · width + response) · rows + direction]`.
+ * @param skin score on passing the skin, laid out as `face`; null where it does not count.
  * @param face ψ at the exit face on entry, at the entrance on return, `[response · rows + direction]`.
  * @param mean receives ψ averaged over each cell, in the layout of `source`.
  */
@@ -49,16 +50,18 @@ export function sweepDown(
   factors: SweepFactors,
   width: number,
   source: Float64Array,
+  skin: Float64Array | null,
   face: Float64Array,
   mean: Float64Array,
   firstDirection = 0,
 ): void {
   for (let c = mesh.cellCount - 1; c >= 0; c--) {
+    if (skin !== null && c === mesh.skinCell - 1) addTo(face, skin);
     crossCell(mesh, factors, c, width, -mesh.slopeFactor[c], source, face, mean, firstDirection);
   }
 }
 
-/** The same for photons travelling towards the entrance; those that cross the skin score `skin`. */
+/** The same for photons travelling towards the entrance; likewise. */
 export function sweepUp(
   mesh: Mesh,
   factors: SweepFactors,
@@ -69,11 +72,13 @@ export function sweepUp(
 ): void {
   const face = new Float64Array(width * rows);
   for (let c = 0; c < mesh.cellCount; c++) {
-    if (c === mesh.skinCell) {
-      for (let f = 0; f < face.length; f++) face[f] += skin[f];
-    }
+    if (c === mesh.skinCell) addTo(face, skin);
     crossCell(mesh, factors, c, width, mesh.slopeFactor[c], source, face, mean, 0);
   }
+}
+
+function addTo(face: Float64Array, score: Float64Array): void {
+  for (let f = 0; f < face.length; f++) face[f] += score[f];
 }
 
 // With s the mean of Q/μt and S₁ its change from where the photon goes to where it comes from:

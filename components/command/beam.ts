@@ -6,6 +6,7 @@ import {
   beamQuality,
   kEdges_keV,
   type MaterialLayer,
+  outputFactorAt_kV,
   type Spectrum,
   scaleSpectrum,
   type TubeSetting,
@@ -31,6 +32,7 @@ interface BeamOptions extends Format {
   readonly distance: number;
   readonly air: boolean;
   readonly outputFactor: number;
+  readonly outputExponent: number;
 }
 
 const tube = defaults.room.tube;
@@ -70,13 +72,23 @@ export const beamCommand = (io: Io): Command =>
     .option('--air', 'air instead of vacuum up to the point', false)
     .option(
       '--output-factor <g>',
-      'output scale of the tube; 0.87 stands for any tube within ±30 %',
+      'output scale of the tube at 80 kV; 0.87 stands for any tube within ±30 %',
       optionNumber('--output-factor', {
         min: 1e-3,
         max: 10,
         remedy: 'enter the calibrated output',
       }),
       tube.outputFactor,
+    )
+    .option(
+      '--output-exponent <b>',
+      'the output scale goes as (kV/80)^b, as a calibration prints it',
+      optionNumber('--output-exponent', {
+        min: -3,
+        max: 3,
+        remedy: 'enter the calibrated output exponent, 0 for none',
+      }),
+      0,
     )
     .action((_: unknown, command: Command) => runBeam(io, command.optsWithGlobals<BeamOptions>()));
 
@@ -100,7 +112,10 @@ const beamAtPoint = (options: BeamOptions, layers: readonly MaterialLayer[]): Sp
     potential_kV: options.potential,
     anodeAngle_deg: options.anodeAngle,
     ripple_percent: options.ripple,
-    outputFactor: options.outputFactor,
+    outputFactor: outputFactorAt_kV(
+      { outputFactor: options.outputFactor, outputExponent: options.outputExponent },
+      options.potential,
+    ),
     extraEdges_keV: kEdges_keV(layers.map(({ material }) => material)),
   };
   checkFiltration(setting, inTheWay, options.through ?? []);
@@ -134,7 +149,10 @@ const spectrumCsv = (rows: readonly SpectrumRow[]): string =>
 
 const beamTable = (options: BeamOptions, quality: BeamQuality): string => {
   const way = [...(options.through ?? []), options.air ? 'air' : 'vacuum'].join(', ');
-  const title = `${options.potential} kV, anode ${options.anodeAngle}°, through ${way}, at ${options.distance} mm`;
+  const { outputFactor, outputExponent } = options;
+  const title =
+    `${options.potential} kV, anode ${options.anodeAngle}°, through ${way}, at ${options.distance} mm, ` +
+    `output factor ${outputFactor}${outputExponent === 0 ? '' : ` × (kV/80)^${outputExponent}`}`;
   return [
     plainTableText({
       title,

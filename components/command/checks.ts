@@ -16,8 +16,10 @@ export const checksCommand = (io: Io): Command =>
     .summary('every published check beside what Stratabeam computes')
     .description(
       'Every published (or, where said, separately computed) value beside what Stratabeam ' +
-        'computes, with tolerance, source and provenance. Legal limits quoted from memory are an ' +
-        'unconfirmed source, never met. Exit code 1 when a check falls short.',
+        'computes, with tolerance, source and provenance. A physics value quoted from memory is met ' +
+        'or short and marked recalled; a legal limit quoted from memory is an unconfirmed source, ' +
+        'never met. Compositions and legal limits are data carried, counted apart. Exit code 1 when ' +
+        'a check falls short.',
     )
     .option('--summary', 'only the count and what fell short', false)
     .action((_: unknown, command: Command) =>
@@ -36,6 +38,7 @@ const runChecks = (io: Io, options: ChecksOptions): void => {
 
 const columns = [
   'id',
+  'kind',
   'expected',
   'computed',
   'unit',

@@ -1,6 +1,6 @@
 import type { Evaluation } from '../../physics/results.js';
 
-/** A quantity of an evaluation: its name, its unit, and where it stands in the JSON. */
+/** A quantity of an evaluation: its name, no other's, its unit, and where it stands in the JSON. */
 export interface Quantity {
   readonly name: string;
   readonly unit: string;
@@ -12,36 +12,36 @@ type Row = readonly [name: string, unit: string, path: string];
 
 const sections: readonly (readonly [heading: string, rows: readonly Row[]])[] = [
   [
-    'Beam',
+    'Beam behind tube and filter',
     [
-      ['first half-value layer', 'mm Al', 'beam.halfValueLayers.0.first_mm'],
+      ['first half-value layer, in vacuum', 'mm Al', 'beam.halfValueLayers.0.first_mm'],
       ['homogeneity coefficient', '', 'beam.homogeneityCoefficient'],
       ['mean energy', 'keV', 'beam.meanEnergy_keV'],
       ['effective energy', 'keV', 'beam.effectiveEnergy_keV'],
-      ['air kerma at 1 m', 'µGy/mAs', 'beam.airKerma_uGy_per_mAs'],
-      ['fluence at 1 m', '1/(mm² mAs)', 'beam.fluence_per_mm2_per_mAs'],
+      ['air kerma at 1 m, in vacuum', 'µGy/mAs', 'beam.airKerma_uGy_per_mAs'],
+      ['fluence at 1 m, in vacuum', '1/(mm² mAs)', 'beam.fluence_per_mm2_per_mAs'],
     ],
   ],
   [
     'Patient',
     [
-      ['primary transmission', '', 'transmission.primary'],
+      ['patient, primary transmission', '', 'transmission.primary'],
       ['mean energy at exit', 'keV', 'transmission.exitMeanEnergy_keV'],
       ['scatter-to-primary ratio', '', 'scatter.spr'],
       ['scatter fraction', '', 'scatter.scatterFraction'],
-      ['scatter-to-primary ratio behind grid', '', 'scatter.sprBehindGrid'],
     ],
   ],
   [
     'Grid',
     [
-      ['primary transmission', '', 'grid.primaryTransmission'],
-      ['scatter transmission', '', 'grid.scatterTransmission'],
-      ['total transmission', '', 'grid.totalTransmission'],
-      ['selectivity', '', 'grid.selectivity'],
-      ['Bucky factor', '', 'grid.buckyFactor'],
-      ['contrast improvement', '', 'grid.contrastImprovement'],
-      ['SNR improvement', '', 'grid.snrImprovement'],
+      ['grid, primary transmission', '', 'grid.primaryTransmission'],
+      ['grid, scatter transmission', '', 'grid.scatterTransmission'],
+      ['grid, total transmission', '', 'grid.totalTransmission'],
+      ['grid, selectivity', '', 'grid.selectivity'],
+      ['grid, Bucky factor', '', 'grid.buckyFactor'],
+      ['grid, contrast improvement', '', 'grid.contrastImprovement'],
+      ['grid, SNR improvement', '', 'grid.snrImprovement'],
+      ['scatter-to-primary ratio behind grid', '', 'scatter.sprBehindGrid'],
     ],
   ],
   [
@@ -95,14 +95,14 @@ const sections: readonly (readonly [heading: string, rows: readonly Row[]])[] = 
     ],
   ],
   [
-    'SdNR² per',
+    'SdNR² over cost, per frame',
     [
-      ['incident air kerma', '1/mGy', 'figureOfMerit.perIncidentAirKerma_per_mGy'],
-      ['kerma–area product', '1/(Gy cm²)', 'figureOfMerit.perKermaAreaProduct_per_Gycm2'],
-      ['energy imparted', '1/mJ', 'figureOfMerit.perEnergyImparted_per_mJ'],
-      ['mean absorbed dose', '1/mGy', 'figureOfMerit.perMeanAbsorbedDose_per_mGy'],
-      ['tube energy', '1/kJ', 'figureOfMerit.perTubeEnergy_per_kJ'],
-      ['element mass', '1/g', 'figureOfMerit.perElementMass_per_g'],
+      ['SdNR² per incident air kerma', '1/mGy', 'figureOfMerit.perIncidentAirKerma_per_mGy'],
+      ['SdNR² per kerma–area product', '1/(Gy cm²)', 'figureOfMerit.perKermaAreaProduct_per_Gycm2'],
+      ['SdNR² per energy imparted', '1/mJ', 'figureOfMerit.perEnergyImparted_per_mJ'],
+      ['SdNR² per mean absorbed dose', '1/mGy', 'figureOfMerit.perMeanAbsorbedDose_per_mGy'],
+      ['SdNR² per tube energy', '1/kJ', 'figureOfMerit.perTubeEnergy_per_kJ'],
+      ['SdNR² per element mass', '1/g', 'figureOfMerit.perElementMass_per_g'],
     ],
   ],
 ];

@@ -4,13 +4,17 @@ import { shown } from './numbers.js';
 import { plainTableText } from './plain-table.js';
 import { quantityOf, quantitySections } from './weigh-quantities.js';
 
-/** Every technique at one size: the quantities, then what happens in each layer. */
-export const sizeTables = (evaluations: readonly Evaluation[]): readonly string[] => [
-  quantityTable(evaluations),
-  layerTable(evaluations),
-];
+/**
+ * Every technique at one size: the quantities, then what happens in each layer.
+ *
+ * @param detail the detail in words, since an SdNR is that of one detail and no other.
+ */
+export const sizeTables = (
+  evaluations: readonly Evaluation[],
+  detail: string,
+): readonly string[] => [quantityTable(evaluations, detail), layerTable(evaluations)];
 
-const quantityTable = (evaluations: readonly Evaluation[]): string => {
+const quantityTable = (evaluations: readonly Evaluation[], detail: string): string => {
   const [{ size, thickness_mm }] = evaluations;
   const settings = evaluations.map(
     ({ setting }) => `${settingLabel(setting)}, grid ${setting.grid}`,
@@ -24,7 +28,7 @@ const quantityTable = (evaluations: readonly Evaluation[]): string => {
     return [
       [heading],
       ...lines.map(({ quantity, values }) => [
-        `  ${quantity.name}`,
+        `  ${quantity.path === 'sdnr' ? `SdNR of the ${detail}` : quantity.name}`,
         quantity.unit,
         ...values.map((value) => shown(value)),
       ]),

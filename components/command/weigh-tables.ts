@@ -1,52 +1,36 @@
+import type { Case } from '../../physics/case/index.js';
 import { holdConstantWords } from '../../physics/compare.js';
 import { findingWords } from '../../physics/findings.js';
-import type { Calibration, Comparison, Finding, Ratios, Weighing } from '../../physics/results.js';
+import type { Comparison, Finding, Ratios, Weighing } from '../../physics/results.js';
+import { assumedText } from './assumed-text.js';
+import { calibrationText } from './calibration-text.js';
+import { detailWords } from './detail-words.js';
 import { shown } from './numbers.js';
 import { plainTableText } from './plain-table.js';
 import { sizeTables } from './weigh-size-tables.js';
 
 /** A weighing for people: heading, a table for each size, the comparisons, then what must be read. */
-export const weighTables = (weighing: Weighing): string => {
+export const weighTables = (weighing: Weighing, c: Case): string => {
   const sizes = [...new Set(weighing.evaluations.map(({ size }) => size))];
   return [
     headingText(weighing),
+    calibrationText(weighing.calibration, c),
     ...sizes.flatMap((size) => [
-      ...sizeTables(weighing.evaluations.filter((evaluation) => evaluation.size === size)),
+      ...sizeTables(
+        weighing.evaluations.filter((evaluation) => evaluation.size === size),
+        detailWords(c.task.detail),
+      ),
       ...weighing.comparisons.filter((comparison) => comparison.size === size).map(comparisonTable),
     ]),
     findingsText(weighing),
-    assumedText(weighing.assumed),
+    assumedText(weighing.assumed, c, weighing.calibration),
   ]
     .filter((part) => part !== '')
     .join('\n');
 };
 
-const headingText = ({ case: stamp, version, calibration }: Weighing): string => {
-  const heading = `${stamp.title || 'Untitled case'}\ncase ${stamp.hash}, Stratabeam ${version}\n`;
-  return calibration === null
-    ? `${heading}\nNot calibrated to readings of the room.\n`
-    : `${heading}\n${calibrationTable(calibration)}`;
-};
-
-const readingNames = {
-  halfValueLayer_mmAl: 'half-value layer, mm Al',
-  airKerma_uGy_per_mAs: 'air kerma, µGy/mAs',
-} as const;
-
-const calibrationTable = (calibration: Calibration): string =>
-  plainTableText({
-    title:
-      `Calibration: output factor ${shown(calibration.outputFactor)}, ` +
-      `inherent filter ${shown(calibration.inherentFilter_mmAl)} mm Al`,
-    headings: ['reading', 'kV', 'measured', 'model', 'difference %'],
-    rows: calibration.residuals.map((residual) => [
-      readingNames[residual.quantity],
-      String(residual.potential_kV),
-      shown(residual.measured),
-      shown(residual.model),
-      residual.relative_percent.toFixed(1),
-    ]),
-  });
+const headingText = ({ case: stamp, version }: Weighing): string =>
+  `${stamp.title || 'Untitled case'}\ncase ${stamp.hash}, Stratabeam ${version}\n`;
 
 const ratioColumns: readonly (readonly [keyof Ratios, string])[] = [
   ['sdnr', 'SdNR'],
@@ -99,6 +83,3 @@ const line = (group: readonly Finding[], sizes: number): string => {
   const where = names.length > 1 && names.length === sizes ? 'every size' : names.join(', ');
   return `  ${first.severity}: ${findingWords({ ...first, size: where || undefined })}`;
 };
-
-const assumedText = (assumed: readonly string[]): string =>
-  assumed.length === 0 ? '' : `Assumed because the case is silent\n  ${assumed.join('\n  ')}\n`;

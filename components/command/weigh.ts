@@ -33,7 +33,7 @@ const runWeigh = (io: Io, path: string, format: Format): void => {
   print(io, format, {
     json: () => weighing,
     csv: () => weighCsv(weighing),
-    table: () => weighTables(weighing),
+    table: () => weighTables(weighing, parsed.case),
   });
   if (isForbidden(parsed.case, weighing)) throw new Shortfall();
 };

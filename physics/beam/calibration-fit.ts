@@ -85,8 +85,10 @@ export function fitTube(modelled: readonly ModelledReading[], start: TubeFit): T
 }
 
 /** Output scale at a potential. */
-export const outputFactorAt_kV = (fit: TubeFit, potential_kV: number): number =>
-  fit.outputFactor * (potential_kV / anchorPotential_kV) ** fit.outputExponent;
+export const outputFactorAt_kV = (
+  fit: Pick<TubeFit, 'outputFactor' | 'outputExponent'>,
+  potential_kV: number,
+): number => fit.outputFactor * (potential_kV / anchorPotential_kV) ** fit.outputExponent;
 
 const potentialCount = (readings: readonly ModelledReading[]): number =>
   new Set(readings.map(({ reading }) => reading.potential_kV)).size;

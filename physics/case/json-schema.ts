@@ -18,10 +18,16 @@ export const caseJsonSchema = (): object => {
 
 /** The parser puts the rows of a size file in the file's place, so the schema knows only rows. */
 const allowFile = (sizes: z.core.JSONSchema.BaseSchema): void => {
-  const { default: fallback, ...list } = { ...sizes };
+  const { default: fallback, description, ...list } = { ...sizes };
   for (const key of Object.keys(sizes)) delete sizes[key];
-  const file = { type: 'string', minLength: 1, maxLength: 200 } as const;
+  const file = {
+    type: 'string',
+    minLength: 1,
+    maxLength: 200,
+    description: 'CSV file beside the case: thickness_mm, weight.',
+  } as const;
   sizes.default = fallback;
+  sizes.description = description;
   sizes.anyOf = [
     list,
     { type: 'object', properties: { file }, required: ['file'], additionalProperties: false },

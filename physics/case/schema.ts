@@ -27,24 +27,52 @@ export * from './schema/weighing.js';
  * 6–22°) or keep nonsense out; none is a law. What one key asks of another is in `rules/`.
  */
 export const caseSchema = z.strictObject({
-  format: z.literal('stratabeam.case'),
-  version: z.literal(1),
-  title: z.string().max(500).default(d.title),
-  question: remark.default(d.question),
-  materials: z.array(userMaterialSchema).max(100).default(d.materials),
-  room: roomSchema.prefault({}),
-  patient: patientSchema,
-  task: taskSchema,
-  /** The first is Current, the others Proposed. */
-  techniques: z.array(techniqueSchema).min(1).max(20),
-  compare: compareSchema.prefault({}),
-  agentsCompared: z.array(agentComparedSchema).max(50).default(d.agentsCompared),
-  priors: z.array(priorSchema).max(100).default(d.priors),
-  measuredChecks: z.array(measuredCheckSchema).max(1000).default(d.measuredChecks),
-  monitoring: monitoringSchema.nullable().default(d.monitoring),
+  format: z.literal('stratabeam.case').describe('Tells a case file from others.'),
+  version: z.literal(1).describe('Version of the case format.'),
+  title: z
+    .string()
+    .max(500)
+    .default(d.title)
+    .describe('Heading of results and dossier; no patient identifiers.'),
+  question: remark.default(d.question).describe('The question the case is to answer.'),
+  materials: z
+    .array(userMaterialSchema)
+    .max(100)
+    .default(d.materials)
+    .describe("Materials of the case's own."),
+  room: roomSchema.prefault({}).describe('What the equipment is and can do.'),
+  patient: patientSchema.describe('The patient as slabs, and the size mix.'),
+  task: taskSchema.describe('What must be seen, and against what.'),
+  techniques: z
+    .array(techniqueSchema)
+    .min(1)
+    .max(20)
+    .describe('The first is Current, the others Proposed.'),
+  compare: compareSchema.prefault({}).describe('What leads the comparison.'),
+  agentsCompared: z
+    .array(agentComparedSchema)
+    .max(50)
+    .default(d.agentsCompared)
+    .describe('Agents to set side by side.'),
+  priors: z.array(priorSchema).max(100).default(d.priors).describe('Spread of uncertain inputs.'),
+  measuredChecks: z
+    .array(measuredCheckSchema)
+    .max(1000)
+    .default(d.measuredChecks)
+    .describe('Measurements set against predictions.'),
+  monitoring: monitoringSchema
+    .nullable()
+    .default(d.monitoring)
+    .describe('How the change is watched; null: none.'),
   dossier: z
-    .strictObject({ text: z.record(z.string().max(100), z.string().max(20000)).default({}) })
-    .prefault({}),
+    .strictObject({
+      text: z
+        .record(z.string().max(100), z.string().max(20000))
+        .default({})
+        .describe('Prose of the dossier by section name.'),
+    })
+    .prefault({})
+    .describe('What the dossier says in words.'),
 });
 
 /** A whole case after parsing: every key present, defaults filled in. */

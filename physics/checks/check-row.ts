@@ -4,9 +4,13 @@ import { provenanceOf, type ReferenceRow } from './reference-rows.js';
 /** `unconfirmed source`: a legal limit quoted from memory, whatever its number. */
 export type Verdict = 'met' | 'short' | 'unconfirmed source';
 
-/** A published value beside what Stratabeam computes. */
+/** `data carried`: a value that Stratabeam was given, beside the text it was taken from. */
+export type CheckKind = 'computed' | 'data carried';
+
+/** A published value beside what Stratabeam computes, or carries. */
 export interface CheckRow {
   readonly id: string;
+  readonly kind: CheckKind;
   readonly unit: string;
   readonly expected: number;
   /** Null where nothing could be computed; then the check falls short. */
@@ -49,6 +53,7 @@ export const checkRow = (
   const isMet = computed !== null && Math.abs(computed - expected) <= bound + slack;
   return {
     id: [`${row.table}: ${row.set}`, row.item, row.conditions].filter(Boolean).join(', '),
+    kind: 'computed',
     unit: row.unit,
     expected,
     computed: computed !== null && Number.isFinite(computed) ? computed : null,
@@ -60,6 +65,9 @@ export const checkRow = (
     ...(tolerance.note ? { note: tolerance.note } : {}),
   };
 };
+
+/** The same of data that nothing is computed from here: it shows only that it was entered right. */
+export const carried = (row: CheckRow): CheckRow => ({ ...row, kind: 'data carried' });
 
 /** One unit in the last digit a number is printed with: 0.01 for `2.50`, 1e-9 for `3.671e-6`. */
 export const lastDigit = (printed: string): number => {

@@ -1,13 +1,13 @@
 import { elementBySymbol } from '../../materials/index.js';
-import { type CheckRow, checkRow } from './check-row.js';
+import { type CheckRow, carried, checkRow } from './check-row.js';
 import { findMaterial } from './material-of.js';
 import { type ReferenceRow, referenceRows } from './reference-rows.js';
 
 /** Densities and mass fractions of the tissues and materials that Stratabeam carries. */
 export const compositionChecks = (): CheckRow[] =>
-  referenceRows('compositions').flatMap((row) =>
-    row.set === 'density' ? densityCheck(row) : massFractionCheck(row),
-  );
+  referenceRows('compositions')
+    .flatMap((row) => (row.set === 'density' ? densityCheck(row) : massFractionCheck(row)))
+    .map(carried);
 
 const densityCheck = (row: ReferenceRow): CheckRow[] => {
   const material = findMaterial(row.item);

@@ -15,7 +15,7 @@ import { backscatterChecks, scatterChecks } from './scatter-checks.js';
 import { tradeChecks } from './trade-checks.js';
 import { tubeChecks } from './tube-checks.js';
 
-export type { CheckRow, Verdict } from './check-row.js';
+export type { CheckKind, CheckRow, Verdict } from './check-row.js';
 
 let made: readonly CheckRow[] | undefined;
 

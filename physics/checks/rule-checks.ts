@@ -1,6 +1,6 @@
 import type { Rule } from '../case/schema.js';
 import { minimumHalfValueLayer_mmAl } from '../limits/rule-limits.js';
-import { type CheckRow, checkRow } from './check-row.js';
+import { type CheckRow, carried, checkRow } from './check-row.js';
 import { numberAfter, provenanceOf, type ReferenceRow, referenceRows } from './reference-rows.js';
 
 type MinimumHvl = Extract<Rule, { kind: 'minimum-hvl' }>;
@@ -14,7 +14,7 @@ export const ruleChecks = (): CheckRow[] => {
   return rows.map((row) => {
     const rule = ruleOf(rows.filter((other) => columnOf(other) === columnOf(row)));
     const value = minimumHalfValueLayer_mmAl(rule, numberAfter(row.item, '\\('));
-    const check = checkRow(row, value, { absolute: 0 });
+    const check = carried(checkRow(row, value, { absolute: 0 }));
     return provenanceOf(row) === 'recalled' ? { ...check, verdict: 'unconfirmed source' } : check;
   });
 };

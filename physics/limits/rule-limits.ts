@@ -72,14 +72,14 @@ const minimumHvlFindings = (inputs: LimitInputs, rule: MinimumHvl, path: string)
       {
         code: 'minimumHvl',
         severity: 'limit',
-        message: `Half-value layer ${is} mm Al is below the ${least} mm Al asked for at ${potential_kV} kV (${origin(rule)}).`,
+        message: `Half-value layer ${is} mm Al in vacuum is below the ${least} mm Al asked for at ${potential_kV} kV (${origin(rule)}).`,
         path,
         value,
         bound,
       },
     ];
   }
-  const isMet = `Half-value layer ${is} mm Al is not below the ${least} mm Al asked for at ${potential_kV} kV`;
+  const isMet = `Half-value layer ${is} mm Al in vacuum is not below the ${least} mm Al asked for at ${potential_kV} kV`;
   return unconfirmed(rule, path, isMet, { value, bound });
 };
 
@@ -104,7 +104,10 @@ const kermaRateFindings = (inputs: LimitInputs, rule: KermaRate, path: string): 
   return unconfirmed(rule, path, isMet, { value, bound });
 };
 
-/** The room's own rules: minimum half-value layer and kerma rate, as entered with their source. */
+/**
+ * The room's own rules: minimum half-value layer and kerma rate, as entered with their source. The
+ * half-value layer is the beam's behind tube and filter in vacuum; air would harden it a little.
+ */
 export const ruleLimits = (inputs: LimitInputs): Finding[] =>
   inputs.case.room.rules.flatMap((rule, index) => {
     const path = `room.rules[${index}]`;

@@ -60,6 +60,16 @@ describe('stratabeam beam', () => {
     expect(inAir.halfValueLayers[0].first_mm).toBeGreaterThan(far.halfValueLayers[0].first_mm);
   });
 
+  it('scales its output with potential by the exponent, anchored at 80 kV', async () => {
+    const at = async (kV: string, ...more: string[]) =>
+      (await beam('--potential', kV, '--through', 'aluminium 3 mm', ...more)).airKerma_uGy_per_mAs;
+    const exponent = ['--output-exponent', '-0.2'];
+    expect((await at('80', ...exponent)) / (await at('80'))).toBeCloseTo(1, 12);
+    expect((await at('120', ...exponent)) / (await at('120'))).toBeCloseTo(1.5 ** -0.2, 12);
+    const { out } = await runCommand(['beam', ...reference, ...exponent]);
+    expect(out).toMatch(/, output factor 1 × \(kV\/80\)\^-0\.2\n/);
+  });
+
   it('takes layers in any order, once or several times named', async () => {
     const one = await beam('--potential', '70', '--through', 'aluminium 2.5 mm', 'copper 0.2 mm');
     const two = await beam(
@@ -81,7 +91,9 @@ describe('stratabeam beam', () => {
 
   it('shows people a table and programs a CSV spectrum that a case can read', async () => {
     const table = await runCommand(['beam', ...reference]);
-    expect(table.out).toMatch(/^80 kV, anode 12°, through aluminium 2.5 mm, vacuum, at 1000 mm\n/);
+    expect(table.out).toMatch(
+      /^80 kV, anode 12°, through aluminium 2.5 mm, vacuum, at 1000 mm, output factor 1\n/,
+    );
     expect(table.out).toMatch(/aluminium +2\.728 +4\.081/);
     const csv = await runCommand(['beam', ...reference, '--csv']);
     expect(csv.out.split('\n')[0]).toBe('energy_keV,fluence_per_mm2_per_keV_per_mAs');

@@ -54,17 +54,58 @@ describe('stratabeam weigh', () => {
     const { out } = await answered(soundText);
     for (const part of [
       /^Aortography, abdomen\ncase [0-9a-f]{64}, Stratabeam \d/,
-      /\nCalibration: output factor 0\.8\d+, inherent filter 2\.\d+ mm Al\n/,
+      /\nCalibration: output factor 0\.8\d+, output exponent 0\.0\d+, inherent filter 2\.\d+ mm Al\n/,
       /\nSize median, 202 mm\n/,
       /\n {2}incident air kerma +mGy +2\.\d+ +1\.\d+\n/,
       /\nProposed over Current, size median\n/,
       /\ndetector air kerma +1\.\d+ +0\.\d+/,
       /\nFindings\n/,
-      /\nAssumed because the case is silent\n {2}room\.tube\.rating\n/,
+      /\n {2}first half-value layer, in vacuum +mm Al +\d/,
+      /\n {2}SdNR of the vessel, \d+ mm × \d+ mm +\d/,
+      /\nAssumed because the case is silent\n/,
     ]) {
       expect(out).toMatch(part);
     }
     expect(out).not.toMatch(/undefined|NaN/);
+  });
+
+  it('names every quantity once', async () => {
+    const { out } = await answered(soundText);
+    const [, table] = out.split(/\nSize median, 202 mm\n/);
+    const names = table
+      .split('\nLayers')[0]
+      .split('\n')
+      .flatMap((line) => /^ {2}(\S.*?) {2,}/.exec(line)?.[1] ?? []);
+    expect(names.length).toBeGreaterThan(40);
+    expect(new Set(names).size).toBe(names.length);
+  });
+
+  it('prints what silence stands for, and in one line what there is none of', async () => {
+    const { out } = await answered(soundText);
+    const lines = out.split('\nAssumed because the case is silent\n')[1].trimEnd().split('\n');
+    expect(lines).toContain('  room.detector.countingThreshold_keV = 20');
+    expect(lines).toContain('  task.detail.width_mm = as length_mm; a vessel has none');
+    expect(lines.at(-1)).toMatch(/^ {2}none: room\.tube\.rating, .*task\.detail\.material$/);
+    expect(lines.filter((line) => line.includes('none: '))).toHaveLength(1);
+  });
+
+  it('prints a calibration from which `beam` makes the same beam again', async () => {
+    const c = soundCase();
+    c.techniques[0].potential_kV = 80;
+    c.techniques[0].filter = 'none';
+    c.techniques[0].control = { tubeLoad_mAs: 10 };
+    const { out } = await answered(JSON.stringify(c));
+    expect(out).toMatch(/Calibration: output factor [\d.]+, output exponent -?[\d.]+, /);
+    const [, words] = /\n {2}stratabeam (beam .*)\n/.exec(out) ?? [];
+    const asked = [...words.matchAll(/"([^"]*)"|(\S+)/g)].map(([, quoted, bare]) => quoted ?? bare);
+    const alone = (await runCommand(asked)).out;
+    const kerma = (text: string, name: RegExp) => name.exec(text)?.[1];
+    expect(kerma(alone, /\nair kerma +([\d.]+)/)).toBe(
+      kerma(out, /\n {2}air kerma at 1 m, in vacuum +µGy\/mAs +([\d.]+)/),
+    );
+    expect(kerma(alone, /\naluminium +([\d.]+)/)).toBe(
+      kerma(out, /\n {2}first half-value layer, in vacuum +mm Al +([\d.]+)/),
+    );
   });
 
   it('lists one CSV line per technique and size', async () => {

@@ -12,14 +12,15 @@ export const beamQuantities = inGroup('beam', [
     unit: 'mm Al',
     of: (e) => halfValue(e, 'aluminium')?.first_mm ?? null,
     words:
-      'Aluminium that halves the air kerma of the beam leaving tube and filter, in narrow beam.',
+      'Aluminium that halves the air kerma of the narrow beam behind tube and filter, in vacuum; a reading in air comes out a little higher.',
   },
   {
     id: 'meanEnergy',
     name: 'Mean energy of the beam',
     unit: 'keV',
     of: (e) => e.beam.meanEnergy_keV,
-    words: 'Mean photon energy of the beam leaving tube and filter, weighted by photon number.',
+    words:
+      'Mean photon energy of the beam behind tube and filter, in vacuum, weighted by photon number.',
   },
   {
     id: 'exitMeanEnergy',
@@ -27,7 +28,7 @@ export const beamQuantities = inGroup('beam', [
     unit: 'keV',
     of: (e) => e.transmission.exitMeanEnergy_keV,
     words:
-      'Mean photon energy of the primary beam at the exit face, after all layers have hardened it.',
+      'Mean photon energy of the primary beam at the exit face, after all layers have hardened it, weighted by photon number.',
   },
   {
     id: 'primaryTransmission',
@@ -35,6 +36,6 @@ export const beamQuantities = inGroup('beam', [
     unit: '',
     of: (e) => e.transmission.primary,
     words:
-      'Air kerma at the exit face over air kerma at the skin, primary photons only, inverse square removed.',
+      'Air kerma at the exit face over air kerma at the skin, primary photons only, no detail in the way, inverse square removed.',
   },
 ]);

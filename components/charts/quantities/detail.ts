@@ -8,21 +8,22 @@ export const detailQuantities = inGroup('detail', [
     unit: '',
     of: (e) => e.contrast.subject,
     words:
-      'Primary signal without the detail less with it, over without; negative when the detail is more transparent.',
+      'Detected primary signal without the detail less with it, over without, at its centre; negative when the detail is more transparent.',
   },
   {
     id: 'detectedContrast',
     name: 'Detected contrast',
     unit: '',
     of: (e) => e.contrast.detected,
-    words: 'Subject contrast after scatter behind the grid and glare have diluted it.',
+    words:
+      'Subject contrast times the contrast degradation factor times one less the glare fraction.',
   },
   {
     id: 'contrastDegradation',
     name: 'Contrast degradation factor',
     unit: '',
     of: (e) => e.contrast.degradationFactor,
-    words: 'Detected over subject contrast.',
+    words: 'One over one plus the scatter-to-primary ratio behind the grid; glare is not in it.',
   },
   {
     id: 'iodineEquivalent',

@@ -15,7 +15,8 @@ export const detectorQuantities = inGroup('detector', [
     name: 'Absorbed in the detector',
     unit: '',
     of: (e) => e.detector.absorbedFraction,
-    words: 'Share of the primary photons’ energy that the detector absorbs.',
+    words:
+      'Share of the energy of the primary photons behind the grid that enters the signal; in a counting detector, of their number.',
   },
   {
     id: 'noise',
@@ -23,13 +24,13 @@ export const detectorQuantities = inGroup('detector', [
     unit: '',
     of: (e) => e.noise.total,
     words:
-      'Relative standard deviation of the signal over the detail: quantum, electronic, structure and background together.',
+      'Standard deviation of the mean over the detail’s area, relative to the whole signal: quantum, electronic, structure and background together, of one displayed frame.',
   },
   {
     id: 'sdnr',
     name: 'SdNR',
     unit: '',
     of: (e) => e.sdnr,
-    words: 'Signal difference to noise ratio of the detail over its own area.',
+    words: 'Detected contrast of the detail, as a size, over the noise of the mean over its area.',
   },
 ]);

@@ -8,7 +8,7 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mGy',
     per: 'per frame',
     of: (e) => e.dose.incidentAirKerma_mGy,
-    words: 'Air kerma on the axis at the skin, behind the support, without backscatter.',
+    words: 'Air kerma on the axis at the skin, behind air and support, without backscatter.',
   },
   {
     id: 'entranceSurfaceAirKerma',
@@ -31,7 +31,8 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mGy',
     per: 'per frame',
     of: (e) => e.dose.referenceAirKerma_mGy,
-    words: 'Air kerma at the room’s reference point, without backscatter.',
+    words:
+      'Air kerma in free air at the room’s reference point, before any support, without backscatter.',
   },
   {
     id: 'kermaAreaProduct',
@@ -39,7 +40,8 @@ export const doseQuantities = inGroup('dose', [
     unit: 'Gy cm²',
     per: 'per frame',
     of: (e) => e.dose.kermaAreaProduct_Gycm2,
-    words: 'Incident air kerma times the area of the field at the skin.',
+    words:
+      'Reference air kerma times the area of the field at the reference point, before any support; of a point source, much the same at any distance.',
   },
   {
     id: 'energyImparted',
@@ -47,7 +49,8 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mJ',
     per: 'per frame',
     of: (e) => e.dose.energyImparted_mJ,
-    words: 'Energy of the beam that stays in the patient, primary and scattered.',
+    words:
+      'Energy of the whole field that stays in the patient, from primary and scattered photons.',
   },
   {
     id: 'meanAbsorbedDose',
@@ -55,7 +58,7 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mGy',
     per: 'per frame',
     of: (e) => e.dose.meanAbsorbedDose_mGy,
-    words: 'Energy imparted over the mass of the irradiated stack.',
+    words: 'Energy imparted over the mass of all layers inside the field.',
   },
   {
     id: 'skinAbsorbedDose',
@@ -63,7 +66,8 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mGy',
     per: 'per frame',
     of: (e) => e.dose.skinAbsorbedDose_mGy,
-    words: 'Entrance surface air kerma times the ratio of mass energy absorption, skin over air.',
+    words:
+      'Entrance surface air kerma times the ratio of mass energy-absorption coefficients μen/ρ, skin (ICRU 46 composition) over air, averaged over the incident beam.',
   },
   {
     id: 'incidentAirKermaRate',
@@ -71,7 +75,8 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mGy/min',
     per: 'per minute',
     of: (e) => e.dose.incidentAirKermaRate_mGy_per_min,
-    words: 'Incident air kerma per frame times the frame rate.',
+    words:
+      'Incident air kerma per frame times the frames per minute; a single radiograph has no rate.',
   },
   {
     id: 'runIncidentAirKerma',

@@ -8,7 +8,8 @@ export const exposureQuantities = inGroup('exposure', [
     unit: 'mAs',
     per: 'per frame',
     of: (e) => e.exposure.tubeLoad_mAs,
-    words: 'Tube current times exposure time that the control needs to reach what it holds.',
+    words:
+      'Tube current times exposure time with which the control reaches what it holds, or as its curve sets it.',
   },
   {
     id: 'tubeCurrent',

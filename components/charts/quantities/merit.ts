@@ -8,7 +8,7 @@ export const meritQuantities = inGroup('merit', [
     unit: '/mGy',
     of: (e) => e.figureOfMerit.perIncidentAirKerma_per_mGy,
     words:
-      'SdNR squared over incident air kerma per frame: does not change with load while noise is quantum noise.',
+      'SdNR squared over incident air kerma, both of one frame: does not change with load while noise is quantum noise.',
   },
   {
     id: 'meritKap',

@@ -15,7 +15,8 @@ export const scatterQuantities = inGroup('scatter and grid', [
     name: 'Scatter to primary, behind grid',
     unit: '',
     of: (e) => e.scatter.sprBehindGrid,
-    words: 'The same behind the grid where it is in.',
+    words:
+      'Detector signal from scattered photons over that from primary ones at the field centre, behind the grid; without a grid in the beam, as without grid.',
   },
   {
     id: 'buckyFactor',

@@ -21,9 +21,12 @@ export const fraction = z.number().min(0).max(1);
 export const potential_kV = z.number().min(20).max(150);
 /** From the tube model's lowest energy to the end of the attenuation tables. */
 export const energy_keV = z.number().min(5).max(20000);
-export const range = z.strictObject({ min: nonNegative, max: positive });
+export const range = z.strictObject({
+  min: nonNegative.describe('Least value.'),
+  max: positive.describe('Greatest value.'),
+});
 
 export const slab = z.strictObject({
-  material: materialName,
-  thickness_mm: z.number().min(0).max(1000),
+  material: materialName.describe("Built-in material, element or one of the case's materials."),
+  thickness_mm: z.number().min(0).max(1000).describe('Thickness along the beam, mm.'),
 });

@@ -150,6 +150,17 @@ describe('a sound case', () => {
     expect(massFractions.Na + massFractions.Cl).toBeCloseTo(1, 12);
   });
 
+  it('may give the thickness of the strips alone, or their material: the other is assumed', () => {
+    const c = soundCase();
+    c.room.grid.strip = { thickness_um: 20 };
+    const thin = parsed(c);
+    expect(thin.case.room.grid?.strip).toEqual({ material: 'lead', thickness_um: 20 });
+    expect(thin.assumed).toContain('room.grid.strip.material');
+    expect(thin.assumed).not.toContain('room.grid.strip.thickness_um');
+    c.room.grid.strip = { material: 'tungsten' };
+    expect(parsed(c).case.room.grid?.strip.thickness_um).toBe(36);
+  });
+
   it('keeps markup in names as the text it is', () => {
     const c = soundCase();
     c.techniques[1].name = '<img src=x onerror=alert(1)> & "quotes"';

@@ -96,6 +96,20 @@ describe('the published checks', () => {
     expect(limits.some(({ verdict }) => verdict === 'met')).toBe(true);
   });
 
+  it('count as carried, not computed, what is only entered: compositions and legal limits', () => {
+    const tables = (kind: string) =>
+      new Set(rows.filter((one) => one.kind === kind).map(({ id }) => id.split(':')[0]));
+    expect(tables('data carried')).toEqual(new Set(['compositions', 'min_hvl']));
+    expect([...tables('computed')]).not.toContain('compositions');
+    expect([...tables('computed')]).not.toContain('min_hvl');
+  });
+
+  it('ask no number to be exactly nothing', () => {
+    expect(rows.filter(({ expected, tolerance }) => expected === 0 && tolerance === 0)).toEqual(
+      rows.filter(({ kind, expected }) => kind === 'data carried' && expected === 0),
+    );
+  });
+
   it('have names of their own', () => {
     expect(new Set(rows.map(({ id }) => id)).size).toBe(rows.length);
   });

@@ -11,12 +11,10 @@ import {
 } from '../../../components/desk/sweep-section/sweep-state.js';
 import { progressWords } from '../../../components/desk/sweep-section/sweep-words.js';
 import { type Json, valueAtPath } from '../../../components/store/path.js';
-import type { SweepPool } from '../../../components/workers/sweep-pool.js';
 import { parseCase } from '../../../physics/case/index.js';
-import type { RoomTask } from '../../../physics/sweep/room-task.js';
-import { runRoomTask } from '../../../physics/sweep/room-task.js';
 import { wholeRoom } from '../../../physics/sweep.js';
 import { sampleCase, sampleJson } from '../../physics/sample-case.js';
+import { samePool } from '../sample/pool.js';
 
 const parsed = sampleCase({
   room: { tube: { potential_kV: { min: 60, max: 100, step: 20 } } },
@@ -93,30 +91,13 @@ describe('keys on the map', () => {
   });
 });
 
-/** A pool that answers on this thread, one task a turn, and hears the signal. */
-const pool: SweepPool = {
-  run: async (given, tasks, { onAnswer, signal } = {}) => {
-    const answers = [];
-    for (const [i, task] of tasks.entries()) {
-      await Promise.resolve();
-      signal?.throwIfAborted();
-      const answer = runRoomTask(given.case, task as RoomTask) as never;
-      answers.push(answer);
-      onAnswer?.(i, answer);
-    }
-    return answers;
-  },
-  isBusy: () => false,
-  end: () => undefined,
-};
-
 const stateAfter = async (
   use: (run: ReturnType<typeof sweepRunner>, told: SweepState[]) => unknown,
 ) => {
   const told: SweepState[] = [];
   let clock_ms = 0;
   const runner = sweepRunner(
-    () => pool,
+    () => samePool,
     (state) => told.push(state),
     () => (clock_ms += 200),
   );
@@ -154,7 +135,7 @@ describe('a sweep on the desk', () => {
   it('cancelled, keeps what it has and says that it is incomplete', async () => {
     const told = await stateAfter(async (runner, heard) => {
       const run = runner.run(parsed, request, 'large');
-      while (heard.length < 3) await Promise.resolve();
+      while (heard.length < 3) await new Promise((turn) => setTimeout(turn));
       runner.cancel();
       await run;
     });
@@ -165,7 +146,7 @@ describe('a sweep on the desk', () => {
   });
 
   it('says why it failed', async () => {
-    const broken = { ...pool, run: () => Promise.reject(new Error('out of memory')) };
+    const broken = { ...samePool, run: () => Promise.reject(new Error('out of memory')) };
     const told: SweepState[] = [];
     await sweepRunner(
       () => broken,

@@ -42,8 +42,10 @@ export class BalanceSection extends LitElement {
 
   private ratios() {
     const comparison = comparisonOf(this.model);
-    if (!comparison || this.model.right === null)
+    if (this.model.right === null)
       return html`<p class="note">With one technique there is nothing to weigh.</p>`;
+    if (!comparison)
+      return html`<p class="note">${this.model.weighing ? 'The two techniques shown cannot both be computed at this size; the findings say why.' : 'computing …'}</p>`;
     const color = techniqueInk(this.model.right).color;
     const known = ratioNames.filter(([key]) =>
       comparison.rows.some((row) => row.ratio[key] !== null),

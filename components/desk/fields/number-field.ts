@@ -44,6 +44,10 @@ export class NumberField extends LitElement {
         margin-inline: min(0px, (var(--natural) - 24px) / 2);
         text-align: center;
       }
+      /* Words in place of a figure have no unit. */
+      input:placeholder-shown:not([placeholder=""]) + .unit {
+        display: none;
+      }
     `,
   ];
 

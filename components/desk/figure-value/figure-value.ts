@@ -89,6 +89,18 @@ export class FigureValue extends LitElement {
       :host([stale]) .ratio svg {
         opacity: 0.45;
       }
+      /* On a narrow page the ratio goes below its number. */
+      @media (max-width: 719px) {
+        :host {
+          flex-wrap: wrap;
+        }
+        .value.compared {
+          min-width: 0;
+        }
+        .ratio {
+          margin-inline-start: 0;
+        }
+      }
     `,
   ];
 

@@ -8,6 +8,7 @@ export const fieldSheet = css`
   }
   :host([inline]) {
     display: inline-block;
+    position: relative;
     vertical-align: baseline;
   }
   *,

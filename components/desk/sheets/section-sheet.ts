@@ -56,6 +56,8 @@ export const sectionSheet = css`
   }
   .scroll {
     overflow-x: auto;
+    /* Names for screen readers alone are placed within it, and do not widen the page. */
+    position: relative;
   }
   table {
     border-collapse: collapse;

@@ -56,12 +56,16 @@ export class TechniquesSection extends LitElement {
         line-height: 1.6;
       }
       .results {
-        columns: 30rem;
+        /* Wide enough for names and for a figure with its ratio per technique; narrower pages scroll. */
+        --name: 12.5rem;
+        --needed: calc(var(--name) + var(--techniques) * 6.8rem);
+        columns: var(--needed);
         column-gap: 3rem;
         margin-block-start: 1.2rem;
       }
       .results table {
         width: 100%;
+        min-width: var(--needed);
         break-inside: avoid;
         margin-block-end: 1.2rem;
       }
@@ -69,7 +73,7 @@ export class TechniquesSection extends LitElement {
         table-layout: fixed;
       }
       .results th:first-child {
-        width: 12.5rem;
+        width: var(--name);
         white-space: normal;
       }
       .results td {
@@ -83,6 +87,11 @@ export class TechniquesSection extends LitElement {
       .ratio {
         color: var(--soft);
         padding-inline-start: 0.6rem;
+      }
+      @media (max-width: 719px) {
+        .results {
+          --name: 8.5rem;
+        }
       }
     `,
   ];
@@ -149,7 +158,7 @@ export class TechniquesSection extends LitElement {
             )}</tr>
           </tbody>
         </table></div>
-        <div class="results">${quantityGroups.map((group) => this.results(group))}</div>
+        <div class="results scroll" style="--techniques:${techniques.length}" tabindex="0" role="region" aria-label="Quantities of every technique">${quantityGroups.map((group) => this.results(group))}</div>
       </div>
     </section>`;
   }

@@ -8,8 +8,12 @@ import { material, stackOf } from './stacks.js';
 /** Stacks (all invented) on which the scatter estimate is held against photon transport. */
 export interface AccuracyStack {
   readonly name: string;
-  /** `tried`: used while the estimate was made; `unseen`: not; `opaque`: next to no primary. */
-  readonly role: 'tried' | 'unseen' | 'opaque';
+  /**
+   * `tried`: used while the estimate was made. `unseen`: not used for a choice, but looked at again after
+   * each. `opaque`: next to no primary. `untouched`: chosen and run once, on 2026-12-01, when every
+   * constant stood; no constant may be changed for them.
+   */
+  readonly role: 'tried' | 'unseen' | 'opaque' | 'untouched';
   readonly layers: readonly (readonly [Material, number])[];
 }
 
@@ -142,6 +146,27 @@ export const accuracyStacks: readonly AccuracyStack[] = [
       [soft, 10],
       [barium, 3],
       [soft, 8],
+    ],
+  },
+  {
+    name: 'newborn chest',
+    role: 'untouched',
+    layers: [
+      [muscle, 1],
+      [material('lung'), 5],
+      [soft, 2],
+    ],
+  },
+  {
+    name: 'knee with iodine',
+    role: 'untouched',
+    layers: [
+      [muscle, 3.5],
+      [iodine(150), 0.5],
+      [bone, 1.5],
+      [soft, 3],
+      [bone, 1],
+      [muscle, 2.5],
     ],
   },
 ];

@@ -18,8 +18,12 @@ export default defineConfig({
           name: 'unit',
           include: ['test/**/*.test.ts'],
           exclude: ['test/browser/**', 'test/**/*.browser.test.ts'],
-          // Pure functions: files share modules, so tables are unpacked and prepared once a thread.
-          pool: 'threads',
+          // Node runs the sources itself, which is twice as fast as through Vite's module runner.
+          experimental: { viteModuleRunner: false, nodeLoader: false },
+          execArgv: ['--import', 'tsx'],
+          // Only the desk has decorators.
+          env: { TSX_TSCONFIG_PATH: 'components/desk/tsconfig.json' },
+          // Pure functions: files share modules, so tables are unpacked once a process.
           isolate: false,
           maxWorkers: '100%',
           // A test that hangs is ended; on a busy machine a heavy one may take its time.

@@ -3,8 +3,8 @@ import type { Comparison, Evaluation, HoldConstant, Ratios, Weighing } from '../
 
 /** Quantities the page of worked cases gives, by name and unit as `stratabeam weigh` prints them. */
 const shownQuantities: readonly (readonly [name: string, unit: string])[] = [
-  ['first half-value layer', 'mm Al'],
-  ['primary transmission', ''],
+  ['first half-value layer, in vacuum', 'mm Al'],
+  ['patient, primary transmission', ''],
   ['scatter-to-primary ratio', ''],
   ['subject contrast', ''],
   ['detected contrast', ''],
@@ -58,9 +58,11 @@ const ratioTable = ({ from, to, rows }: Comparison): string =>
     }),
   );
 
-/** Three digits, no exponent. */
-const digits = (value: number | null | undefined): string =>
-  value == null ? '–' : String(Number(value.toPrecision(3)));
+/** Three digits, no exponent; zeros at the end stay, so that a reader sees the precision. */
+const digits = (value: number | null | undefined): string => {
+  if (value == null) return '–';
+  return Math.abs(value) < 1000 ? value.toPrecision(3) : String(Number(value.toPrecision(3)));
+};
 
 const markdown = (heading: readonly string[], rows: readonly (readonly string[])[]): string => {
   const line = (cells: readonly string[]): string => `| ${cells.join(' | ')} |`;

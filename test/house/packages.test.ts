@@ -1,8 +1,10 @@
 import { describe, expect, test } from 'vitest';
+import { version } from '../../physics/version.js';
 import { folderOf, packageOf, readSource, sourceFiles } from './folders.js';
 import { importsOf } from './imports-of.js';
 
 interface Manifest {
+  readonly version: string;
   readonly scripts: Record<string, string>;
   readonly dependencies: Record<string, string>;
   readonly devDependencies: Record<string, string>;
@@ -25,6 +27,11 @@ describe('packages', () => {
       expect(copiesOf(name)).toEqual([`node_modules/${name}`]);
     },
   );
+
+  test('answers carry the version of the package', () => {
+    expect(version).toBe(manifest.version);
+    expect(lock.packages[''].version).toBe(manifest.version);
+  });
 
   test('every version is pinned exactly', () => {
     const loose = Object.entries({ ...manifest.dependencies, ...manifest.devDependencies }).filter(

@@ -9,6 +9,7 @@ export { type NoCheck, setUpCheck } from './set-up-check.js';
 export {
   statedAccuracy_percent,
   statedBalance_fraction,
+  statedMean_percent,
   statedSpread_percent,
 } from './stated-accuracy.js';
 export { type Fate, fates, fateWords, trackFates } from './track-fates.js';

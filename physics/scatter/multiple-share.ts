@@ -78,9 +78,10 @@ function sourceNearness({ slabs, geometry, nodes }: ScatterScene, shift_mfp: num
 }
 
 /**
- * A field's share f in a cone: nearer to the source by c, the fluence is c² higher and the field c times
- * narrower, which costs c^s with s = d ln f/d ln a, near 2(1 − f^1.5) in the field table. In water at
- * 60 keV this is the 0–2.5 % by which transport finds multiple scatter ahead of C/C∞.
+ * A field's share f in a cone, of scatter that arises nearer to the source by c (farther where c < 1):
+ * there the fluence is c² higher and the field c times narrower, which costs c^s with s = d ln f/d ln a,
+ * near 2(1 − f^1.5) in the field table. In water at 60 keV this is the 0–2.5 % by which transport finds
+ * multiple scatter ahead of C/C∞.
  */
-const diverged = (share: number, nearness: number): number =>
+export const diverged = (share: number, nearness: number): number =>
   share * nearness ** (2 * Math.min(1, share) ** 1.5);

@@ -62,3 +62,13 @@ export function linearCoefficients(
     photoelectric: linear(mass.photoelectric),
   };
 }
+
+/** Mean number of interactions on a straight way through, over energies. */
+export function opticalDepthOf(slabs: readonly Slab[], energies_keV: Float64Array): Float64Array {
+  const depth = new Float64Array(energies_keV.length);
+  for (const { material, thickness_cm } of slabs) {
+    const { attenuation } = linearCoefficients(material, energies_keV);
+    for (let i = 0; i < depth.length; i++) depth[i] += attenuation[i] * thickness_cm;
+  }
+  return depth;
+}

@@ -129,11 +129,13 @@ function displacementScoring(
  */
 const near_cm = 3;
 const halfRegion_cm = 3;
-/** Greatest share of the field that the square spans. */
+/** Greatest share of the field that a square spans. */
 const regionShare = 1 / 5;
-/** Backscatter changes little across a field: its square may be larger. */
+/**
+ * The square at the skin spans a fifth of the field too: in a 16 cm field behind carbon fibre and 4 cm of
+ * foam its mean backscatter factor lies 0.15 % below the centre's (a third of the field, 0.45 %).
+ */
 const halfSkinRegion_cm = 5;
-const skinRegionShare = 1 / 3;
 
 function forcedScoring(
   stack: Stack,
@@ -148,7 +150,7 @@ function forcedScoring(
     detector_cm: geometry.detector_cm,
     near_cm,
     halfRegion_cm: Math.min(halfRegion_cm, halfField_cm * regionShare),
-    halfSkinRegion_cm: Math.min(halfSkinRegion_cm, halfField_cm * atSkin * skinRegionShare),
+    halfSkinRegion_cm: Math.min(halfSkinRegion_cm, halfField_cm * atSkin * regionShare),
     densities: materials.map(angleDensity),
     worth: worthTable(geometry, materials, meanEnergy_keV),
   };

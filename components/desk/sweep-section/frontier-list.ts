@@ -5,7 +5,7 @@ import type { SweepSetting } from '../../../physics/sweep/sweep-setting.js';
 import { formatNumber } from '../../charts/format.js';
 
 /** More rows than this no one reads; the CSV holds all. */
-const most = 120;
+const most = 60;
 
 /**
  * The members of a frontier, cheapest by the first cost first, each to be adopted.

@@ -30,6 +30,8 @@ export class MapPanel extends LitElement {
   @property() cost: CostName = 'incidentAirKerma';
   @property() told = '';
   @state() private cursor: MapCursor | null = null;
+  /** A closed table is not made: it holds every setting. */
+  @state() private isTableOpen = false;
 
   private readonly measured = new OwnWidth(this, '.map-box', 788);
 
@@ -101,7 +103,9 @@ export class MapPanel extends LitElement {
       ${mapLegend(data)}
       <output id="reading" aria-live="polite">${this.reading()}</output>
       <slot></slot>
-      <details><summary>The map as a table</summary>${guard([data], () => sweepMapTable(data))}</details>`;
+      <details @toggle=${(event: Event) => {
+        this.isTableOpen = (event.target as HTMLDetailsElement).open;
+      }}><summary>The map as a table</summary>${this.isTableOpen ? guard([data], () => sweepMapTable(data)) : nothing}</details>`;
   }
 }
 

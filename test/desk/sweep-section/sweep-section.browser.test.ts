@@ -124,6 +124,9 @@ describe('the sweep', () => {
 
   it('has the map as a table', async () => {
     const map = deep(await done(), 'map-panel');
+    deep(map, 'summary').click();
+    await new Promise((opened) => setTimeout(opened, 50));
+    await settled(map);
     expect(map.shadowRoot?.querySelectorAll('details tbody tr')).to.have.length(6);
   });
 

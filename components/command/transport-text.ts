@@ -3,6 +3,7 @@ import {
   type CheckRow,
   photonsText,
   statedBalance_fraction,
+  verdictRule,
   verdictText,
 } from '../../physics/check-by-transport/index.js';
 import { csvText } from '../../physics/csv/csv-text.js';
@@ -28,6 +29,7 @@ export const transportText = (report: CheckReport, stamp: CaseStamp): string =>
   [
     headingText(report, stamp),
     rowsTable(report.rows),
+    `${verdictRule.join('\n')}\n`,
     balanceTable(report),
     findingsText(report.findings),
   ]
@@ -59,6 +61,7 @@ const rowsTable = (rows: readonly CheckRow[]): string =>
       '± 1 s.e.',
       'difference %',
       's.e.s',
+      'to decide',
     ],
     rows: rows.map((row) => [
       row.layer === null ? row.name.toLowerCase() : `${row.name.toLowerCase()}, ${row.layer}`,
@@ -69,6 +72,7 @@ const rowsTable = (rows: readonly CheckRow[]): string =>
       shown(row.transport.standardError, 2),
       row.difference_percent === null ? '–' : row.difference_percent.toFixed(1),
       row.z === null ? '–' : row.z.toFixed(1),
+      row.photonsToDecide === null ? '–' : photonsText(row.photonsToDecide),
     ]),
     wordColumns: 3,
   });
@@ -114,6 +118,7 @@ export const transportCsv = ({ technique, size, photons, seed, rows }: CheckRepo
       'z',
       'tolerance_percent',
       'verdict',
+      'photonsToDecide',
     ],
     rows.map((row) => [
       technique,
@@ -130,5 +135,6 @@ export const transportCsv = ({ technique, size, photons, seed, rows }: CheckRepo
       row.z,
       row.tolerance_percent,
       row.verdict,
+      row.photonsToDecide,
     ]),
   );

@@ -33,7 +33,7 @@ export interface CheckRow extends Judged {
   readonly transport: Estimated;
   /** Greatest difference stated for the estimate. */
   readonly tolerance_percent: number | null;
-  /** Photons after which two standard errors would fit into the tolerance. */
+  /** Photons after which a verdict falls (see `photonsToDecide`); null where there is none to fall. */
   readonly photonsToDecide: number | null;
 }
 
@@ -149,6 +149,8 @@ const rowOf =
       transport,
       tolerance_percent,
       ...(isCompared ? judge(estimate, transport, tolerance_percent) : nothingToJudge),
-      photonsToDecide: isCompared ? photonsToDecide(transport, tolerance_percent, photons) : null,
+      photonsToDecide: isCompared
+        ? photonsToDecide(estimate, transport, tolerance_percent, photons)
+        : null,
     };
   };

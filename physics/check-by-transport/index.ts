@@ -14,4 +14,4 @@ export {
 } from './stated-accuracy.js';
 export { type Fate, fates, fateWords, trackFates } from './track-fates.js';
 export { type Judged, judge, photonsToDecide, type Verdict } from './verdict.js';
-export { photonsText, verdictText } from './verdict-text.js';
+export { photonsText, verdictRule, verdictText } from './verdict-text.js';

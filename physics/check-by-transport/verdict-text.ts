@@ -1,5 +1,6 @@
 import { numberText } from '../number-text.js';
 import type { CheckRow } from './check-rows.js';
+import { sureStandardErrors } from './verdict.js';
 
 const units = [
   [1e9, ' billion'],
@@ -15,6 +16,15 @@ export const photonsText = (photons: number): string => {
   return `${numberText(rounded / size)}${name}`;
 };
 
+/** How a verdict falls, for under a table of them. */
+export const verdictRule = [
+  'One s.e. is the standard error of the mean, from how the means of the batches of the run differ.',
+  `A verdict falls once ${sureStandardErrors} s.e. fit into the stated accuracy: the estimate agrees inside it, and differs`,
+  `where it lies outside by more than ${sureStandardErrors} s.e.; between the two more photons decide. "To decide" is how`,
+  `many in all, if the values stay as they are. Chance passes ${sureStandardErrors} s.e. to one side in 1 of 40 rows:`,
+  'where few photons say "differs" and more say "not yet decided", believe the longer run.',
+] as const;
+
 /** The verdict on a row in plain words. */
 export const verdictText = ({
   tolerance_percent,
@@ -28,9 +38,9 @@ export const verdictText = ({
   if (verdict === 'differs') return `differs by more than ${within}`;
   const isBlurred =
     transport.standardError === null ||
-    2 * transport.standardError > (Math.abs(transport.value) * tolerance_percent) / 100;
-  if (!isBlurred) return `not yet decided: at the edge of ${within}`;
-  return photonsToDecide === null
-    ? 'not yet decided'
-    : `not yet decided: needs ${photonsText(photonsToDecide)} photons`;
+    sureStandardErrors * transport.standardError >
+      (Math.abs(transport.value) * tolerance_percent) / 100;
+  const state = isBlurred ? 'not yet decided' : `not yet decided: at the edge of ${within}`;
+  if (photonsToDecide === null) return state;
+  return `${state}${isBlurred ? ':' : ','} needs ${photonsText(photonsToDecide)} photons`;
 };

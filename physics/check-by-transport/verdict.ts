@@ -12,8 +12,8 @@ export interface Judged {
   readonly verdict: Verdict | null;
 }
 
-/** The difference a number of standard errors cannot explain. */
-const sure = 2;
+/** Standard errors taken as what chance explains: one row in 40 goes further, on either side. */
+export const sureStandardErrors = 2;
 
 /**
  * Undecided while two standard errors do not fit into the tolerance. Then the estimate agrees
@@ -30,7 +30,7 @@ export const judge = (
     return { difference_percent: null, z: null, verdict: 'undecided' };
   }
   const allowed = (Math.abs(value) * tolerance_percent) / 100;
-  const error = sure * standardError;
+  const error = sureStandardErrors * standardError;
   const excess = Math.abs(difference) - allowed;
   return {
     difference_percent: (100 * difference) / value,
@@ -47,15 +47,20 @@ export const judge = (
 };
 
 /**
- * Photons after which two standard errors would fit into the tolerance, from the error so far
- * (which falls with the square root); null while nothing is known.
+ * Photons after which a verdict falls if value and estimate stay as they are, from the error so far (which
+ * falls with the square root): two standard errors must fit into the tolerance and, where the
+ * difference exceeds it, into the excess. Null while nothing is known, and on the very edge.
  */
 export const photonsToDecide = (
+  estimate: number,
   { value, standardError }: Estimated,
   tolerance_percent: number,
   photons: number,
 ): number | null => {
   if (value === 0 || standardError === null) return null;
   const allowed = (Math.abs(value) * tolerance_percent) / 100;
-  return photons * ((sure * standardError) / allowed) ** 2;
+  const excess = Math.abs(estimate - value) - allowed;
+  const room = excess > 0 ? Math.min(allowed, excess) : allowed;
+  const needed = photons * ((sureStandardErrors * standardError) / room) ** 2;
+  return Number.isFinite(needed) ? needed : null;
 };

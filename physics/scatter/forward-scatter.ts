@@ -6,12 +6,7 @@ import type { EnergyNodes } from './energy-nodes.js';
 import { firstOrder } from './first-order.js';
 import { broadened, type ScatterGeometry } from './geometry.js';
 import { fieldShares } from './multiple-share.js';
-import {
-  airKermaPerFluence,
-  airKermaScore,
-  type ScatterDetector,
-  scoreTable,
-} from './scores.js';
+import { airKermaPerFluence, airKermaScore, type ScatterDetector, scoreTable } from './scores.js';
 import type { Slab } from './slabs.js';
 
 /** Air kerma of what slabs scatter onto the plane behind them over that of the primary there. */

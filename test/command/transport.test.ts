@@ -69,6 +69,8 @@ describe('stratabeam transport', () => {
       /\nCurrent, 80 kV, no filter, grid in, size as drawn\n20000 photons, seed 1, \d+ photons\/s\n/,
       /\nscatter to primary, behind grid +(agrees within|not yet decided|differs by)/,
       /\nabsorbed dose, central column, water +transport alone +mGy +–/,
+      /± 1 s\.e\. +difference % +s\.e\.s +to decide\n/,
+      /\nA verdict falls once 2 s\.e\. fit into the stated accuracy: /,
       /\nfound again +100\.000\n/,
     ]) {
       expect(out).toMatch(part);

@@ -26,8 +26,7 @@ import { spectrumSpr } from '../physics/scatter/spectrum-spr.js';
 const usualSeed = 71;
 /** The untouched stacks have a seed that no choice was made with. */
 const untouchedSeed = 90_217;
-const seedOf = (role: AccuracyStack['role']) =>
-  role === 'untouched' ? untouchedSeed : usualSeed;
+const seedOf = (role: AccuracyStack['role']) => (role === 'untouched' ? untouchedSeed : usualSeed);
 /** Standard errors aimed at, and the photons a run may take for them. */
 const wanted = { open: 0.008, behindGrid: 0.02 };
 const photons = { pilot: 100_000, least: 200_000, most: 8_000_000 };

@@ -8,7 +8,8 @@ export const doseQuantities = inGroup('dose', [
     unit: 'mGy',
     per: 'per frame',
     of: (e) => e.dose.incidentAirKerma_mGy,
-    words: 'Air kerma on the axis at the skin, behind air and support, without backscatter.',
+    words:
+      'Air kerma of the primary beam on the axis at the skin, behind air and support, without backscatter and without what the support scatters forward.',
   },
   {
     id: 'entranceSurfaceAirKerma',
@@ -23,7 +24,8 @@ export const doseQuantities = inGroup('dose', [
     name: 'Backscatter factor',
     unit: '',
     of: (e) => e.dose.backscatterFactor,
-    words: 'Entrance surface air kerma over incident air kerma.',
+    words:
+      'Entrance surface air kerma over incident air kerma: it counts scatter back from the patient and, behind a support, forward from the support.',
   },
   {
     id: 'referenceAirKerma',

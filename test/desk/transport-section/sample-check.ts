@@ -31,7 +31,9 @@ const row = (
     ...(compared
       ? judge(estimate, transport, tolerance_percent)
       : { difference_percent: null, z: null, verdict: null }),
-    photonsToDecide: compared ? photonsToDecide(transport, tolerance_percent, 400_000) : null,
+    photonsToDecide: compared
+      ? photonsToDecide(estimate, transport, tolerance_percent, 400_000)
+      : null,
   };
 };
 

@@ -44,10 +44,20 @@ describe('the verdict on an estimate', () => {
   });
 
   it('asks for as many photons as bring two standard errors into the tolerance', () => {
-    const wanted = photonsToDecide(transport(2, 0.4), 10, 1000) ?? 0;
+    const wanted = photonsToDecide(2.1, transport(2, 0.4), 10, 1000) ?? 0;
     expect(wanted).toBeCloseTo(16_000, 6);
     const then = 0.4 * Math.sqrt(1000 / wanted);
     expect(2 * then).toBeCloseTo(0.2, 12);
+  });
+
+  it('at the edge asks for as many photons as bring two standard errors into the excess', () => {
+    const atEdge = transport(2, 0.02);
+    expect(judge(2.23, atEdge, 10).verdict).toBe('undecided');
+    const wanted = photonsToDecide(2.23, atEdge, 10, 9000) ?? 0;
+    const then = transport(2, 0.02 * Math.sqrt(9000 / wanted) * 0.999);
+    expect(wanted).toBeGreaterThan(9000);
+    expect(judge(2.23, then, 10).verdict).toBe('differs');
+    expect(photonsToDecide(2.2, transport(2, 0.02), 10, 9000)).not.toBe(0);
   });
 
   it('is told in plain words', () => {
@@ -72,7 +82,9 @@ describe('the verdict on an estimate', () => {
         row({ verdict: 'undecided', transport: transport(2, 0.5), photonsToDecide: 2.43e6 }),
       ),
     ).toBe('not yet decided: needs 2.4 million photons');
-    expect(verdictText(row({ verdict: 'undecided' }))).toBe('not yet decided: at the edge of 10 %');
+    expect(verdictText(row({ verdict: 'undecided' }))).toBe(
+      'not yet decided: at the edge of 10 %, needs 100 photons',
+    );
     expect(verdictText(row({ verdict: null, tolerance_percent: null }))).toBe('transport alone');
   });
 

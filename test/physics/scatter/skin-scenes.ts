@@ -64,12 +64,7 @@ export const skinScenes: readonly SkinScene[] = [
   scene('abdomen on table and mattress, small field', mattress, abdomen, 12),
   scene('abdomen on table and mattress, large field', mattress, abdomen, 40),
   scene('soft tissue on a bare table', [slab('carbon fibre', 4)], soft, 25),
-  scene(
-    'chest on a thick mattress',
-    [slab('carbon fibre', 3), slab(foam.name, 80)],
-    chest,
-    35,
-  ),
+  scene('chest on a thick mattress', [slab('carbon fibre', 3), slab(foam.name, 80)], chest, 35),
   scene('child on an acrylic top and pad', [slab('pmma', 10), slab(foam.name, 20)], child, 15),
   scene('soft tissue on table and mattress, parallel', mattress, soft, 20, 'parallel'),
 ];

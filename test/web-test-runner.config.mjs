@@ -57,8 +57,8 @@ const config = {
     chromeLauncher({ launchOptions: { executablePath: findBrowser(), args: browserFlags() } }),
   ],
   filterBrowserLogs: ({ args }) => !String(args[0]).startsWith('Lit is in dev mode'),
-  testFramework: { config: { ui: 'bdd', timeout: 10_000 } },
-  testsFinishTimeout: 300_000,
+  testFramework: { config: { ui: 'bdd', timeout: 60_000 } },
+  testsFinishTimeout: 600_000,
   reporters: [summaryReporter({}), resultsReporter('dist/results/components.json')],
 };
 

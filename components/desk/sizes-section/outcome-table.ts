@@ -22,7 +22,7 @@ export function outcomeTable(outcomes: readonly MixOutcome[], current: string): 
     <thead><tr><td></td>${outcomes.map(({ technique }, i) => html`<th scope="col" style="color:${techniqueInk(i + 1).color}">${technique}</th>`)}</tr></thead>
     <tbody>
       ${row('incident air kerma', ratio('incidentAirKermaRatio'))}
-      ${row('kerma-area product', ratio('kermaAreaProductRatio'))}
+      ${row('kerma–area product', ratio('kermaAreaProductRatio'))}
       ${row('energy imparted', ratio('energyImpartedRatio'))}
       ${row('patients worse off', (outcome) => html`${formatPercent(outcome.worseOffShare)}${sizesSaid(outcome.worseOffSizes)}`)}
       ${row('patients at sizes the room forbids', (outcome) => html`${formatPercent(outcome.infeasibleShare)}${sizesSaid(outcome.infeasibleSizes)}`)}

@@ -11,7 +11,7 @@ export interface RulesData {
   readonly filter: string;
 }
 
-const margin = { top: 22, right: 118, bottom: 40, left: 42 };
+const margin = { top: 22, right: 142, bottom: 40, left: 42 };
 const dashes = ['', '7 4', '2 3'];
 
 const percent = (departure: number): string =>

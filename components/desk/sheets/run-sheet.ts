@@ -23,6 +23,11 @@ export const runSheet = css`
     border-block-end: 1px dotted var(--entry-rule);
     padding: 0;
   }
+  select {
+    appearance: none;
+    field-sizing: content;
+    cursor: pointer;
+  }
   input[type='text'] {
     width: 5ch;
   }

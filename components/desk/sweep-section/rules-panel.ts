@@ -8,6 +8,7 @@ import type { SweepPool } from '../../workers/sweep-pool.js';
 import type { DeskModel } from '../model/desk-model.js';
 import { chartSheet } from '../sheets/chart-sheet.js';
 import { sectionSheet } from '../sheets/section-sheet.js';
+import { OwnWidth } from './own-width.js';
 import { panelSheet } from './panel-sheet.js';
 import { sweepSheet } from './sweep-sheet.js';
 import { sweepBasis } from './sweep-state.js';
@@ -25,6 +26,7 @@ export class RulesPanel extends LitElement {
   @property() size = '';
   @state() departures: readonly RuleDeparture[] | null = null;
   private asked = '';
+  private readonly measured = new OwnWidth(this, '.departures', 560);
 
   static override styles = [chartSheet, sectionSheet, sweepSheet, panelSheet];
 
@@ -52,7 +54,7 @@ export class RulesPanel extends LitElement {
     const data = { departures: this.departures, size: this.size, filter: filterName(filter) };
     return html`<h3 class="next">Rules of thumb against the model, ${data.filter}, size ${this.size}</h3>
       <p class="note">Detector air kerma per mAs: 15 % more potential doubles it, 10 kV more doubles it, 3 cm more patient halves it (common practice, no source). Marked where a rule is more than a fifth off.</p>
-      ${rulesChart(data, { width: 560, height: 220 })}
+      <div class="departures">${rulesChart(data, { width: Math.min(560, this.measured.width), height: 220 })}</div>
       <details><summary>The same as a table</summary>${rulesTable(data)}</details>`;
   }
 }

@@ -46,9 +46,16 @@ export function autosave(database: string): Autosave {
       return null;
     }
   };
+  const put = async (sheet: Sheet) => {
+    const transaction = (await connected()).transaction('sheets', 'readwrite');
+    const stored = transaction.store.put(sheet, 'desk');
+    // Committed at once: a page that is going away does not live to hear that the put succeeded.
+    transaction.commit();
+    await Promise.all([stored, transaction.done]);
+    return true;
+  };
   return {
-    keep: async (sheet) =>
-      (await unlessRefused(async () => (await connected()).put('sheets', sheet, 'desk'))) !== null,
+    keep: async (sheet) => (await unlessRefused(() => put(sheet))) ?? false,
     recover: async () =>
       (await unlessRefused(async () => (await connected()).get('sheets', 'desk'))) ?? null,
   };

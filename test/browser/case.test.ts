@@ -89,6 +89,33 @@ describe('the desk, used', () => {
       expect(await potential(page, 'right').inputValue()).toBe('64');
     }));
 
+  test('after a reload nothing can be undone into another case', () =>
+    withDesk(async ({ page }) => {
+      await potential(page, 'right').fill('64');
+      await potential(page, 'right').press('Enter');
+      await page.reload();
+      await answered(page);
+      expect(await potential(page, 'right').inputValue()).toBe('64');
+      const undo = page.locator('desk-header button', { hasText: 'Undo' });
+      expect(await undo.isDisabled()).toBe(true);
+      await page.keyboard.press('Control+z');
+      expect(await potential(page, 'right').inputValue()).toBe('64');
+    }));
+
+  for (const [width, height] of [
+    [390, 844],
+    [1024, 768],
+    [1440, 900],
+  ]) {
+    test(`nothing makes the page wider than a window of ${width} × ${height}`, () =>
+      withDesk(async ({ page }) => {
+        await page.setViewportSize({ width, height });
+        await expect
+          .poll(() => page.evaluate(() => document.documentElement.scrollWidth))
+          .toBe(width);
+      }));
+  }
+
   test('every worked example opens and is computed', () =>
     withDesk(async ({ page }) => {
       const select = page.locator('desk-header select').first();

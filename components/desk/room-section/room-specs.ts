@@ -65,7 +65,7 @@ export const gridGroup: FieldGroup = {
 export const measuredGrid: PairSpec = {
   path: `${grid}.measured`,
   keys: ['primaryTransmission', 'scatterTransmission'],
-  labels: ['Primary transmission, measured', 'Scatter transmission, measured'],
+  labels: ['Primary transmission', 'Scatter transmission'],
   unit: '',
   step: 0.01,
   empty: 'not measured',

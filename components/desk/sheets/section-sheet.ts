@@ -102,6 +102,10 @@ export const sectionSheet = css`
     margin-inline-end: 0.9rem;
     cursor: pointer;
   }
+  select.plain {
+    field-sizing: content;
+    max-width: 100%;
+  }
   button.plain:hover:not(:disabled) {
     border-block-end: 1px solid currentColor;
   }

@@ -18,7 +18,7 @@ const listed = 20;
 export const sweepTables = (c: Case, swept: Sweep): string => {
   const { axes, holdConstant, investigationalAgent, findings } = swept;
   const heading = `${c.title || 'Untitled case'}\ncase ${caseHash(c)}, Stratabeam ${version}\n`;
-  const condition = `Current’s grid and acquisition, ${holdConstantWords[holdConstant]}; one frame\n`;
+  const condition = `${c.techniques[0].name}: its grid and acquisition, ${holdConstantWords[holdConstant]}; one frame\n`;
   const parts = axes.size.flatMap((size) => sizeParts(swept, size));
   const notes = [
     ...(investigationalAgent

@@ -6,6 +6,7 @@ import { sizesOf } from '../../../physics/stack/sizes.js';
 import type { CostName } from '../../../physics/sweep/costs.js';
 import { formatEntry } from '../../charts/format.js';
 import type { SweepPool } from '../../workers/sweep-pool.js';
+import { investigationalWords } from '../curve-panel/curve-data.js';
 import { requestEdit } from '../fields/case-edit.js';
 import type { Choice } from '../fields/choice-field.js';
 import { readNumber } from '../fields/read-number.js';
@@ -184,13 +185,14 @@ export class SolveSection extends LitElement {
     const size = this.sizeOfQuestions;
     const technique = this.techniqueShown;
     const { agent } = c.task.detail;
+    const investigational = investigationalWords(c);
     const cost = this.cost ?? c.compare.primaryDose;
     const thinnest_mm = Math.min(...sizesOf(c.patient).map(({ thickness_mm }) => thickness_mm));
     const thickTarget = this.thickTarget ?? c.task.roseThreshold;
     return html`<section aria-labelledby="heading">
       <h2 id="heading">Solve</h2>
       <div>
-        <p class="note">Each answer is run forward again and shown beside its target; where a limit stops it, the limit is named.</p>
+        <p class="note">Each answer is run forward again and shown beside its target; where a limit stops it, the limit is named.${investigational ? html` <b>${investigational}.</b>` : nothing}</p>
         <div class="questions">
           ${this.block(
             'Best setting',

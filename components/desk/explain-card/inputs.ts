@@ -28,7 +28,10 @@ const needs: Readonly<Record<string, readonly (keyof typeof inputs)[]>> = {
 export function inputsOf(id: string, model: DeskModel, techniqueName: string): InputSaid[] {
   const technique = model.draft.case.techniques.find(({ name }) => name === techniqueName);
   if (!technique) return [];
-  const keys = needs[quantity(id).id] ?? (Object.keys(inputs) as (keyof typeof inputs)[]);
+  const { group } = quantity(id);
+  const seesDetail = group === 'detail' || group === 'merit' || id === 'noise' || id === 'sdnr';
+  const all = Object.keys(inputs) as (keyof typeof inputs)[];
+  const keys = needs[id] ?? all.filter((key) => key !== 'detail' || seesDetail);
   return keys.flatMap((key) => inputs[key](model, technique) ?? []);
 }
 

@@ -76,6 +76,11 @@ describe('what a number was computed from', () => {
     ]);
   });
 
+  test('a dose does not depend on the detail, SdNR does', () => {
+    expect(said('incidentAirKerma', modelWith())).not.toHaveProperty('Detail');
+    expect(said('sdnr', modelWith())).toHaveProperty('Detail');
+  });
+
   test('a technique that is not in the case has nothing said of it', () => {
     expect(inputsOf('sdnr', modelWith(), 'none such')).toEqual([]);
   });

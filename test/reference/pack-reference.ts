@@ -47,7 +47,7 @@ ${list(provenances)}];
 
 /** Rows by file: set|item|value|unit|conditions|tolerance|number of source|number of provenance. */
 export const packedTables = {
-${tables.join('')}} as const;
+${tables.join('')}};
 `;
 }
 

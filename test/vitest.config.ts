@@ -39,7 +39,8 @@ export default defineConfig({
           globalSetup: ['test/browser/serve.ts'],
           testTimeout: 120_000,
           hookTimeout: 120_000,
-          fileParallelism: false,
+          // Two browsers at a time: each file judges what came first, none how long it took.
+          maxWorkers: 2,
         },
       },
     ],

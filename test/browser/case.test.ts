@@ -1,5 +1,5 @@
 import type { Browser, Page } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, inject, test } from 'vitest';
 import { parseCaseText } from '../../physics/case/index.js';
 import { brokenCases } from '../physics/case/broken-cases.js';
 import { openBrowser, type Visit, visit } from './desk.js';
@@ -43,13 +43,83 @@ const withDesk = async (check: (visit: Visit) => Promise<void>) => {
   await opened.close();
 };
 
-describe('the desk, used', () => {
-  test('opens on a worked example with both techniques computed', () =>
-    withDesk(async ({ page }) => {
-      expect(await page.locator('desk-header .title input').inputValue()).not.toBe('');
-      expect(await kerma(page, 'right').textContent()).toMatch(/\d/);
-    }));
+/** One page for what leaves the case as it was. */
+describe('the desk, looked at', () => {
+  let desk: Visit;
+  beforeAll(async () => {
+    desk = await visit(browser, inject('deskUrl'));
+    await answered(desk.page);
+  });
+  afterEach(() => expect(desk.complaints).toEqual([]));
+  afterAll(() => desk?.close());
 
+  test('opens on a worked example with both techniques computed', async () => {
+    const { page } = desk;
+    expect(await page.locator('desk-header .title input').inputValue()).not.toBe('');
+    expect(await kerma(page, 'right').textContent()).toMatch(/\d/);
+  });
+
+  for (const [width, height] of [
+    [390, 844],
+    [1024, 768],
+    [1440, 900],
+  ]) {
+    test(`nothing makes the page wider than a window of ${width} × ${height}`, async () => {
+      const { page } = desk;
+      await page.setViewportSize({ width, height });
+      await expect
+        .poll(() => page.evaluate(() => document.documentElement.scrollWidth))
+        .toBe(width);
+    });
+  }
+
+  test('the curve is read at a potential with the keyboard alone', async () => {
+    const { page } = desk;
+    const slider = page.locator('curve-panel input[type="range"]');
+    await slider.waitFor();
+    await slider.focus();
+    await page.keyboard.press('ArrowRight');
+    await expect.poll(() => page.locator('curve-panel output').textContent()).toMatch(/\d mGy/);
+  });
+
+  test('a layer is moved, added and removed with the keyboard alone, focus going along', async () => {
+    const { page } = desk;
+    const names = () =>
+      page
+        .locator('patient-section layer-row text-field input')
+        .evaluateAll((inputs) => inputs.map((input) => (input as HTMLInputElement).value));
+    /** Number of the layer whose row holds the focus. */
+    const focused = () =>
+      page
+        .locator('layer-row')
+        .evaluateAll((rows) => rows.findIndex((row) => row.matches(':focus-within')));
+    const before = await names();
+    await page.locator('layer-row').first().locator('number-field input').first().focus();
+    await page.keyboard.press('Alt+ArrowDown');
+    await expect.poll(names).toEqual([before[1], before[0], ...before.slice(2)]);
+    await expect.poll(focused).toBe(1);
+    await page.keyboard.press('Alt+ArrowUp');
+    await expect.poll(names).toEqual(before);
+    await expect.poll(focused).toBe(0);
+    await page.keyboard.press('Alt+Insert');
+    await expect.poll(async () => (await names()).length).toBe(before.length + 1);
+    await expect.poll(focused).toBe(1);
+    await page.keyboard.press('Alt+Delete');
+    await expect.poll(names).toEqual(before);
+  });
+
+  test('each number says how it is computed, and Escape goes back to it', async () => {
+    const { page } = desk;
+    await kerma(page, 'right').focus();
+    await page.keyboard.press('Enter');
+    await page.locator('explain-card').getByText('without backscatter').waitFor();
+    await page.keyboard.press('Escape');
+    expect(await page.locator('explain-card').isVisible()).toBe(false);
+  });
+});
+
+/** A fresh page for each. */
+describe('the desk, used', () => {
   test('an edit of the potential changes the numbers, undo and redo bring them back', () =>
     withDesk(async ({ page }) => {
       const before = await kerma(page, 'right').textContent();
@@ -102,20 +172,6 @@ describe('the desk, used', () => {
       expect(await potential(page, 'right').inputValue()).toBe('64');
     }));
 
-  for (const [width, height] of [
-    [390, 844],
-    [1024, 768],
-    [1440, 900],
-  ]) {
-    test(`nothing makes the page wider than a window of ${width} × ${height}`, () =>
-      withDesk(async ({ page }) => {
-        await page.setViewportSize({ width, height });
-        await expect
-          .poll(() => page.evaluate(() => document.documentElement.scrollWidth))
-          .toBe(width);
-      }));
-  }
-
   test('every worked example opens and is computed', () =>
     withDesk(async ({ page }) => {
       const select = page.locator('desk-header select').first();
@@ -128,50 +184,6 @@ describe('the desk, used', () => {
         expect(await page.locator('desk-page .trouble').count()).toBe(0);
         expect(await page.locator('fault-list li').count()).toBe(0);
       }
-    }));
-
-  test('the curve is read at a potential with the keyboard alone', () =>
-    withDesk(async ({ page }) => {
-      const slider = page.locator('curve-panel input[type="range"]');
-      await slider.waitFor();
-      await slider.focus();
-      await page.keyboard.press('ArrowRight');
-      await expect.poll(() => page.locator('curve-panel output').textContent()).toMatch(/\d mGy/);
-    }));
-
-  test('a layer is moved, added and removed with the keyboard alone, focus going along', () =>
-    withDesk(async ({ page }) => {
-      const names = () =>
-        page
-          .locator('patient-section layer-row text-field input')
-          .evaluateAll((inputs) => inputs.map((input) => (input as HTMLInputElement).value));
-      /** Number of the layer whose row holds the focus. */
-      const focused = () =>
-        page
-          .locator('layer-row')
-          .evaluateAll((rows) => rows.findIndex((row) => row.matches(':focus-within')));
-      const before = await names();
-      await page.locator('layer-row').first().locator('number-field input').first().focus();
-      await page.keyboard.press('Alt+ArrowDown');
-      await expect.poll(names).toEqual([before[1], before[0], ...before.slice(2)]);
-      await expect.poll(focused).toBe(1);
-      await page.keyboard.press('Alt+ArrowUp');
-      await expect.poll(names).toEqual(before);
-      await expect.poll(focused).toBe(0);
-      await page.keyboard.press('Alt+Insert');
-      await expect.poll(async () => (await names()).length).toBe(before.length + 1);
-      await expect.poll(focused).toBe(1);
-      await page.keyboard.press('Alt+Delete');
-      await expect.poll(names).toEqual(before);
-    }));
-
-  test('each number says how it is computed, and Escape goes back to it', () =>
-    withDesk(async ({ page }) => {
-      await kerma(page, 'right').focus();
-      await page.keyboard.press('Enter');
-      await page.locator('explain-card').getByText('without backscatter').waitFor();
-      await page.keyboard.press('Escape');
-      expect(await page.locator('explain-card').isVisible()).toBe(false);
     }));
 });
 

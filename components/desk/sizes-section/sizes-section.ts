@@ -118,7 +118,7 @@ export class SizesSection extends LitElement {
     const results = this.answer?.percentiles ?? [];
     return html`<div>
       ${isWhole ? outcomes.map((outcome) => html`<p class="lead">${outcomeSentence(outcome)}</p>`) : html`<p class="incomplete">${mix.weighed} of ${mix.sizes} sizes weighed: incomplete</p>`}
-      ${isWhole && outcomes.length > 0 ? html`<h3 class="next">Averaged over the mix</h3><div class="scroll" tabindex="0" role="region" aria-label="Averages over the mix"><div class="scroll" tabindex="0" role="region" aria-label="Averages over the mix">${outcomeTable(outcomes, c.techniques[0].name)}</div></div>` : nothing}
+      ${isWhole && outcomes.length > 0 ? html`<h3 class="next">Averaged over the mix</h3><div class="scroll" tabindex="0" role="region" aria-label="Averages over the mix">${outcomeTable(outcomes, c.techniques[0].name)}</div>` : nothing}
       ${
         results.length > 0
           ? html`<h3 class="next">Thin, middle and thick patients</h3><div class="scroll ${isStale ? 'stale' : ''}" tabindex="0" role="region" aria-label="Percentiles of the mix">${percentileTable(

@@ -1,5 +1,5 @@
 import type { Browser, Page } from 'playwright-core';
-import { afterAll, afterEach, beforeAll, describe, expect, inject, test } from 'vitest';
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, inject, test } from 'vitest';
 import { parseCaseText } from '../../physics/case/index.js';
 import { brokenCases } from '../physics/case/broken-cases.js';
 import { openBrowser, type Visit, visit } from './desk.js';
@@ -48,8 +48,8 @@ describe('the desk, looked at', () => {
   let desk: Visit;
   beforeAll(async () => {
     desk = await visit(browser, inject('deskUrl'));
-    await answered(desk.page);
   });
+  beforeEach(() => answered(desk.page));
   afterEach(() => expect(desk.complaints).toEqual([]));
   afterAll(() => desk?.close());
 

@@ -18,12 +18,24 @@ const sizes = [
 ];
 const schemes = ['light', 'dark'] as const;
 
+/** Waits for the first answer, the curve and the limits at every size. */
+const answered = async (page: Page): Promise<void> => {
+  const figure = page.locator(
+    'beam-path .side.right [data-station="incident"] figure-value button',
+  );
+  await figure.filter({ hasText: /\d/ }).waitFor({ timeout: 60_000 });
+  await page.locator('curve-panel svg').first().waitFor({ timeout: 60_000 });
+  await page.locator('beam-path stack-view canvas').waitFor({ timeout: 60_000 });
+  await page.waitForTimeout(4_000);
+};
+
 /** The desk as it opens. Add a picture by adding a row to `shots`. */
 const opening: readonly Shot[] = sizes.flatMap((viewport) =>
   schemes.map((colorScheme) => ({
     name: `desk-${viewport.width}x${viewport.height}-${colorScheme}`,
     viewport,
     colorScheme,
+    prepare: answered,
   })),
 );
 
@@ -63,7 +75,7 @@ const checks: readonly Shot[] = schemes.flatMap((colorScheme) => [
 const stacks: readonly Shot[] = [
   {
     name: 'stack-paths',
-    viewport: sizes[0],
+    viewport: sizes[1],
     colorScheme: 'light',
     prepare: async (page) => {
       await runCheck(page, '100 000');

@@ -15,6 +15,10 @@ const numberAt = (json: Json, key: string): number | null => {
 const drawn_mm = (layers: readonly Json[]): number =>
   layers.reduce<number>((sum, layer) => sum + (numberAt(layer, 'thickness_mm') ?? 0), 0);
 
+/** True when every layer has a thickness: a faulty entry must not change the patient. */
+const isDrawn = (layers: readonly Json[]): boolean =>
+  layers.length > 0 && layers.every((layer) => (numberAt(layer, 'thickness_mm') ?? 0) > 0);
+
 const rounded = (value: number): number => Number(value.toPrecision(12));
 
 /**
@@ -26,7 +30,7 @@ function withLayers(document: Json, layers: readonly Json[]): Json {
   const after = drawn_mm(layers);
   const changed = withValueAt(document, 'patient.layers', layers);
   const sizes = valueAtPath(document, 'patient.sizes');
-  if (!Array.isArray(sizes) || !Number.isFinite(after) || after <= 0) return changed;
+  if (!Array.isArray(sizes) || !isDrawn(layersOf(document)) || !isDrawn(layers)) return changed;
   const follow = sizes.map((size) =>
     Math.abs((numberAt(size, 'thickness_mm') ?? Number.NaN) - before) < 1e-6
       ? withValueAt(size, 'thickness_mm', rounded(after))

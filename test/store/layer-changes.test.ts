@@ -34,7 +34,11 @@ describe('changing the layers', () => {
   test('what is not a number is kept for the user to correct, sizes untouched', () => {
     const changed = setLayerThickness(1, 'thick')(document);
     expect(valueAtPath(changed, 'patient.layers[1].thickness_mm')).toBe('thick');
-    expect(valueAtPath(changed, 'patient.sizes[1].thickness_mm')).toBe(290);
+    for (const faulty of ['thick', 0, -3, null]) {
+      expect(sizes(setLayerThickness(1, faulty)(document))).toEqual(sizes(document));
+      const again = setLayerThickness(1, 170)(setLayerThickness(1, faulty)(document));
+      expect(sizes(again)).toEqual(sizes(document));
+    }
   });
 
   test('moving swaps neighbours and changes no size', () => {

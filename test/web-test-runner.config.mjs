@@ -50,6 +50,7 @@ const config = {
   files: ['test/**/*.browser.test.ts'],
   nodeResolve: false,
   watch: false,
+  // A page behind another is not drawn, and its tests would wait for a frame that never comes.
   concurrency: 1,
   middleware: [viteMiddleware],
   plugins: [{ name: 'close-vite', serverStop: () => vite.close() }],

@@ -25,6 +25,3 @@ export const blockedBy = (code: string, message: string, more: Partial<Finding> 
   message,
   ...more,
 });
-
-export const limitsOf = (findings: readonly Finding[]): Finding[] =>
-  findings.filter(({ severity }) => severity === 'limit');

@@ -1,4 +1,5 @@
 import type { Case, Size } from '../case/schema.js';
+import { limitsOf } from '../findings.js';
 import { isAllowed } from '../limits.js';
 import { operatingPoint } from '../operating-point.js';
 import type { HoldConstant } from '../results.js';
@@ -7,7 +8,7 @@ import type { Setting } from '../setting.js';
 import { type CostName, costs, figureOfMerit } from '../sweep/costs.js';
 import { type SweepSetting, sweepSetting } from '../sweep/sweep-setting.js';
 import { window90_kV } from '../sweep/window.js';
-import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
+import { type Answer, blockedBy, noAnswer } from './answer.js';
 
 export interface BestSetting {
   readonly setting: Setting;

@@ -1,4 +1,5 @@
 import type { Case, Size, Technique } from '../case/schema.js';
+import { limitsOf } from '../findings.js';
 import { deliverable_mg_per_mL } from '../limits/agent-limits.js';
 import { numberText } from '../number-text.js';
 import { findRoot } from '../numeric/find-root.js';
@@ -7,7 +8,7 @@ import { sdnrAt } from '../readout/index.js';
 import type { Finding } from '../results.js';
 import { resolveAgent } from '../stack/resolve-material.js';
 import { settingAsSet } from '../sweep/sweep-setting.js';
-import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
+import { type Answer, blockedBy, noAnswer } from './answer.js';
 import { withAgentAmount } from './with-agent.js';
 
 export interface LeastAgent {

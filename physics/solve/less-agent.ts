@@ -1,4 +1,5 @@
 import type { Case, Size, Technique } from '../case/schema.js';
+import { limitsOf } from '../findings.js';
 import { isAllowed } from '../limits.js';
 import { numberText } from '../number-text.js';
 import { findRoot } from '../numeric/find-root.js';
@@ -6,7 +7,7 @@ import { operatingPoint } from '../operating-point.js';
 import type { Finding, HoldConstant } from '../results.js';
 import { roomPotentials_kV } from '../scan.js';
 import { type SweepSetting, sweepSetting } from '../sweep/sweep-setting.js';
-import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
+import { type Answer, blockedBy, noAnswer } from './answer.js';
 import { sdnrOf } from './least-agent.js';
 import { withAgentAmount } from './with-agent.js';
 

@@ -1,9 +1,10 @@
 import type { Case, Size, Technique } from '../case/schema.js';
+import { limitsOf } from '../findings.js';
 import { numberText } from '../number-text.js';
 import { operatingPoint } from '../operating-point.js';
 import type { Finding } from '../results.js';
 import { settingAsSet } from '../sweep/sweep-setting.js';
-import { type Answer, blockedBy, limitsOf, noAnswer } from './answer.js';
+import { type Answer, blockedBy, noAnswer } from './answer.js';
 
 export interface ThickestPatient {
   readonly thickness_mm: number;

@@ -13,9 +13,9 @@ export { isAllowed } from './limits.js';
 export { type OperatingPoint, operatingPoint } from './operating-point.js';
 // Weighing: every technique at every size, every Proposed against Current.
 export * from './results.js';
-export { type RuleDeparture, rulesOfThumb } from './rules-of-thumb.js';
 // The decision: all settings, what no setting beats, who is worse off, what to solve for.
-export { type PotentialScan, potentialScan, roomPotentials_kV } from './scan.js';
+export { roomPotentials_kV } from './room-potentials.js';
+export { type RuleDeparture, rulesOfThumb } from './rules-of-thumb.js';
 export { mixOutcomes, outcomeSentence, percentileResults } from './sizes.js';
 export * from './solve.js';
 export { type Sweep, type SweepRequest, sweep, wholeRoom } from './sweep.js';

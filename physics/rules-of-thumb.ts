@@ -1,6 +1,6 @@
 import type { Case, Size } from './case/schema.js';
 import { operatingPoint } from './operating-point.js';
-import { roomPotentials_kV } from './scan.js';
+import { roomPotentials_kV } from './room-potentials.js';
 import { deliver } from './yield.js';
 
 /** One rule of thumb at one potential: the factor it promises and the factor the model finds. */

@@ -2,7 +2,7 @@ import type { Case } from '../case/schema.js';
 import { isCurve } from '../control.js';
 import { isAllowedBySetting } from '../limits.js';
 import type { OperatingPoint } from '../operating-point.js';
-import { roomPotentials_kV } from '../scan.js';
+import { roomPotentials_kV } from '../room-potentials.js';
 import { type Setting, settingLabel } from '../setting.js';
 import { distance_kV } from '../sweep/nearness.js';
 import { sweepSetting } from '../sweep/sweep-setting.js';

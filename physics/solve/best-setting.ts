@@ -3,7 +3,7 @@ import { limitsOf } from '../findings.js';
 import { isAllowed } from '../limits.js';
 import { operatingPoint } from '../operating-point.js';
 import type { HoldConstant } from '../results.js';
-import { roomPotentials_kV } from '../scan.js';
+import { roomPotentials_kV } from '../room-potentials.js';
 import type { Setting } from '../setting.js';
 import { type CostName, costs, figureOfMerit } from '../sweep/costs.js';
 import { type SweepSetting, sweepSetting } from '../sweep/sweep-setting.js';

@@ -5,7 +5,7 @@ import { numberText } from '../number-text.js';
 import { findRoot } from '../numeric/find-root.js';
 import { operatingPoint } from '../operating-point.js';
 import type { Finding, HoldConstant } from '../results.js';
-import { roomPotentials_kV } from '../scan.js';
+import { roomPotentials_kV } from '../room-potentials.js';
 import { type SweepSetting, sweepSetting } from '../sweep/sweep-setting.js';
 import { type Answer, blockedBy, noAnswer } from './answer.js';
 import { sdnrOf } from './least-agent.js';

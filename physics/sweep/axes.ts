@@ -1,5 +1,5 @@
 import type { Case, Size } from '../case/schema.js';
-import { roomPotentials_kV } from '../scan.js';
+import { roomPotentials_kV } from '../room-potentials.js';
 import { sizesOf } from '../stack/sizes.js';
 
 /** What a sweep runs over. */

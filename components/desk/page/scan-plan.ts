@@ -1,6 +1,6 @@
 import type { Case } from '../../../physics/case/schema.js';
 import type { HoldConstant } from '../../../physics/results.js';
-import { roomPotentials_kV } from '../../../physics/scan.js';
+import { roomPotentials_kV } from '../../../physics/room-potentials.js';
 import type { ScanRequest } from '../../workers/scan-slice.js';
 
 /** Potentials computed at a time: short enough that an edit never waits long behind them. */
